@@ -1,0 +1,2 @@
+/** The version in package.json, written in by the build. */
+declare const __LAYERHEAD_VERSION__: string;
