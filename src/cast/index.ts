@@ -1,0 +1,3 @@
+export type { Cast, CastId, Samples } from "./cast.ts";
+export { readCastFile } from "./read/read-cast-file.ts";
+export type { ColumnReading, ColumnRole, FileReading } from "./reading.ts";
