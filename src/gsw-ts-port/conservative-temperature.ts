@@ -1,0 +1,106 @@
+import { CONSERVATIVE_HEAT_CAPACITY } from "./constants.ts";
+import { enthalpyAt, enthalpySlopeAt, fillIsobar, type Isobar, newIsobar, TEMPERATURE_SCALE_C } from "./isobar.ts";
+import { adiabaticTemperature } from "./potential-temperature.ts";
+
+/** Newton steps below this size, in units of 40 degC, leave an error below 1e-13 degC. */
+const LAST_STEP = 1e-7;
+const MOST_STEPS = 8;
+
+const fromPotential = (surface: Isobar, pt0: number): number =>
+  enthalpyAt(surface, pt0 / TEMPERATURE_SCALE_C) / CONSERVATIVE_HEAT_CAPACITY;
+
+function toPotential(surface: Isobar, CT: number): number {
+  const target = CONSERVATIVE_HEAT_CAPACITY * CT;
+  let y = CT / TEMPERATURE_SCALE_C;
+  for (let count = 0; count < MOST_STEPS; count++) {
+    const step = (enthalpyAt(surface, y) - target) / enthalpySlopeAt(surface, y);
+    y -= step;
+    if (!(Math.abs(step) > LAST_STEP)) break;
+  }
+  return TEMPERATURE_SCALE_C * y;
+}
+
+/**
+ * Conservative temperature from potential temperature.
+ *
+ * @param SA absolute salinity, g/kg; below zero counts as zero
+ * @param pt0 potential temperature referred to the surface, degC (ITS-90)
+ * @returns degC; NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eq. 3.3.1: potential enthalpy over a fixed heat capacity
+ */
+export const conservativeTemperatureFromPotential = (SA: number, pt0: number): number =>
+  fromPotential(fillIsobar(SA, 0, 0, newIsobar()), pt0);
+
+/**
+ * Potential temperature, referred to the surface, from conservative temperature.
+ *
+ * @param SA absolute salinity, g/kg; below zero counts as zero
+ * @param CT conservative temperature, degC
+ * @returns degC (ITS-90), converged to 1e-13; NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eq. 3.3.1, solved by Newton's method
+ */
+export const potentialTemperatureFromConservative = (SA: number, CT: number): number =>
+  toPotential(fillIsobar(SA, 0, 0, newIsobar()), CT);
+
+/**
+ * Conservative temperature from in-situ temperature.
+ *
+ * @param SA absolute salinity, g/kg; below zero counts as zero
+ * @param t in-situ temperature, degC (ITS-90)
+ * @param p sea pressure, dbar
+ * @returns degC; NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eqs 3.1.3 and 3.3.1
+ * @example conservativeTemperature(20, 15, 50) // 15.347795795
+ */
+export const conservativeTemperature = (SA: number, t: number, p: number): number =>
+  conservativeTemperatureOn(newIsobar(), newIsobar(), SA, t, p);
+
+/**
+ * In-situ temperature from conservative temperature.
+ *
+ * @param SA absolute salinity, g/kg; below zero counts as zero
+ * @param CT conservative temperature, degC
+ * @param p sea pressure, dbar
+ * @returns degC (ITS-90), converged to 1e-13; NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eqs 3.1.3 and 3.3.1
+ */
+export const inSituTemperature = (SA: number, CT: number, p: number): number =>
+  inSituTemperatureOn(newIsobar(), newIsobar(), SA, CT, p);
+
+/** Conservative temperature (degC) of n samples of SA (g/kg), t (degC, in situ) and p (dbar); `out` may be an input. */
+export function conservativeTemperatureInto(
+  SA: Float64Array,
+  t: Float64Array,
+  p: Float64Array,
+  out: Float64Array,
+): Float64Array {
+  const surface = newIsobar();
+  const local = newIsobar();
+  for (let i = 0; i < out.length; i++) out[i] = conservativeTemperatureOn(surface, local, SA[i]!, t[i]!, p[i]!);
+  return out;
+}
+
+/** In-situ temperature (degC) of n samples of SA (g/kg), CT (degC) and p (dbar); `out` may be an input. */
+export function inSituTemperatureInto(
+  SA: Float64Array,
+  CT: Float64Array,
+  p: Float64Array,
+  out: Float64Array,
+): Float64Array {
+  const surface = newIsobar();
+  const local = newIsobar();
+  for (let i = 0; i < out.length; i++) out[i] = inSituTemperatureOn(surface, local, SA[i]!, CT[i]!, p[i]!);
+  return out;
+}
+
+// The kernels fill two isobars that the caller lends, so that arrays of samples cost no allocation.
+
+function conservativeTemperatureOn(surface: Isobar, local: Isobar, SA: number, t: number, p: number): number {
+  fillIsobar(SA, 0, 0, surface);
+  return fromPotential(surface, adiabaticTemperature(fillIsobar(SA, p, 0, local), surface, t));
+}
+
+function inSituTemperatureOn(surface: Isobar, local: Isobar, SA: number, CT: number, p: number): number {
+  fillIsobar(SA, 0, 0, surface);
+  return adiabaticTemperature(surface, fillIsobar(SA, p, 0, local), toPotential(surface, CT));
+}

@@ -1,0 +1,23 @@
+export {
+  balticSalinity,
+  practicalSalinityFromReference,
+  referenceSalinity,
+  referenceSalinityInto,
+} from "./absolute-salinity.ts";
+export {
+  conservativeTemperature,
+  conservativeTemperatureFromPotential,
+  conservativeTemperatureInto,
+  inSituTemperature,
+  inSituTemperatureInto,
+  potentialTemperatureFromConservative,
+} from "./conservative-temperature.ts";
+export * from "./constants.ts";
+export { density, densityInto, potentialDensityAnomaly } from "./density.ts";
+export { exactDensity, exactSoundSpeed } from "./exact-density.ts";
+export { gravity, gravityAtDepth } from "./gravity.ts";
+export { potentialTemperature } from "./potential-temperature.ts";
+export { dynamicEnthalpy, type SpecificVolumeSlopes, specificVolume, specificVolumeSlopes } from "./specific-volume.ts";
+export { standardOceanHeight, standardOceanPressure } from "./standard-ocean.ts";
+export { GRAVITY_DEPTH_RATE, surfaceGravity } from "./surface-gravity.ts";
+export { compressibility, halineContraction, soundSpeed, thermalExpansion } from "./volume-coefficients.ts";

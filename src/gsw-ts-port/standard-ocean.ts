@@ -1,0 +1,40 @@
+import { PA_PER_DBAR, STANDARD_OCEAN_SALINITY } from "./constants.ts";
+import { dynamicEnthalpy, specificVolume } from "./specific-volume.ts";
+import { GRAVITY_DEPTH_RATE, surfaceGravity } from "./surface-gravity.ts";
+
+/**
+ * Height in the standard ocean (SA 35.16504 g/kg, CT 0 degC) of a sea pressure: what most probes print as depth.
+ * Gravity work down to z equals the enthalpy of the water: g0 (z - rate z^2 / 2) = -h(p).
+ *
+ * @param p sea pressure, dbar
+ * @param lat latitude, degrees north
+ * @returns height, m, positive up from the sea surface (so negative in water); NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eq. 3.32.3
+ * @example standardOceanHeight(100, 45) // -99.16434939
+ */
+export function standardOceanHeight(p: number, lat: number): number {
+  const g0 = surfaceGravity(lat);
+  const h = dynamicEnthalpy(STANDARD_OCEAN_SALINITY, 0, p);
+  // The root in the form that does not cancel near the surface.
+  return (-2 * h) / (g0 + Math.sqrt(g0 * (g0 + 2 * GRAVITY_DEPTH_RATE * h)));
+}
+
+/**
+ * Sea pressure in the standard ocean at a height: the inverse of standardOceanHeight.
+ *
+ * @param z height, m, positive up from the sea surface (negative in water)
+ * @param lat latitude, degrees north
+ * @returns sea pressure, dbar; NaN in, NaN out
+ * @see IOC, SCOR & IAPSO 2010, eq. 3.32.3
+ * @example standardOceanPressure(-100, 45) // 100.8428986
+ */
+export function standardOceanPressure(z: number, lat: number): number {
+  const target = -surfaceGravity(lat) * z * (1 - 0.5 * GRAVITY_DEPTH_RATE * z);
+  let p = -z;
+  // Newton, with dh/dp = v: the error falls below rounding after three steps at any ocean depth.
+  for (let step = 0; step < 5; step++) {
+    const excess = dynamicEnthalpy(STANDARD_OCEAN_SALINITY, 0, p) - target;
+    p -= excess / (PA_PER_DBAR * specificVolume(STANDARD_OCEAN_SALINITY, 0, p));
+  }
+  return p;
+}
