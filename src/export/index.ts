@@ -1,0 +1,2 @@
+export { csvText } from "./csv.ts";
+export { levelsCsv, profileCsv } from "./profile-csv.ts";

@@ -1,0 +1,1 @@
+export { flagSamples, QUALITY_FLAG } from "./flag-samples.ts";

@@ -1,0 +1,74 @@
+import type { Issue } from "../base/index.ts";
+import type { Cast } from "../cast/index.ts";
+import { type Column, describeAtDepths, integrateCast, type Profile, sampledProfile } from "../column/index.ts";
+import { flagSamples, QUALITY_FLAG } from "../quality/index.ts";
+import type { Survey } from "./survey.ts";
+
+/** What a survey says about one of its casts; plain data, so that it can be handed between threads. */
+export type SolvedCast = {
+  readonly cast: Cast;
+  /** From reading and from solving, in that order. */
+  readonly issues: readonly Issue[];
+} & ({ readonly solution: Solution } | { readonly solution: null });
+
+export interface Solution {
+  readonly column: Column;
+  /** Surface, samples in order of depth, and the bed where it is known. */
+  readonly profile: Profile;
+  /** Quality flag of each row of the profile (QARTOD); 9 where there was no sample. */
+  readonly flag: Uint8Array;
+  /** One row a level, in the survey's order. */
+  readonly levels: Profile;
+}
+
+/** The one way from a survey to its results: the page, the command and the library all come through here. */
+export const solve = (survey: Survey): readonly SolvedCast[] => survey.casts.map((cast) => solveCast(survey, cast));
+
+/** One cast of a survey. Never throws for bad data: a cast without a solution says why among its issues. */
+export function solveCast(survey: Pick<Survey, "basis" | "levels">, cast: Cast): SolvedCast {
+  const integrated = integrateCast(cast, survey.basis);
+  if (!integrated.ok) return { cast, issues: [...cast.issues, ...integrated.issues], solution: null };
+  const column = integrated.value;
+  const profile = sampledProfile(column);
+  const { flag: sampleFlag, issues: qualityIssues } = flagSamples(cast, survey.basis.unmeasuredPracticalSalinity);
+  const flag = new Uint8Array(profile.n).fill(QUALITY_FLAG.missing);
+  // The first row is the surface; the samples follow in the column's order.
+  column.sampleIndex.forEach((sample, knot) => {
+    flag[knot + 1] = sampleFlag[sample]!;
+  });
+  const levels = describeAtDepths(
+    column,
+    survey.levels.map((level) => level.depthM),
+  );
+  const issues = [...cast.issues, ...integrated.issues, ...qualityIssues, ...levelIssues(survey, column)];
+  return { cast, issues, solution: { column, profile, flag, levels } };
+}
+
+function levelIssues(survey: Pick<Survey, "levels">, column: Column): readonly Issue[] {
+  const firstDepthM = column.depthM[0]!;
+  const lastDepthM = column.depthM[column.n - 1]!;
+  const bedKnown = column.basis.bedDepthM === column.bottomDepthM;
+  return survey.levels.flatMap((level): Issue[] => {
+    const at = `level ${level.name} at ${level.depthM} m`;
+    const warn = (code: string, message: string): Issue[] => [{ severity: "warning", code, message }];
+    if (bedKnown && level.depthM > column.bottomDepthM)
+      return warn(
+        "level-below-bed",
+        `${at} lies below the bed at ${column.bottomDepthM} m; it has no result, move it or the bed`,
+      );
+    if (level.depthM > lastDepthM)
+      return warn(
+        "level-in-bed-gap",
+        `${at} lies ${(level.depthM - lastDepthM).toFixed(2)} m below the last sample; the last sample is held down to it`,
+      );
+    if (level.depthM < firstDepthM)
+      return [
+        {
+          severity: "note",
+          code: "level-in-surface-gap",
+          message: `${at} lies above the first sample at ${firstDepthM.toFixed(2)} m; the first sample is held up to the surface`,
+        },
+      ];
+    return [];
+  });
+}
