@@ -1,0 +1,40 @@
+import type { Profile } from "../column/index.ts";
+import type { SolvedCast, Survey } from "../survey/index.ts";
+import { basisJson } from "./basis-json.ts";
+import { PROFILE_COLUMNS } from "./columns.ts";
+import { VERSION } from "./version.ts";
+
+type Numbers = readonly (number | null)[];
+
+/** JSON has no NaN: missing is null. */
+const numbers = (values: ArrayLike<number>): Numbers =>
+  Array.from(values, (value) => (Number.isFinite(value) ? value : null));
+
+const profileJson = (profile: Profile): Record<string, Numbers | readonly string[]> => ({
+  ...Object.fromEntries(PROFILE_COLUMNS.map((column) => [column.name, numbers(column.values(profile))])),
+  origin: profile.origin,
+});
+
+/**
+ * A solved survey as one JSON value: every profile as arrays in order of depth, every level, every issue, and the basis
+ * they stand on. A cast that could not be solved has null for profile and levels, and its issues say why.
+ */
+export function surveyJson(survey: Survey, solved: readonly SolvedCast[]): Record<string, unknown> {
+  return {
+    version: VERSION,
+    basis: basisJson(survey.basis),
+    casts: solved.map(({ cast, solution, issues }) => ({
+      name: cast.name,
+      station: cast.station,
+      time: cast.time,
+      latitude: cast.latitudeDeg,
+      longitude: cast.longitudeDeg,
+      distance_km: cast.distanceKm,
+      file: cast.fileName,
+      reference_density_kg_m3: solution?.column.referenceRhoKgM3 ?? null,
+      profile: solution && { ...profileJson(solution.profile), flag: numbers(solution.flag) },
+      levels: solution && { level: survey.levels.map((level) => level.name), ...profileJson(solution.levels) },
+      issues: issues.map(({ severity, code, message, line }) => ({ severity, code, message, line: line ?? null })),
+    })),
+  };
+}
