@@ -1,8 +1,9 @@
 import { CONSERVATIVE_HEAT_CAPACITY } from "./constants.ts";
+import { fillGibbs, type Isohaline, newIsohaline } from "./gibbs-saline.ts";
 import { enthalpyAt, enthalpySlopeAt, fillIsobar, type Isobar, newIsobar, TEMPERATURE_SCALE_C } from "./isobar.ts";
 import { adiabaticTemperature } from "./potential-temperature.ts";
 
-/** Newton steps below this size, in units of 40 degC, leave an error below 1e-13 degC. */
+/** Newton doubles its digits: a step below this, in units of 40 degC, leaves an error below 1e-13 degC. */
 const LAST_STEP = 1e-7;
 const MOST_STEPS = 8;
 
@@ -20,6 +21,8 @@ function toPotential(surface: Isobar, CT: number): number {
   return TEMPERATURE_SCALE_C * y;
 }
 
+const surfaceIsobar = (SA: number): Isobar => fillIsobar(fillGibbs(SA, newIsohaline()), 0, 0, newIsobar());
+
 /**
  * Conservative temperature from potential temperature.
  *
@@ -29,7 +32,7 @@ function toPotential(surface: Isobar, CT: number): number {
  * @see IOC, SCOR & IAPSO 2010, eq. 3.3.1: potential enthalpy over a fixed heat capacity
  */
 export const conservativeTemperatureFromPotential = (SA: number, pt0: number): number =>
-  fromPotential(fillIsobar(SA, 0, 0, newIsobar()), pt0);
+  fromPotential(surfaceIsobar(SA), pt0);
 
 /**
  * Potential temperature, referred to the surface, from conservative temperature.
@@ -40,7 +43,7 @@ export const conservativeTemperatureFromPotential = (SA: number, pt0: number): n
  * @see IOC, SCOR & IAPSO 2010, eq. 3.3.1, solved by Newton's method
  */
 export const potentialTemperatureFromConservative = (SA: number, CT: number): number =>
-  toPotential(fillIsobar(SA, 0, 0, newIsobar()), CT);
+  toPotential(surfaceIsobar(SA), CT);
 
 /**
  * Conservative temperature from in-situ temperature.
@@ -53,7 +56,7 @@ export const potentialTemperatureFromConservative = (SA: number, CT: number): nu
  * @example conservativeTemperature(20, 15, 50) // 15.347795795
  */
 export const conservativeTemperature = (SA: number, t: number, p: number): number =>
-  conservativeTemperatureOn(newIsobar(), newIsobar(), SA, t, p);
+  conservativeTemperatureOn(newWorkspace(), SA, t, p);
 
 /**
  * In-situ temperature from conservative temperature.
@@ -65,7 +68,7 @@ export const conservativeTemperature = (SA: number, t: number, p: number): numbe
  * @see IOC, SCOR & IAPSO 2010, eqs 3.1.3 and 3.3.1
  */
 export const inSituTemperature = (SA: number, CT: number, p: number): number =>
-  inSituTemperatureOn(newIsobar(), newIsobar(), SA, CT, p);
+  inSituTemperatureOn(newWorkspace(), SA, CT, p);
 
 /** Conservative temperature (degC) of n samples of SA (g/kg), t (degC, in situ) and p (dbar); `out` may be an input. */
 export function conservativeTemperatureInto(
@@ -74,9 +77,8 @@ export function conservativeTemperatureInto(
   p: Float64Array,
   out: Float64Array,
 ): Float64Array {
-  const surface = newIsobar();
-  const local = newIsobar();
-  for (let i = 0; i < out.length; i++) out[i] = conservativeTemperatureOn(surface, local, SA[i]!, t[i]!, p[i]!);
+  const workspace = newWorkspace();
+  for (let i = 0; i < out.length; i++) out[i] = conservativeTemperatureOn(workspace, SA[i]!, t[i]!, p[i]!);
   return out;
 }
 
@@ -87,20 +89,30 @@ export function inSituTemperatureInto(
   p: Float64Array,
   out: Float64Array,
 ): Float64Array {
-  const surface = newIsobar();
-  const local = newIsobar();
-  for (let i = 0; i < out.length; i++) out[i] = inSituTemperatureOn(surface, local, SA[i]!, CT[i]!, p[i]!);
+  const workspace = newWorkspace();
+  for (let i = 0; i < out.length; i++) out[i] = inSituTemperatureOn(workspace, SA[i]!, CT[i]!, p[i]!);
   return out;
 }
 
-// The kernels fill two isobars that the caller lends, so that arrays of samples cost no allocation.
-
-function conservativeTemperatureOn(surface: Isobar, local: Isobar, SA: number, t: number, p: number): number {
-  fillIsobar(SA, 0, 0, surface);
-  return fromPotential(surface, adiabaticTemperature(fillIsobar(SA, p, 0, local), surface, t));
+/** Room for one sample's intermediate polynomials, lent to the kernels so that arrays of samples cost no allocation. */
+interface Workspace {
+  readonly gibbs: Isohaline;
+  readonly surface: Isobar;
+  readonly local: Isobar;
 }
 
-function inSituTemperatureOn(surface: Isobar, local: Isobar, SA: number, CT: number, p: number): number {
-  fillIsobar(SA, 0, 0, surface);
-  return adiabaticTemperature(surface, fillIsobar(SA, p, 0, local), toPotential(surface, CT));
+const newWorkspace = (): Workspace => ({ gibbs: newIsohaline(), surface: newIsobar(), local: newIsobar() });
+
+function conservativeTemperatureOn({ gibbs, surface, local }: Workspace, SA: number, t: number, p: number): number {
+  fillGibbs(SA, gibbs);
+  fillIsobar(gibbs, 0, 0, surface);
+  fillIsobar(gibbs, p, 0, local);
+  return fromPotential(surface, adiabaticTemperature(local, surface, t));
+}
+
+function inSituTemperatureOn({ gibbs, surface, local }: Workspace, SA: number, CT: number, p: number): number {
+  fillGibbs(SA, gibbs);
+  fillIsobar(gibbs, 0, 0, surface);
+  fillIsobar(gibbs, p, 0, local);
+  return adiabaticTemperature(surface, local, toPotential(surface, CT));
 }

@@ -20,3 +20,6 @@ export const PA_PER_DBAR = 1e4;
 
 /** Conductivity of seawater of SP 35 at 15 degC (IPTS-68) and sea pressure 0, mS/cm: the convention that belongs to PSS-78. */
 export const STANDARD_CONDUCTIVITY_MS_CM = 42.914;
+
+/** Temperature on the scale of 1968 per degC on that of 1990; good to 1 mK below 40 degC. Saunders 1990. */
+export const IPTS68_PER_ITS90 = 1.00024;

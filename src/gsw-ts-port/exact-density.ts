@@ -1,4 +1,5 @@
 /** Properties of seawater straight from its Gibbs function, in in-situ temperature: the truth that the 75-term polynomial fits. */
+import { fillGibbs, newIsohaline } from "./gibbs-saline.ts";
 import {
   curvatureAt,
   fillIsobar,
@@ -20,7 +21,7 @@ import {
  * @example exactDensity(0, 20, 0) // 998.2071458
  */
 export const exactDensity = (SA: number, t: number, p: number): number =>
-  PRESSURE_SCALE_PA / valueAt(fillIsobar(SA, p, 1, newIsobar()), t / TEMPERATURE_SCALE_C);
+  PRESSURE_SCALE_PA / valueAt(fillIsobar(fillGibbs(SA, newIsohaline()), p, 1, newIsobar()), t / TEMPERATURE_SCALE_C);
 
 /**
  * Speed of sound from the Gibbs function.
@@ -33,12 +34,13 @@ export const exactDensity = (SA: number, t: number, p: number): number =>
  */
 export function exactSoundSpeed(SA: number, t: number, p: number): number {
   const y = t / TEMPERATURE_SCALE_C;
+  const gibbs = fillGibbs(SA, newIsohaline());
   const scratch = newIsobar();
-  const gyy = curvatureAt(fillIsobar(SA, p, 0, scratch), y);
-  fillIsobar(SA, p, 1, scratch);
+  const gyy = curvatureAt(fillIsobar(gibbs, p, 0, scratch), y);
+  fillIsobar(gibbs, p, 1, scratch);
   const gz = valueAt(scratch, y);
   const gyz = slopeAt(scratch, y);
-  const gzz = valueAt(fillIsobar(SA, p, 2, scratch), y);
+  const gzz = valueAt(fillIsobar(gibbs, p, 2, scratch), y);
   // The scales of y cancel; z carries none beyond those of J/kg, so the root is in m/s.
   return gz * Math.sqrt(gyy / (gyz * gyz - gyy * gzz));
 }

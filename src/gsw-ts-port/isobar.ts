@@ -1,64 +1,49 @@
 /**
- * The Gibbs function of seawater along an isobar. At one salinity and one pressure the Gibbs function (water part plus
- * saline part, IAPWS SR7-09 and R13-08) is a polynomial of degree seven in temperature; entropy, enthalpy and heat
- * capacity are its slopes, and the isobars of its slopes with pressure give volume and compressibility.
+ * The Gibbs function of seawater along an isobar. At one salinity and one pressure it is a polynomial of degree seven in
+ * temperature; entropy, enthalpy and heat capacity are its slopes, and the isobars of its slopes with pressure give
+ * volume and compressibility.
  */
-import { CELSIUS_ZERO_K, PA_PER_DBAR, SALINITY_SCALE } from "./constants.ts";
-import { SALINE, SALINE_LOGARITHM } from "./gibbs-saline-coefficients.ts";
-import { WATER } from "./gibbs-water-coefficients.ts";
+import { CELSIUS_ZERO_K, PA_PER_DBAR } from "./constants.ts";
+import type { Isohaline } from "./gibbs-saline.ts";
+import { HIGHEST_PRESSURE_POWER, HIGHEST_TEMPERATURE_POWER } from "./gibbs-water.ts";
 
-/** Temperature that makes the polynomial's variable y = t / 40 degC equal to 1. */
+/** Temperature at which the polynomial's variable y = t / 40 degC is 1. */
 export const TEMPERATURE_SCALE_C = 40;
 const PRESSURE_SCALE_DBAR = 1e4;
+/** Pressure at which z is 1. */
 export const PRESSURE_SCALE_PA = PRESSURE_SCALE_DBAR * PA_PER_DBAR;
 
-/** 0 degC in units of the temperature scale: y + ABSOLUTE_ZERO_OFFSET is the absolute temperature. */
+/** y plus this is the absolute temperature in units of the temperature scale. */
 const ABSOLUTE_OFFSET = CELSIUS_ZERO_K / TEMPERATURE_SCALE_C;
 
 /** Coefficients of y^0 to y^7, J/kg. */
 export type Isobar = Float64Array;
 
-export const newIsobar = (): Isobar => new Float64Array(WATER.length);
+export const newIsobar = (): Isobar => new Float64Array(HIGHEST_TEMPERATURE_POWER + 1);
 
-/** How often the Gibbs function was differentiated with respect to z before it was collapsed. */
+/** How often the Gibbs function is differentiated with respect to z before it is collapsed. */
 export type PressureOrder = 0 | 1 | 2;
 
 /** Factor that `order` differentiations put before z^k. */
 const fallingPower = (k: number, order: PressureOrder): number => (order === 0 ? 1 : order === 1 ? k : k * (k - 1));
 
-function polynomial(coefficients: readonly number[], x: number): number {
-  let sum = 0;
-  for (let i = coefficients.length - 1; i >= 0; i--) sum = sum * x + coefficients[i]!;
-  return sum;
-}
-
 /**
- * Collapses the Gibbs function, or its first or second slope with z = p / 10^4 dbar, to an isobar.
+ * Collapses an isohaline, or its first or second slope with z = p / 10^4 dbar, to an isobar.
  *
- * @param SA absolute salinity, g/kg; below zero counts as zero
+ * @param m the Gibbs function at one salinity
  * @param p sea pressure, dbar
  * @param order number of differentiations with respect to z
  * @param out receives the coefficients
  */
-export function fillIsobar(SA: number, p: number, order: PressureOrder, out: Isobar): Isobar {
-  const x2 = Math.max(SA, 0) / SALINITY_SCALE;
-  const x = Math.sqrt(x2);
+export function fillIsobar(m: Isohaline, p: number, order: PressureOrder, out: Isobar): Isobar {
   const z = p / PRESSURE_SCALE_DBAR;
-  for (let j = 0; j < WATER.length; j++) {
-    const water = WATER[j]!;
-    const saline = SALINE[j];
+  for (let j = 0; j <= HIGHEST_TEMPERATURE_POWER; j++) {
     let sum = 0;
-    for (let k = water.length - 1; k >= order; k--) {
-      const salt = saline?.[k];
-      const coefficient = water[k]! + (salt === undefined ? 0 : x2 * polynomial(salt, x));
-      sum = sum * z + fallingPower(k, order) * coefficient;
+    // At the surface only the lowest power is left.
+    for (let k = z === 0 ? order : HIGHEST_PRESSURE_POWER[j]!; k >= order; k--) {
+      sum = sum * z + fallingPower(k, order) * m[10 * j + k]!;
     }
     out[j] = sum;
-  }
-  if (order === 0) {
-    // x^2 ln(x) goes to 0 with x.
-    const logarithm = x2 === 0 ? 0 : x2 * Math.log(x);
-    for (let j = 0; j < SALINE_LOGARITHM.length; j++) out[j]! += SALINE_LOGARITHM[j]! * logarithm;
   }
   return out;
 }

@@ -1,6 +1,7 @@
+import { fillGibbs, newIsohaline } from "./gibbs-saline.ts";
 import { curvatureAt, fillIsobar, type Isobar, newIsobar, slopeAt, TEMPERATURE_SCALE_C } from "./isobar.ts";
 
-/** Newton steps below this size, in units of 40 degC, leave an error below 1e-13 degC: the step doubles its digits. */
+/** Newton doubles its digits: a step below this, in units of 40 degC, leaves an error below 1e-13 degC. */
 const LAST_STEP = 1e-7;
 const MOST_STEPS = 8;
 
@@ -8,7 +9,7 @@ const MOST_STEPS = 8;
  * Temperature that water of temperature t on one isobar takes on another without exchange of heat or salt.
  *
  * @param from isobar of the Gibbs function on which the water is
- * @param to isobar of the Gibbs function to which it is brought, same salinity
+ * @param to isobar of the Gibbs function to which it is brought, at the same salinity
  * @param t temperature on `from`, degC
  * @returns temperature on `to`, degC
  */
@@ -34,5 +35,7 @@ export function adiabaticTemperature(from: Isobar, to: Isobar, t: number): numbe
  * @see IOC, SCOR & IAPSO 2010, eq. 3.1.3 (equal entropies)
  * @example potentialTemperature(35, 20, 1000) // 19.812437088
  */
-export const potentialTemperature = (SA: number, t: number, p: number, referenceP = 0): number =>
-  adiabaticTemperature(fillIsobar(SA, p, 0, newIsobar()), fillIsobar(SA, referenceP, 0, newIsobar()), t);
+export function potentialTemperature(SA: number, t: number, p: number, referenceP = 0): number {
+  const gibbs = fillGibbs(SA, newIsohaline());
+  return adiabaticTemperature(fillIsobar(gibbs, p, 0, newIsobar()), fillIsobar(gibbs, referenceP, 0, newIsobar()), t);
+}

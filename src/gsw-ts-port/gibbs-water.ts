@@ -1,8 +1,8 @@
 /**
- * Gibbs function of liquid water for oceanographic use: g (J/kg) = sum of WATER[j][k] y^j z^k with y = t / 40 degC and
- * z = p / 10^4 dbar. Valid from the freezing point to 40 degC, to 10^4 dbar. IAPWS SR7-09 (2009), table 2.
+ * Gibbs function of liquid water for oceanographic use, J/kg: the sum of ROWS[j][k] y^j z^k with y = t / 40 degC and
+ * z = p / 10^4 dbar. From the freezing point to 40 degC and to 10^4 dbar. IAPWS SR7-09 (2009), table 2.
  */
-export const WATER: readonly (readonly number[])[] = [
+const ROWS: readonly (readonly number[])[] = [
   [
     101.342743139674, 100015.695367145, -2544.5765420363, 284.517778446287, -33.3146754253611, 4.20263108803084,
     -0.546428511471039,
@@ -15,3 +15,14 @@ export const WATER: readonly (readonly number[])[] = [
   [-18.9843846514172, 63.5113936641785, -22.2897317140459, 8.17060541818112],
   [3.05081646487967, -9.63108119393062],
 ];
+
+export const HIGHEST_TEMPERATURE_POWER = ROWS.length - 1;
+
+/** The highest power of z that goes with y^j; the saline part has none higher. */
+export const HIGHEST_PRESSURE_POWER: readonly number[] = ROWS.map((row) => row.length - 1);
+
+/** The same coefficients at index 10 j + k, so that an index reads as its two powers. */
+export const WATER: Float64Array = Float64Array.from(
+  { length: 10 * ROWS.length },
+  (_, i) => ROWS[Math.floor(i / 10)]![i % 10] ?? 0,
+);
