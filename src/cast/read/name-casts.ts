@@ -1,0 +1,49 @@
+/** Short names that tell the casts of one file apart, built from no more than it takes. */
+import type { RowGroup } from "./split-casts.ts";
+
+export interface NameParts extends Pick<RowGroup, "station" | "castName" | "date"> {
+  readonly clock: string | null;
+}
+
+const baseName = (fileName: string): string => fileName.replace(/^.*[\\/]/, "").replace(/\.[^.]*$/, "") || fileName;
+
+/** "2.0" is how a spreadsheet writes station 2; a name that is only a figure gets its noun. */
+const withNoun = (noun: string, text: string): string => {
+  const plain = text.replace(/^(\d+)\.0+$/, "$1");
+  return /^[\d.]+$/.test(plain) ? `${noun} ${plain}` : plain;
+};
+
+const isVaried = (texts: readonly (string | null)[]): boolean => new Set(texts).size > 1;
+
+/** Makes equal names different, by time of day where that does it, else by counting. */
+function madeUnique(names: readonly string[], casts: readonly NameParts[]): readonly string[] {
+  const isShared = (all: readonly string[], name: string) => all.filter((other) => other === name).length > 1;
+  const timed = names.map((name, i) => {
+    const clock = casts[i]!.clock?.slice(0, 5);
+    return clock && isShared(names, name) ? `${name}, ${clock}` : name;
+  });
+  const seen = new Map<string, number>();
+  return timed.map((name) => {
+    if (!isShared(timed, name)) return name;
+    const count = (seen.get(name) ?? 0) + 1;
+    seen.set(name, count);
+    return `${name} (${count})`;
+  });
+}
+
+/** One name a cast, all different. */
+export function nameCasts(casts: readonly NameParts[], fileName: string): readonly string[] {
+  const hasStations = isVaried(casts.map((cast) => cast.station));
+  const hasDates = isVaried(casts.map((cast) => cast.date));
+  const names = casts.map((cast) => {
+    const station = cast.station === null ? null : withNoun("Station", cast.station);
+    const lowering = cast.castName === null ? null : withNoun("Cast", cast.castName);
+    const parts = [
+      hasStations || !hasDates ? station : null,
+      station !== null && !isVaried(casts.map((other) => other.castName)) ? null : lowering,
+      hasDates ? cast.date : null,
+    ].filter((part) => part !== null);
+    return parts.join(", ") || station || lowering || cast.date || baseName(fileName);
+  });
+  return madeUnique(names, casts);
+}

@@ -1,0 +1,38 @@
+/** Finds a unit by symbol or by any of its usual spellings, among them those of CF and UDUNITS. */
+import type { QuantityKind } from "./unit.ts";
+import { UNITS, type Unit } from "./unit-table.ts";
+
+/** One spelling for signs that people type in many ways; blanks, dots, underscores and slashes do not tell units apart. */
+function plain(text: string): string {
+  return text
+    .normalize("NFKC")
+    .replace(/[−–]/g, "-")
+    .replace(/[°º]/g, "deg")
+    .replace(/[µμ]/g, "u")
+    .replace(/\bper\b/gi, "/")
+    .replace(/\*\*|\^/g, "")
+    .replace(/[\s_./·*]/g, "");
+}
+
+interface Spelling {
+  readonly text: string;
+  readonly unit: Unit;
+}
+
+const SPELLINGS: readonly Spelling[] = UNITS.flatMap((unit) =>
+  [unit.symbol, unit.label, ...unit.aliases].filter((t) => t !== "").map((t) => ({ text: plain(t), unit })),
+);
+
+/**
+ * The unit a text names, or null. Case matters where it must (mS, MPa): an exact spelling wins over one that differs in
+ * case. With a kind only units of that kind are considered, so that "1" or "C" can be asked for in context.
+ * @example unitByName("degree_C")?.symbol // "degC"
+ */
+export function unitByName(text: string, kind?: QuantityKind): Unit | null {
+  const wanted = plain(text);
+  if (wanted === "") return null;
+  const candidates = kind === undefined ? SPELLINGS : SPELLINGS.filter((s) => s.unit.kind === kind);
+  const exact = candidates.find((s) => s.text === wanted);
+  const lower = wanted.toLowerCase();
+  return (exact ?? candidates.find((s) => s.text.toLowerCase() === lower))?.unit ?? null;
+}
