@@ -3,13 +3,12 @@ import {
   density,
   halineContraction,
   inSituTemperature,
+  PA_PER_DBAR,
   thermalExpansion,
 } from "../gsw-ts-port/index.ts";
 import { absoluteSalinityOf, type WaterModel, waterModel } from "../water/index.ts";
 import type { Column } from "./column.ts";
 import { gravityAtPressureMs2 } from "./gravity.ts";
-
-const PA_PER_DBAR = 1e4;
 
 /** Buoyancy frequency squared between neighbouring samples; entry k belongs to the water from knot k to knot k + 1. */
 export interface BuoyancyFrequency {

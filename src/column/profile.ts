@@ -1,12 +1,17 @@
-import { conservativeTemperature, exactSoundSpeed, potentialTemperature, soundSpeed } from "../gsw-ts-port/index.ts";
+import {
+  conservativeTemperature,
+  exactSoundSpeed,
+  PA_PER_DBAR,
+  potentialTemperature,
+  soundSpeed,
+} from "../gsw-ts-port/index.ts";
 import { absoluteSalinityOf, inSituTemperatureOf, practicalSalinityOf, waterModel } from "../water/index.ts";
 import { buoyancyFrequency } from "./buoyancy-frequency.ts";
 import type { Column } from "./column.ts";
 import { surfaceGravityMs2 } from "./gravity.ts";
 import { type Nodes, nodesAtDepths, nodesOfProfile, type Origin } from "./nodes.ts";
 
-const PA_PER_DBAR = 1e4;
-const PA_PER_KPA = 1e3;
+const KPA_PER_DBAR = PA_PER_DBAR / 1000;
 
 /**
  * Everything there is to say about some depths of a column, one entry a depth. NaN where a value does not exist: no
@@ -55,7 +60,7 @@ function describe(column: Column, nodes: Nodes, buoyancyAtKnot: (knotIndex: numb
   const { n, depthM, seaPressureDbar, salinity, tempC, knotIndex, origin } = nodes;
   const { airPressureKPa, waterSurfaceElevationM } = column.basis;
   const model = waterModel(column.basis.water);
-  const weightKPaPerM = (column.referenceRhoKgM3 * surfaceGravityMs2(column.latitudeDeg)) / PA_PER_KPA;
+  const weightKPaPerM = (column.referenceRhoKgM3 * surfaceGravityMs2(column.latitudeDeg)) / 1000;
   const each = (valueAt: (i: number) => number): Float64Array => {
     const values = new Float64Array(n);
     for (let i = 0; i < n; i++) values[i] = valueAt(i);
@@ -65,7 +70,7 @@ function describe(column: Column, nodes: Nodes, buoyancyAtKnot: (knotIndex: numb
   const measuredOr = (measured: Float64Array, derivedAt: (i: number) => number): Float64Array =>
     each((i) => (knotIndex[i]! >= 0 ? measured[knotIndex[i]!]! : derivedAt(i)));
 
-  const gaugePressureKPa = each((i) => (seaPressureDbar[i]! * PA_PER_DBAR) / PA_PER_KPA);
+  const gaugePressureKPa = each((i) => seaPressureDbar[i]! * KPA_PER_DBAR);
   // A depth without water (above the surface, below the bed) has no estimate either.
   const constantDensityPressureKPa = each((i) =>
     Number.isNaN(gaugePressureKPa[i]!) ? Number.NaN : weightKPaPerM * depthM[i]!,

@@ -1,6 +1,6 @@
 import type { Issue } from "../base/index.ts";
 import { type Cast, type Samples, salinitySource, samplePracticalSalinity } from "../cast/index.ts";
-import { standardOceanPressure } from "../gsw-ts-port/index.ts";
+import { PA_PER_DBAR, standardOceanPressure } from "../gsw-ts-port/index.ts";
 import type { Basis } from "./basis.ts";
 import { STANDARD_GRAVITY_MS2 } from "./gravity.ts";
 
@@ -34,7 +34,7 @@ function measuredCoordinate(
       return { coordinate: "pressure", values: depths.map((z) => standardOceanPressure(-z, latitude)) };
     }
     case "constant": {
-      const dbarPerM = (made.rhoKgM3 * STANDARD_GRAVITY_MS2) / 1e4;
+      const dbarPerM = (made.rhoKgM3 * STANDARD_GRAVITY_MS2) / PA_PER_DBAR;
       return { coordinate: "pressure", values: depths.map((z) => z * dbarPerM) };
     }
   }

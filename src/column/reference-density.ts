@@ -1,3 +1,4 @@
+import { PA_PER_DBAR } from "../gsw-ts-port/index.ts";
 import { waterModel } from "../water/index.ts";
 import type { Column } from "./column.ts";
 import { gravityByDepth } from "./gravity.ts";
@@ -12,7 +13,7 @@ export function meanDensityKgM3(column: Column): number {
   if (column.bottomDepthM === 0) return surfaceDensityKgM3(column);
   // Gravity is linear in depth, so its mean is its value halfway.
   const meanGravityMs2 = gravityByDepth(column.latitudeDeg)(column.bottomDepthM / 2);
-  return (bottomDbar * 1e4) / (meanGravityMs2 * column.bottomDepthM);
+  return (bottomDbar * PA_PER_DBAR) / (meanGravityMs2 * column.bottomDepthM);
 }
 
 /** Density of the held water at the surface, kg/m3. */

@@ -1,9 +1,8 @@
 import { integrateOde } from "../base/index.ts";
+import { PA_PER_DBAR } from "../gsw-ts-port/index.ts";
 import { type WaterModel, waterModel } from "../water/index.ts";
 import type { Column } from "./column.ts";
 import { gravityByDepth } from "./gravity.ts";
-
-const PA_PER_DBAR = 1e4;
 
 /** What integration needs to know of a column, whether finished or still being made. */
 export type ColumnFrame = Pick<Column, "coordinate" | "latitudeDeg"> & { readonly model: WaterModel };

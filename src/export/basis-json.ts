@@ -1,4 +1,4 @@
-import type { Basis } from "../column/index.ts";
+import type { Basis } from "../survey/index.ts";
 
 /** The basis as it is written into every output: one key an item, with its unit. */
 export function basisJson(basis: Basis): Record<string, unknown> {

@@ -1,4 +1,4 @@
-import type { Profile } from "../column/index.ts";
+import type { Profile } from "../survey/index.ts";
 
 /** One column of a profile table: the name says quantity and unit, the title and description are for people. */
 export interface TableColumn {

@@ -1,4 +1,4 @@
-import type { Basis } from "../column/index.ts";
+import type { Basis } from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
 import { PROFILE_COLUMNS } from "./columns.ts";
 import { VERSION } from "./version.ts";

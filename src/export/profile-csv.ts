@@ -1,34 +1,57 @@
-import type { SolvedCast, Survey } from "../survey/index.ts";
+import type { Profile, SolvedCast, Survey } from "../survey/index.ts";
 import { PROFILE_COLUMNS } from "./columns.ts";
 import { type Cell, csvText } from "./csv.ts";
 
-const PROFILE_HEADER = ["cast", ...PROFILE_COLUMNS.map((column) => column.name), "flag", "origin"];
-const LEVELS_HEADER = ["cast", "level", ...PROFILE_COLUMNS.map((column) => column.name), "origin"];
+const QUANTITIES = PROFILE_COLUMNS.map((column) => column.name);
 
-/** The integrated profiles of casts, one row a depth, in one table. Casts without a solution have no rows. */
+/** No sample stands behind a level, so it has no quality flag. */
+const NO_FLAG = null;
+
+/** A function from a row's index to its cells, in the order of PROFILE_COLUMNS. */
+function quantityCells(profile: Profile): (row: number) => readonly Cell[] {
+  const columns = PROFILE_COLUMNS.map((column) => column.values(profile));
+  return (row) => columns.map((values) => values[row]!);
+}
+
+/**
+ * The integrated profiles of casts in one table, one row a depth, in order of depth: surface, samples, levels, bed.
+ * Casts without a solution have no rows.
+ */
 export function profileCsv(solved: readonly SolvedCast[]): string {
-  return csvText(PROFILE_HEADER, profileRows(solved));
+  return csvText(["cast", ...QUANTITIES, "flag", "origin"], profileRows(solved));
 }
 
 function* profileRows(solved: readonly SolvedCast[]): Generator<readonly Cell[]> {
   for (const { cast, solution } of solved) {
     if (!solution) continue;
-    const columns = PROFILE_COLUMNS.map((column) => column.values(solution.profile));
-    for (let i = 0; i < solution.profile.n; i++)
-      yield [cast.name, ...columns.map((values) => values[i]!), solution.flag[i]!, solution.profile.origin[i]!];
+    const { profile, levels, flag } = solution;
+    const profileCells = quantityCells(profile);
+    const levelCells = quantityCells(levels);
+    const rows = [
+      ...Array.from(profile.depthM, (depthM, i) => ({
+        depthM,
+        cells: () => [...profileCells(i), flag[i]!, profile.origin[i]!],
+      })),
+      ...Array.from(levels.depthM, (depthM, i) => ({
+        depthM,
+        cells: () => [...levelCells(i), NO_FLAG, levels.origin[i]!],
+      })),
+    ];
+    // The sort is stable: a level at a sample's own depth follows the sample.
+    rows.sort((a, b) => a.depthM - b.depthM);
+    for (const row of rows) yield [cast.name, ...row.cells()];
   }
 }
 
 /** Every level in every cast, one row each. */
 export function levelsCsv(survey: Pick<Survey, "levels">, solved: readonly SolvedCast[]): string {
-  return csvText(LEVELS_HEADER, levelRows(survey, solved));
+  return csvText(["cast", "level", ...QUANTITIES, "origin"], levelRows(survey, solved));
 }
 
 function* levelRows({ levels }: Pick<Survey, "levels">, solved: readonly SolvedCast[]): Generator<readonly Cell[]> {
   for (const { cast, solution } of solved) {
     if (!solution) continue;
-    const columns = PROFILE_COLUMNS.map((column) => column.values(solution.levels));
-    for (const [i, level] of levels.entries())
-      yield [cast.name, level.name, ...columns.map((values) => values[i]!), solution.levels.origin[i]!];
+    const cells = quantityCells(solution.levels);
+    for (const [i, level] of levels.entries()) yield [cast.name, level.name, ...cells(i), solution.levels.origin[i]!];
   }
 }

@@ -1,5 +1,4 @@
-import type { Profile } from "../column/index.ts";
-import type { Solution, SolvedCast } from "../survey/index.ts";
+import type { Profile, Solution, SolvedCast } from "../survey/index.ts";
 import { type Cell, csvText } from "./csv.ts";
 
 const HEADER = [

@@ -1,5 +1,4 @@
-import type { Profile } from "../column/index.ts";
-import type { SolvedCast, Survey } from "../survey/index.ts";
+import type { Profile, SolvedCast, Survey } from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
 import { PROFILE_COLUMNS } from "./columns.ts";
 import { VERSION } from "./version.ts";

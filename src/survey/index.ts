@@ -1,3 +1,17 @@
+export {
+  type Basis,
+  type Column,
+  type DepthMade,
+  defaultBasis,
+  describeAtDepths,
+  type Origin,
+  type Profile,
+  type ReferenceDensity,
+} from "../column/index.ts";
+export type { Level, LevelId } from "../design/index.ts";
+export type { WaterChoice } from "../water/index.ts";
+export { addCasts } from "./add-casts.ts";
 export { type History, redo, remember, startHistory, undo } from "./history.ts";
 export { type Solution, type SolvedCast, solve, solveCast } from "./solve.ts";
 export { emptySurvey, type Survey } from "./survey.ts";
+export { type WaterPoints, type WaterProperties, waterAtPoints } from "./water-points.ts";
