@@ -1,10 +1,8 @@
 import type { Profile } from "../survey/index.ts";
+import { type ColumnDescription, numberColumn } from "./table.ts";
 
-/** One column of a profile table: the name says quantity and unit, the title and description are for people. */
-export interface TableColumn {
-  readonly name: string;
-  readonly description: string;
-  readonly unit: string;
+/** A numeric column of a profile and where its values stand. */
+export interface ProfileColumn extends ColumnDescription {
   readonly values: (profile: Profile) => Float64Array;
 }
 
@@ -13,12 +11,12 @@ const number = (
   unit: string,
   description: string,
   values: (profile: Profile) => Float64Array,
-): TableColumn => ({ name, unit, description, values });
+): ProfileColumn => ({ ...numberColumn(name, unit, description), values });
 
 const percent = (fractions: Float64Array): Float64Array => fractions.map((fraction) => fraction * 100);
 
 /** The numeric columns of every profile table, in order; the names are part of the product and do not change. */
-export const PROFILE_COLUMNS: readonly TableColumn[] = [
+export const PROFILE_COLUMNS: readonly ProfileColumn[] = [
   number("depth_m", "m", "Depth below the water surface", (p) => p.depthM),
   number("elevation_m", "m", "Elevation above the datum of the basis", (p) => p.elevationM),
   number("sea_pressure_dbar", "dbar", "Pressure above that at the water surface", (p) => p.seaPressureDbar),

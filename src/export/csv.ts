@@ -15,8 +15,8 @@ function cellText(cell: Cell): string {
  * Comma-separated text (RFC 4180 quoting, period as decimal mark, line feed ends). Missing values are empty; text that
  * a spreadsheet would take for a formula gets an apostrophe in front.
  */
-export const csvText = (header: readonly string[], rows: Iterable<readonly Cell[]>): string => {
-  const lines = [header.map(cellText).join(",")];
+export const csvText = (columns: readonly { readonly name: string }[], rows: Iterable<readonly Cell[]>): string => {
+  const lines = [columns.map(({ name }) => cellText(name)).join(",")];
   for (const row of rows) lines.push(row.map(cellText).join(","));
   return `${lines.join("\n")}\n`;
 };

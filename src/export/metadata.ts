@@ -1,6 +1,6 @@
 import type { Basis } from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
-import { PROFILE_COLUMNS } from "./columns.ts";
+import type { ColumnDescription } from "./table.ts";
 import { VERSION } from "./version.ts";
 
 /** A file that results were made from. */
@@ -10,44 +10,13 @@ export interface SourceFile {
   readonly sha256: string;
 }
 
-interface TextColumn {
-  readonly name: string;
-  readonly description: string;
-}
-
-const CAST: TextColumn = { name: "cast", description: "Name of the cast" };
-const LEVEL: TextColumn = { name: "level", description: "Name of the level" };
-const ORIGIN: TextColumn = {
-  name: "origin",
-  description: "sample, level, surface-gap or bed-gap: how the row came to be; rows in a gap stand on no measurement",
-};
-
-const textSchema = ({ name, description }: TextColumn) => ({
+const schema = ({ name, description, datatype, unit }: ColumnDescription): Record<string, string> => ({
   name,
   titles: name,
-  datatype: "string",
+  datatype,
   "dc:description": description,
+  ...(unit !== undefined && { "schema:unitText": unit }),
 });
-
-const numberSchemas = PROFILE_COLUMNS.map(({ name, unit, description }) => ({
-  name,
-  titles: name,
-  datatype: "double",
-  "dc:description": description,
-  "schema:unitText": unit,
-}));
-
-const flagSchema = {
-  name: "flag",
-  titles: "flag",
-  datatype: "integer",
-  "dc:description": "Quality flag (QARTOD): 1 pass, 2 not evaluated, 3 suspect, 4 fail, 9 no sample",
-};
-
-const TABLES = {
-  profile: [textSchema(CAST), ...numberSchemas, flagSchema, textSchema(ORIGIN)],
-  levels: [textSchema(CAST), textSchema(LEVEL), ...numberSchemas, textSchema(ORIGIN)],
-};
 
 /**
  * The metadata that goes beside a table (W3C Tabular Data, CSVW): what each column is and in which unit, and, under
@@ -56,13 +25,13 @@ const TABLES = {
  */
 export const tableMetadata = (
   url: string,
-  table: keyof typeof TABLES,
+  columns: readonly ColumnDescription[],
   made: { readonly basis: Basis; readonly sources: readonly SourceFile[] },
 ): Record<string, unknown> => ({
   "@context": "http://www.w3.org/ns/csvw",
   url,
   dialect: { delimiter: ",", header: true, encoding: "utf-8" },
-  tableSchema: { columns: TABLES[table] },
+  tableSchema: { columns: columns.map(schema) },
   notes: [
     {
       program: `Layerhead ${VERSION}`,

@@ -1,8 +1,18 @@
 import type { Profile, SolvedCast, Survey } from "../survey/index.ts";
 import { PROFILE_COLUMNS } from "./columns.ts";
 import { type Cell, csvText } from "./csv.ts";
+import { type ColumnDescription, countColumn, textColumn } from "./table.ts";
 
-const QUANTITIES = PROFILE_COLUMNS.map((column) => column.name);
+const CAST = textColumn("cast", "Name of the cast");
+const LEVEL = textColumn("level", "Name of the level");
+const FLAG = countColumn("flag", "Quality flag (QARTOD): 1 pass, 2 not evaluated, 3 suspect, 4 fail, 9 no sample");
+const ORIGIN = textColumn(
+  "origin",
+  "sample, level, surface-gap or bed-gap: how the row came to be; rows in a gap stand on no measurement",
+);
+
+export const PROFILE_TABLE: readonly ColumnDescription[] = [CAST, ...PROFILE_COLUMNS, FLAG, ORIGIN];
+export const LEVELS_TABLE: readonly ColumnDescription[] = [CAST, LEVEL, ...PROFILE_COLUMNS, ORIGIN];
 
 /** No sample stands behind a level, so it has no quality flag. */
 const NO_FLAG = null;
@@ -18,7 +28,7 @@ function quantityCells(profile: Profile): (row: number) => readonly Cell[] {
  * Casts without a solution have no rows.
  */
 export function profileCsv(solved: readonly SolvedCast[]): string {
-  return csvText(["cast", ...QUANTITIES, "flag", "origin"], profileRows(solved));
+  return csvText(PROFILE_TABLE, profileRows(solved));
 }
 
 function* profileRows(solved: readonly SolvedCast[]): Generator<readonly Cell[]> {
@@ -45,7 +55,7 @@ function* profileRows(solved: readonly SolvedCast[]): Generator<readonly Cell[]>
 
 /** Every level in every cast, one row each. */
 export function levelsCsv(survey: Pick<Survey, "levels">, solved: readonly SolvedCast[]): string {
-  return csvText(["cast", "level", ...QUANTITIES, "origin"], levelRows(survey, solved));
+  return csvText(LEVELS_TABLE, levelRows(survey, solved));
 }
 
 function* levelRows({ levels }: Pick<Survey, "levels">, solved: readonly SolvedCast[]): Generator<readonly Cell[]> {

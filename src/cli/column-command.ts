@@ -1,0 +1,79 @@
+import { join } from "node:path";
+import {
+  type ColumnDescription,
+  PROFILE_TABLE,
+  profileCsv,
+  type SourceFile,
+  SUMMARY_TABLE,
+  summaryCsv,
+  surveyJson,
+  tableMetadata,
+} from "../export/index.ts";
+import { addCasts, emptySurvey, type SolvedCast, type Survey, solve } from "../survey/index.ts";
+import { columnOptions } from "./column-options.ts";
+import { columnText } from "./column-text.ts";
+import { castFileNames } from "./file-names.ts";
+import { EXIT, type ExitCode, type Host, issueLine } from "./host.ts";
+import { readCastFiles } from "./read-files.ts";
+import { COLUMN_USAGE } from "./usage.ts";
+
+/** `layerhead column`: reads every file, integrates every cast, writes what was asked for. */
+export async function columnCommand(host: Host, args: readonly string[]): Promise<ExitCode> {
+  const options = columnOptions(args);
+  if (options.help) {
+    host.out(COLUMN_USAGE);
+    return EXIT.done;
+  }
+  const files = await readCastFiles(host, options.files);
+  let survey: Survey = { ...emptySurvey, basis: options.basis, levels: options.levels };
+  for (const { path, reading } of files) {
+    for (const issue of reading.issues) host.err(issueLine(path, issue));
+    if (reading.ok) survey = addCasts(survey, reading.value.casts);
+  }
+  const solved = solve(survey);
+  for (const { cast, issues } of solved)
+    for (const issue of issues) host.err(issueLine(`${cast.fileName}: ${cast.name}`, issue));
+
+  if (options.json) host.out(`${JSON.stringify(surveyJson(survey, solved))}\n`);
+  if (options.out !== null) await writeTables(host, options.out, survey, solved, sourcesOf(files));
+  if (!options.json && options.out === null) host.out(solved.map((cast) => columnText(survey, cast)).join("\n"));
+
+  const allDone = files.every((file) => file.reading.ok) && solved.every((cast) => cast.solution !== null);
+  return allDone ? EXIT.done : EXIT.badInput;
+}
+
+const sourcesOf = (files: Awaited<ReturnType<typeof readCastFiles>>): readonly SourceFile[] =>
+  files.filter((file) => file.reading.ok).map((file) => file.source);
+
+const SUMMARY = "summary";
+
+async function writeTables(
+  host: Host,
+  folder: string,
+  survey: Survey,
+  solved: readonly SolvedCast[],
+  sources: readonly SourceFile[],
+): Promise<void> {
+  const withResult = solved.filter((cast) => cast.solution !== null);
+  const stems = castFileNames(
+    withResult.map(({ cast }) => cast.name),
+    [SUMMARY],
+  );
+  const write = async (
+    stem: string,
+    columns: readonly ColumnDescription[],
+    text: string,
+    from: readonly SourceFile[],
+  ) => {
+    const fileName = `${stem}.csv`;
+    await host.writeFile(join(folder, fileName), text);
+    const metadata = tableMetadata(fileName, columns, { basis: survey.basis, sources: from });
+    await host.writeFile(join(folder, `${fileName}-metadata.json`), `${JSON.stringify(metadata, null, 2)}\n`);
+  };
+  for (const [i, one] of withResult.entries()) {
+    const own = sources.filter((source) => source.fileName === one.cast.fileName);
+    await write(stems[i]!, PROFILE_TABLE, profileCsv([one]), own);
+  }
+  await write(SUMMARY, SUMMARY_TABLE, summaryCsv(solved), sources);
+  host.err(`${withResult.length} casts written to ${folder}\n`);
+}

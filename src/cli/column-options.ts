@@ -1,0 +1,140 @@
+import { parseArgs } from "node:util";
+import {
+  type Basis,
+  type DepthMade,
+  defaultBasis,
+  type Level,
+  type LevelId,
+  type ReferenceDensity,
+  type WaterChoice,
+} from "../survey/index.ts";
+import { UsageError } from "./host.ts";
+
+/** What `layerhead column` was asked to do. */
+export interface ColumnOptions {
+  readonly help: boolean;
+  readonly files: readonly string[];
+  readonly basis: Basis;
+  readonly levels: readonly Level[];
+  readonly json: boolean;
+  readonly out: string | null;
+}
+
+interface Range {
+  readonly lowest: number;
+  readonly highest: number;
+  readonly unit: string;
+}
+
+const DENSITY: Range = { lowest: 500, highest: 3000, unit: "kg/m3" };
+
+function numberIn(option: string, text: string, { lowest, highest, unit }: Range): number {
+  const value = text.trim() === "" ? Number.NaN : Number(text);
+  if (!(value >= lowest && value <= highest))
+    throw new UsageError(`${option} ${text}: expected a number from ${lowest} to ${highest}${unit && ` ${unit}`}`);
+  return value;
+}
+
+/** A word of a list, or `constant:RHO`. */
+function wordOrDensity<Word extends string>(option: string, text: string, words: readonly Word[]): Word | number {
+  const word = words.find((candidate) => candidate === text);
+  if (word !== undefined) return word;
+  const density = /^constant:(.*)$/.exec(text)?.[1];
+  if (density === undefined) throw new UsageError(`${option} ${text}: expected ${words.join(", ")} or constant:RHO`);
+  return numberIn(`${option} constant`, density, DENSITY);
+}
+
+function water(text: string): WaterChoice {
+  const choice = wordOrDensity("--water", text, ["teos10", "exact", "limnological", "eos80"] as const);
+  return typeof choice === "number" ? { id: "constant", rhoKgM3: choice } : { id: choice };
+}
+
+function depthMade(text: string): DepthMade {
+  const choice = wordOrDensity("--depth-made", text, ["measured", "standard-ocean"] as const);
+  return typeof choice === "number" ? { kind: "constant", rhoKgM3: choice } : { kind: choice };
+}
+
+function referenceDensity(text: string): ReferenceDensity {
+  if (text === "surface" || text === "mean") return { kind: text };
+  const value = Number(text);
+  if (!(value >= DENSITY.lowest && value <= DENSITY.highest))
+    throw new UsageError(
+      `--reference-density ${text}: expected surface, mean or a number from ${DENSITY.lowest} to ${DENSITY.highest} kg/m3`,
+    );
+  return { kind: "number", rhoKgM3: value };
+}
+
+const DEPTH: Range = { lowest: 0, highest: 12_000, unit: "m" };
+
+const levelsOf = (text: string): readonly Level[] =>
+  text.split(",").map((part, index) => {
+    const depthM = numberIn("--levels", part, DEPTH);
+    return { id: `level-${index + 1}` as LevelId, name: `${depthM} m`, depthM };
+  });
+
+const OPTIONS = {
+  help: { type: "boolean", short: "h" },
+  latitude: { type: "string" },
+  water: { type: "string" },
+  salinity: { type: "string" },
+  "air-pressure": { type: "string" },
+  "reference-density": { type: "string" },
+  "depth-made": { type: "string" },
+  bed: { type: "string" },
+  levels: { type: "string" },
+  json: { type: "boolean" },
+  out: { type: "string" },
+} as const;
+
+/** Reads the arguments behind `column`; throws UsageError with one line that says what was wrong. */
+export function columnOptions(args: readonly string[]): ColumnOptions {
+  const { values, positionals } = parseArgs({
+    args: joinNegativeNumbers(args),
+    options: OPTIONS,
+    allowPositionals: true,
+  });
+  const given = <T>(text: string | undefined, read: (text: string) => T, otherwise: T): T =>
+    text === undefined ? otherwise : read(text);
+  const help = values.help === true;
+  if (!help && positionals.length === 0) throw new UsageError("column needs at least one cast file");
+  if (values.out?.trim() === "") throw new UsageError("--out needs the name of a folder");
+  return {
+    help,
+    files: positionals,
+    basis: {
+      ...defaultBasis,
+      water: given(values.water, water, defaultBasis.water),
+      latitudeDeg: given(
+        values.latitude,
+        (text) => numberIn("--latitude", text, { lowest: -90, highest: 90, unit: "degrees" }),
+        null,
+      ),
+      airPressureKPa: given(
+        values["air-pressure"],
+        (text) => numberIn("--air-pressure", text, { lowest: 30, highest: 120, unit: "kPa" }),
+        defaultBasis.airPressureKPa,
+      ),
+      unmeasuredPracticalSalinity: given(
+        values.salinity,
+        (text) => numberIn("--salinity", text, { lowest: 0, highest: 120, unit: "" }),
+        defaultBasis.unmeasuredPracticalSalinity,
+      ),
+      depthMade: given(values["depth-made"], depthMade, defaultBasis.depthMade),
+      referenceDensity: given(values["reference-density"], referenceDensity, defaultBasis.referenceDensity),
+      bedDepthM: given(values.bed, (text) => numberIn("--bed", text, DEPTH), null),
+    },
+    levels: given(values.levels, levelsOf, []),
+    json: values.json === true,
+    out: values.out ?? null,
+  };
+}
+
+/** `--latitude -38` would be taken for two options; `--latitude=-38` is not. */
+const joinNegativeNumbers = (args: readonly string[]): string[] =>
+  args.reduce<string[]>((joined, arg) => {
+    const before = joined.at(-1);
+    if (/^-[\d.]/.test(arg) && before?.startsWith("--") && !before.includes("="))
+      joined[joined.length - 1] = `${before}=${arg}`;
+    else joined.push(arg);
+    return joined;
+  }, []);

@@ -1,0 +1,58 @@
+/** The words of `layerhead --help` and of each command's --help. */
+
+export const USAGE = `layerhead: pressure in layered water
+
+usage: layerhead COMMAND [OPTIONS] FILE...
+
+commands
+  column FILE...   integrate casts: density, pressure and departure at every sample
+  water FILE|-     add water properties to a table of points
+  inspect FILE...  tell how each file is read: columns, units, casts, rows left out
+
+layerhead COMMAND --help tells a command's options; layerhead --version the version.
+Exit status: 0 done, 1 fault in the program, 2 bad input, 64 bad usage.
+`;
+
+export const COLUMN_USAGE = `usage: layerhead column FILE... [OPTIONS]
+
+Reads cast files (delimited text with a header), integrates each cast from the water
+surface down and prints a table per cast.
+
+what is assumed beyond the samples
+  --latitude DEG           latitude for gravity, -90 to 90 (else from the file, else
+                           standard gravity 9.80665 m/s2)
+  --water MODEL            teos10 (default), exact, limnological, eos80 or
+                           constant:RHO with RHO in kg/m3
+  --salinity S             practical salinity where none was measured (default 0)
+  --air-pressure KPA       absolute, at the water surface (default 101.325)
+  --reference-density RHO  density of the constant-density estimate: kg/m3, surface
+                           (of this column) or mean (of this column); default 1025
+  --depth-made HOW         how the depth column came to be: measured (default),
+                           standard-ocean, or constant:RHO with RHO in kg/m3
+  --bed M                  depth of the bed below the surface
+
+what comes out
+  --levels M,M,...         depths to report besides the samples
+  --json                   one JSON object on standard output, full precision
+  --out DIR                one CSV per cast and summary.csv, each with its metadata
+
+Water above the first and below the last sample has that sample's salinity and
+temperature. Files that cannot be read are named on standard error; the others are
+still done, and the exit status is then 2.
+`;
+
+export const WATER_USAGE = `usage: layerhead water FILE.csv|-
+
+Reads a table of points and writes it to standard output as CSV with TEOS-10 properties
+added, at full precision. Columns it needs, by these names:
+  one of practical_salinity, absolute_salinity_g_kg, conductivity_mS_cm
+  temperature_degC         in situ, ITS-90
+  sea_pressure_dbar        zero at the water surface
+Other columns are passed through. - reads standard input.
+`;
+
+export const INSPECT_USAGE = `usage: layerhead inspect FILE...
+
+Tells how each file is read: which column became what, in which unit and why, the casts
+found in it, and the rows that were left out and why. Nothing is computed.
+`;
