@@ -5,8 +5,11 @@
 import { SALINITY_SCALE } from "./constants.ts";
 import { WATER } from "./gibbs-water.ts";
 
-/** Coefficient (J/kg) of y^j z^k at index 10 j + k, with y = t / 40 degC and z = p / 10^4 dbar. */
-export type Isohaline = Float64Array;
+/**
+ * Coefficient (J/kg) of y^j z^k at index 10 j + k, with y = t / 40 degC and z = p / 10^4 dbar. A plain array, because
+ * the scalar functions make one per call and a typed array takes several times longer to make than to fill.
+ */
+export type Isohaline = number[];
 
 /** Fresh water; what salt does not touch keeps these values. */
 export const newIsohaline = (): Isohaline => WATER.slice();

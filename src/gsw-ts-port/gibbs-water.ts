@@ -22,7 +22,4 @@ export const HIGHEST_TEMPERATURE_POWER = ROWS.length - 1;
 export const HIGHEST_PRESSURE_POWER: readonly number[] = ROWS.map((row) => row.length - 1);
 
 /** The same coefficients at index 10 j + k, so that an index reads as its two powers. */
-export const WATER: Float64Array = Float64Array.from(
-  { length: 10 * ROWS.length },
-  (_, i) => ROWS[Math.floor(i / 10)]![i % 10] ?? 0,
-);
+export const WATER: readonly number[] = ROWS.flatMap((row) => [...row, ...Array<number>(10 - row.length).fill(0)]);

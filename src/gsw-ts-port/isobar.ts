@@ -16,10 +16,10 @@ export const PRESSURE_SCALE_PA = PRESSURE_SCALE_DBAR * PA_PER_DBAR;
 /** y plus this is the absolute temperature in units of the temperature scale. */
 const ABSOLUTE_OFFSET = CELSIUS_ZERO_K / TEMPERATURE_SCALE_C;
 
-/** Coefficients of y^0 to y^7, J/kg. */
-export type Isobar = Float64Array;
+/** Coefficients of y^0 to y^7, J/kg; a plain array for the same reason as an isohaline. */
+export type Isobar = number[];
 
-export const newIsobar = (): Isobar => new Float64Array(HIGHEST_TEMPERATURE_POWER + 1);
+export const newIsobar = (): Isobar => [0, 0, 0, 0, 0, 0, 0, 0];
 
 /** How often the Gibbs function is differentiated with respect to z before it is collapsed. */
 export type PressureOrder = 0 | 1 | 2;
