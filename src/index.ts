@@ -2,10 +2,12 @@
 export { type Issue, isToolError, type Outcome, ToolError } from "./base/index.ts";
 export { type Cast, type FileReading, readCastFile, type Samples } from "./cast/index.ts";
 export {
-  type Cell,
   csvText,
+  LEVELS_TABLE,
   levelsCsv,
+  PROFILE_TABLE,
   profileCsv,
+  SUMMARY_TABLE,
   summaryCsv,
   surveyJson,
   tableMetadata,

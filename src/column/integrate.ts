@@ -44,7 +44,7 @@ function march(cast: Cast, basis: Basis, frame: ColumnFrame, record: Record): Kn
     const abovePressureDbar = k === 0 ? 0 : seaPressureDbar[k - 1]!;
     const layOver = (): void => {
       if (k === 0) stretch.hold(salinity[0]!, tempC[0]!);
-      else stretch.between(along[k - 1]!, salinity[k - 1]!, tempC[k - 1]!, along[k]!, salinity[k]!, tempC[k]!);
+      else stretch.between({ along, salinity, tempC }, k - 1);
     };
     if (!byDepth) {
       takeSample(k, along[k]!);

@@ -44,17 +44,15 @@ export function nodesAtDepths(column: Column, depthsM: ArrayLike<number>, origin
     origin: new Array<Origin>(n).fill(origin),
     knotIndex: new Int32Array(n).fill(-1),
   };
+  const { salinity, tempC } = column;
   const along = column.coordinate === "depth" ? column.depthM : column.seaPressureDbar;
   const bedKnown = column.basis.bedDepthM !== null && column.bottomDepthM === column.basis.bedDepthM;
-  const { salinity, tempC } = column;
   for (let i = 0; i < n; i++) {
     const depthM = nodes.depthM[i]!;
     if (!(depthM >= 0) || (bedKnown && depthM > column.bottomDepthM)) continue;
     const above = knotAbove(column, depthM);
     const k = Math.max(above, 0);
-    const next = k + 1;
-    if (above >= 0 && next < column.n)
-      stretch.between(along[k]!, salinity[k]!, tempC[k]!, along[next]!, salinity[next]!, tempC[next]!);
+    if (above >= 0 && k + 1 < column.n) stretch.between({ along, salinity, tempC }, k);
     else stretch.hold(salinity[k]!, tempC[k]!);
     const fromDepthM = above < 0 ? 0 : column.depthM[k]!;
     const fromPressureDbar = above < 0 ? 0 : column.seaPressureDbar[k]!;

@@ -67,8 +67,8 @@ function describe(column: Column, nodes: Nodes, buoyancyAtKnot: (knotIndex: numb
     return values;
   };
   /** What was measured stays as measured; elsewhere it follows from the model's own salinity and temperature. */
-  const measuredOr = (measured: Float64Array, derivedAt: (i: number) => number): Float64Array =>
-    each((i) => (knotIndex[i]! >= 0 ? measured[knotIndex[i]!]! : derivedAt(i)));
+  const measuredOr = (values: Float64Array, derivedAt: (i: number) => number): Float64Array =>
+    each((i) => (knotIndex[i]! >= 0 ? values[knotIndex[i]!]! : derivedAt(i)));
 
   const gaugePressureKPa = each((i) => seaPressureDbar[i]! * KPA_PER_DBAR);
   // A depth without water (above the surface, below the bed) has no estimate either.

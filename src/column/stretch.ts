@@ -13,6 +13,13 @@ export const frameOf = (column: Column): ColumnFrame => ({
   model: waterModel(column.basis.water),
 });
 
+/** The knots that stretches run between; `along` is depth in m or sea pressure in dbar, as the column's coordinate says. */
+export interface StretchEnds {
+  readonly along: Float64Array;
+  readonly salinity: Float64Array;
+  readonly tempC: Float64Array;
+}
+
 /**
  * Water whose own salinity and temperature are linear in one coordinate (depth in m or sea pressure in dbar), and the
  * hydrostatic equation dp/dz = rho(S, T, p) g(z) through it, either way. One is made per column and laid anew over each
@@ -36,17 +43,21 @@ export class Stretch {
 
   /** Water of one salinity and temperature, as in a gap. */
   hold(salinity: number, tempC: number): void {
-    this.between(0, salinity, tempC, 0, salinity, tempC);
+    this.#start = 0;
+    this.#salinity = salinity;
+    this.#tempC = tempC;
+    this.#salinityRate = 0;
+    this.#tempRate = 0;
   }
 
-  /** Linear from one sample to the next; the coordinate is the column's own. */
-  between(from: number, salinity0: number, tempC0: number, to: number, salinity1: number, tempC1: number): void {
-    const length = to - from;
-    this.#start = from;
-    this.#salinity = salinity0;
-    this.#tempC = tempC0;
-    this.#salinityRate = length > 0 ? (salinity1 - salinity0) / length : 0;
-    this.#tempRate = length > 0 ? (tempC1 - tempC0) / length : 0;
+  /** Linear from knot k to the next; two knots at one place leave no stretch between them. */
+  between({ along, salinity, tempC }: StretchEnds, k: number): void {
+    this.hold(salinity[k]!, tempC[k]!);
+    const length = along[k + 1]! - along[k]!;
+    if (!(length > 0)) return;
+    this.#start = along[k]!;
+    this.#salinityRate = (salinity[k + 1]! - salinity[k]!) / length;
+    this.#tempRate = (tempC[k + 1]! - tempC[k]!) / length;
   }
 
   salinityAt(depthM: number, seaPressureDbar: number): number {

@@ -53,20 +53,21 @@ export function waterAtPoints(points: WaterPoints): WaterProperties {
             seaPressureDbar[i]!,
           ),
     );
-  const SA = points.absSalinityGKg ?? practical.map(referenceSalinity);
-  const CT = each((i) => conservativeTemperature(SA[i]!, inSituTempC[i]!, seaPressureDbar[i]!));
-  const bySaltAndHeat = (property: (SA: number, CT: number, p: number) => number): Float64Array =>
-    each((i) => property(SA[i]!, CT[i]!, seaPressureDbar[i]!));
+  const absSalinityGKg = points.absSalinityGKg ?? practical.map(referenceSalinity);
+  const consTempC = each((i) => conservativeTemperature(absSalinityGKg[i]!, inSituTempC[i]!, seaPressureDbar[i]!));
+  const bySaltAndHeat = (
+    property: (absSalinityGKg: number, consTempC: number, seaPressureDbar: number) => number,
+  ): Float64Array => each((i) => property(absSalinityGKg[i]!, consTempC[i]!, seaPressureDbar[i]!));
   return {
     practical_salinity: practical,
-    absolute_salinity_g_kg: SA,
-    conservative_temperature_degC: CT,
+    absolute_salinity_g_kg: absSalinityGKg,
+    conservative_temperature_degC: consTempC,
     density_kg_m3: bySaltAndHeat(density),
-    density_exact_kg_m3: each((i) => exactDensity(SA[i]!, inSituTempC[i]!, seaPressureDbar[i]!)),
-    sigma0_kg_m3: each((i) => density(SA[i]!, CT[i]!, 0) - 1000),
+    density_exact_kg_m3: each((i) => exactDensity(absSalinityGKg[i]!, inSituTempC[i]!, seaPressureDbar[i]!)),
+    sigma0_kg_m3: each((i) => density(absSalinityGKg[i]!, consTempC[i]!, 0) - 1000),
     thermal_expansion_1_K: bySaltAndHeat(thermalExpansion),
     haline_contraction_kg_g: bySaltAndHeat(halineContraction),
     sound_speed_m_s: bySaltAndHeat(soundSpeed),
-    freezing_temperature_degC: each((i) => freezingTemperature(SA[i]!, seaPressureDbar[i]!)),
+    freezing_temperature_degC: each((i) => freezingTemperature(absSalinityGKg[i]!, seaPressureDbar[i]!)),
   };
 }
