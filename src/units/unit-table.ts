@@ -73,6 +73,10 @@ export const UNITS = [
     ["F", "°F", "deg_F", "degrees_F", "degree_F", "fahrenheit", "degree_fahrenheit", "degrees_fahrenheit"],
     { label: "°F", offset: 32 },
   ),
+  // t68 = 1.00024 t90: Saunders (1990), WOCE Newsletter 10.
+  unit("temperature", "degC68", 1 / 1.00024, ["IPTS-68", "ITS-68", "IPTS-68 degC", "degC IPTS-68"], {
+    label: "°C (IPTS-68)",
+  }),
   unit("temperature", "K", 1, ["kelvin", "degK", "deg_K", "degree_K", "degrees_K"], { offset: 273.15 }),
 
   unit("conductivity", "S/m", 1, ["S m-1", "siemens/m", "siemens per meter", "siemens per metre", "mho/m"]),
@@ -111,7 +115,7 @@ export const UNITS = [
     ["psu", "pss", "pss-78", "pss78", "ppt", "ppth", "‰", "1e-3", "0.001", "practical salinity units", "unitless"],
     { label: "" },
   ),
-  unit("salinity", "g/kg", 1, ["g kg-1", "g/l", "gram per kilogram", "grams per kilogram"]),
+  unit("salinity", "g/kg", 1, ["g kg-1", "gram per kilogram", "grams per kilogram"]),
 
   unit("force", "N", 1, ["newton", "newtons"]),
   unit("force", "kN", 1000, ["kilonewton", "kilonewtons"]),
@@ -132,9 +136,29 @@ export const UNITS = [
   unit("fraction", "fraction", 1, []),
   unit("fraction", "%", 0.01, ["percent", "pct"]),
 
-  unit("angle", "deg", 1, ["degree", "degrees", "°", "degrees_north", "degrees_east", "degree_north", "degree_east"], {
-    label: "°",
-  }),
+  unit(
+    "angle",
+    "deg",
+    1,
+    [
+      "degree",
+      "degrees",
+      "°",
+      "degrees_north",
+      "degrees_east",
+      "degree_north",
+      "degree_east",
+      "degrees N",
+      "degrees E",
+      "°N",
+      "°E",
+      "decimal degrees",
+      "dd",
+    ],
+    {
+      label: "°",
+    },
+  ),
 
   unit("perTimeSquared", "s-2", 1, ["1/s2", "s^-2", "rad2/s2"], { label: "s⁻²" }),
 ] as const satisfies readonly UnitShape[];

@@ -31,9 +31,9 @@ const isNaNAt = (values: Float64Array | null, i: number): boolean => values === 
 
 function textIssues(rows: MeasuredRows, indices: ReadonlySet<number>): readonly Issue[] {
   const found = rows.badCells.filter((cell) => indices.has(cell.rowIndex));
-  const issues = found.slice(0, LISTED_LINES).map(({ rowIndex, message }): Issue => {
+  const issues = found.slice(0, LISTED_LINES).map(({ rowIndex, code, message }): Issue => {
     const line = rows.lineIndex[rowIndex]!;
-    return { severity: "warning", code: "not-a-number", message: `line ${line}: ${message}`, line };
+    return { severity: "warning", code, message: `line ${line}: ${message}`, line };
   });
   const more = found.length - issues.length;
   if (more > 0)

@@ -1,12 +1,22 @@
 /** What a table must have before casts can be made of it. */
 import type { Issue } from "../../base/index.ts";
-import { COLUMN_NAMES } from "./column-names.ts";
+import type { ColumnRole } from "../reading.ts";
+import { askedUnitCode } from "./choose-unit.ts";
 import type { FoundTable } from "./find-header.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
 
-const headersOf = (table: FoundTable): string => table.header.cells.map((cell) => `"${cell}"`).join(", ");
+const VERTICAL_ROLES: readonly ColumnRole[] = ["depth", "seaPressure"];
+const TEMPERATURE_ROLES: readonly ColumnRole[] = ["temperature"];
+const SALT_ROLES: readonly ColumnRole[] = ["practicalSalinity", "conductivity", "specificConductance"];
 
-const error = (code: string, message: string, line: number): Issue => ({ severity: "error", code, message, line });
+const hasOneOf = (columns: RecognisedColumns, roles: readonly ColumnRole[]): boolean =>
+  roles.some((role) => columns.used[role] !== undefined);
+
+/** The questions about units that stand between us and any of the roles. */
+const askedAbout = (columns: RecognisedColumns, roles: readonly ColumnRole[]): readonly Issue[] =>
+  columns.issues
+    .filter((issue) => roles.some((role) => issue.code === askedUnitCode(role)))
+    .map((issue) => ({ ...issue, severity: "error" }));
 
 /** Places with coordinates and nothing measured there. */
 const isStationList = ({ used }: RecognisedColumns): boolean =>
@@ -14,29 +24,28 @@ const isStationList = ({ used }: RecognisedColumns): boolean =>
 
 /** The errors that keep a table from being read, none when it can be. */
 export function checkColumns(table: FoundTable, columns: RecognisedColumns): readonly Issue[] {
-  const { used, issues } = columns;
-  const line = table.header.lineIndex;
-  if (isStationList(columns)) {
-    return [
-      error(
-        "station-list",
-        `this looks like a list of stations, not casts: coordinates but no temperature among ${headersOf(table)}; add the file with the samples`,
-        line,
-      ),
-    ];
+  const headers = table.header.cells.map((cell) => `"${cell}"`).join(", ");
+  const error = (code: string, message: string): Issue => ({
+    severity: "error",
+    code,
+    message,
+    line: table.header.lineIndex,
+  });
+  /** A role that is needed: nothing when it is there, else the unit asked for, else the error given. */
+  const needed = (roles: readonly ColumnRole[], missing: Issue | null): readonly Issue[] => {
+    if (hasOneOf(columns, roles)) return [];
+    const asked = askedAbout(columns, roles);
+    return asked.length > 0 || missing === null ? asked : [missing];
+  };
+  const noDepth = `no depth or pressure column among ${headers}; expected a header such as "Depth (m)" or "Pressure (dbar)"`;
+  const noTemperature = `no temperature column among ${headers}; expected a header such as "Temperature (degC)"`;
+  if (isStationList(columns) && askedAbout(columns, TEMPERATURE_ROLES).length === 0) {
+    const message = `this looks like a list of stations, not casts: coordinates but no temperature among ${headers}; add the file that holds the samples`;
+    return [error("station-list", message)];
   }
-  const cannotDoWithout = issues.filter(
-    (issue) => issue.severity === "error" && !(/[cC]onduct/.test(issue.code) && used.practicalSalinity !== undefined),
-  );
-  const asked = (role: string) => issues.some((issue) => issue.code === `no-unit-${role}`);
-  const missing: Issue[] = [];
-  if (used.depth === undefined && used.seaPressure === undefined) {
-    const message = `no depth or pressure column among ${headersOf(table)}; expected a header such as "Depth (m)" or "Pressure (dbar)"`;
-    missing.push(error("no-depth-column", message, line));
-  }
-  if (used.temperature === undefined && !asked("temperature")) {
-    const message = `no temperature column among ${headersOf(table)}; expected a header such as "Temperature (degC)" or "${COLUMN_NAMES.temperature[0]}"`;
-    missing.push(error("no-temperature-column", message, line));
-  }
-  return [...missing, ...cannotDoWithout];
+  return [
+    ...needed(VERTICAL_ROLES, error("no-depth-column", noDepth)),
+    ...needed(TEMPERATURE_ROLES, error("no-temperature-column", noTemperature)),
+    ...needed(SALT_ROLES, null),
+  ];
 }

@@ -1,104 +1,101 @@
 /** Finds the delimiter, the header row and a row of units below it: whichever delimiter makes most sense of a header. */
 import { unitByName } from "../../units/index.ts";
-import type { ColumnRole } from "../reading.ts";
 import { ROLE_KIND } from "./column-names.ts";
-import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row } from "./parse-table.ts";
+import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withoutCommentSign } from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
 
 export interface FoundTable {
   readonly delimiter: Delimiter;
   readonly header: Row;
-  /** One text a column; empty texts where there is no units row. */
+  /** One text a column; all empty where there is no units row. */
   readonly unitTexts: readonly string[];
   readonly rows: readonly Row[];
+  /** Rows above the header that are no comments. */
+  readonly preface: readonly Row[];
+  readonly hasOpenQuote: boolean;
 }
 
-const SEARCHED_ROWS = 200;
+/** A header further down than this is not looked for. */
+const SEARCHED_LINES = 1000;
 
 interface Candidate {
   readonly delimiter: Delimiter;
-  readonly rows: readonly Row[];
-  readonly headerIndex: number;
+  readonly headerLineIndex: number;
   readonly roleCount: number;
 }
 
 const looksNumeric = (cell: string): boolean => /^[-+−]?[\d.,]+(e[-+]?\d+)?$/i.test(cell);
 
-function rolesIn(row: Row): ReadonlySet<ColumnRole> {
-  return new Set(row.cells.flatMap((cell) => readHeaderCell(cell)?.role ?? []));
-}
+const roleCountOf = (row: Row): number =>
+  row.cells.length < 2 ? 0 : new Set(row.cells.flatMap((cell) => readHeaderCell(cell)?.role ?? [])).size;
 
-function bestHeader(lines: readonly string[], delimiter: Delimiter): Candidate {
-  const rows = parseTable(lines, delimiter);
-  let headerIndex = -1;
-  let roleCount = 0;
-  for (let i = 0; i < Math.min(rows.length, SEARCHED_ROWS); i++) {
-    const row = rows[i]!;
-    const count = row.cells.length < 2 ? 0 : rolesIn(row).size;
-    if (count > roleCount) {
-      headerIndex = i;
-      roleCount = count;
-    }
+/** The first of the rows with most known names. */
+function headerByNames(lines: readonly string[], delimiter: Delimiter): Candidate {
+  let best: Candidate = { delimiter, headerLineIndex: 0, roleCount: 0 };
+  for (const row of parseTable(lines, delimiter).rows) {
+    const roleCount = roleCountOf(row);
+    if (roleCount > best.roleCount) best = { delimiter, headerLineIndex: row.lineIndex, roleCount };
   }
-  return { delimiter, rows, headerIndex, roleCount };
+  return best;
 }
 
 /** A table without one known name still has a header if texts stand above a body of numbers. */
-function unknownHeader(candidate: Candidate): Candidate {
-  const { rows } = candidate;
-  const headerIndex = rows.findIndex((row, i) => {
+function headerByShape(lines: readonly string[], delimiter: Delimiter): Candidate | null {
+  const { rows } = parseTable(lines, delimiter);
+  const header = rows.find((row, i) => {
     const next = rows[i + 1];
-    return (
-      row.cells.length >= 2 &&
-      next?.cells.length === row.cells.length &&
-      !row.cells.some(looksNumeric) &&
-      next.cells.filter(looksNumeric).length >= 2
-    );
+    const isHeading = row.cells.length >= 2 && !row.cells.some(looksNumeric);
+    return isHeading && next?.cells.length === row.cells.length && next.cells.filter(looksNumeric).length >= 2;
   });
-  return { ...candidate, headerIndex };
+  return header ? { delimiter, headerLineIndex: header.lineIndex, roleCount: 0 } : null;
 }
 
-/** Some files put a comment sign before the header itself: the last line of the leading comment block. */
-function withHeaderUncommented(lines: readonly string[]): readonly string[] | null {
+function bestByNames(lines: readonly string[]): Candidate | null {
+  const candidates = DELIMITERS.map((delimiter) => headerByNames(lines, delimiter));
+  const best = candidates.reduce((a, b) => (b.roleCount > a.roleCount ? b : a));
+  return best.roleCount > 0 ? best : null;
+}
+
+/** Some files put a comment sign before the header itself, as the last line of the comments at the top. */
+function withHeaderUncommented(lines: readonly string[]): readonly string[] {
   const first = lines.findIndex((line) => line.trim() !== "" && !isCommentLine(line));
-  const last = (first < 0 ? lines : lines.slice(0, first)).findLastIndex((line) => isCommentLine(line));
-  if (last < 0) return null;
-  return lines.map((line, i) => (i === last ? line.replace(/^\s*"?(#|%|\/\/|\*|!)+\s*/, "") : line));
+  const last = lines.slice(0, Math.max(first, 0)).findLastIndex(isCommentLine);
+  return lines.map((line, i) => (i === last ? withoutCommentSign(line) : line));
 }
 
-function bestOf(candidates: readonly Candidate[]): Candidate | undefined {
-  return candidates
-    .filter((candidate) => candidate.headerIndex >= 0)
-    .reduce<Candidate | undefined>(
-      (best, c) => (best === undefined || c.roleCount > best.roleCount ? c : best),
-      undefined,
-    );
-}
-
-function unitsBelow(header: Row, next: Row | undefined): readonly string[] {
-  const none = header.cells.map(() => "");
-  if (next === undefined || next.cells.some(looksNumeric)) return none;
-  const unwrapped = next.cells.map((cell) => cell.replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
+/** One text a column when the row below the header is a row of units, else null. */
+function unitsIn(header: Row, below: Row | undefined): readonly string[] | null {
+  if (below === undefined || below.cells.some(looksNumeric)) return null;
+  const texts = header.cells.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
   const isUnits = header.cells.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
     const kind = role === undefined ? undefined : ROLE_KIND[role];
-    return kind !== undefined && unitByName(unwrapped[i] ?? "", kind) !== null;
+    return kind !== undefined && unitByName(texts[i]!, kind) !== null;
   });
-  return isUnits ? header.cells.map((_, i) => unwrapped[i] ?? "") : none;
+  return isUnits ? texts : null;
 }
 
-/** The table in a text, or null when there is none. */
+const isSameRow = (a: Row, b: Row): boolean => a.cells.join("\n") === b.cells.join("\n");
+
+/** The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out. */
 export function findTable(text: string): FoundTable | null {
-  const lines = text.split("\n");
-  const candidatesIn = (some: readonly string[]) => DELIMITERS.map((delimiter) => bestHeader(some, delimiter));
-  const plain = candidatesIn(lines);
-  const uncommented = bestOf(plain) === undefined ? withHeaderUncommented(lines) : null;
+  const plain = text.split("\n");
+  const byNames = bestByNames(plain.slice(0, SEARCHED_LINES));
+  const lines = byNames === null ? withHeaderUncommented(plain) : plain;
+  const searched = lines.slice(0, SEARCHED_LINES);
   const candidate =
-    bestOf(plain) ?? (uncommented && bestOf(candidatesIn(uncommented))) ?? bestOf(plain.map(unknownHeader));
-  if (candidate === undefined) return null;
-  const header = candidate.rows[candidate.headerIndex]!;
-  const below = candidate.rows.slice(candidate.headerIndex + 1);
-  const unitTexts = unitsBelow(header, below[0]);
-  const hasUnitsRow = unitTexts.some((unitText) => unitText !== "");
-  return { delimiter: candidate.delimiter, header, unitTexts, rows: hasUnitsRow ? below.slice(1) : below };
+    byNames ?? bestByNames(searched) ?? DELIMITERS.map((d) => headerByShape(searched, d)).find((c) => c !== null);
+  if (!candidate) return null;
+  const { rows, hasOpenQuote } = parseTable(lines, candidate.delimiter);
+  const headerAt = rows.findIndex((row) => row.lineIndex === candidate.headerLineIndex);
+  const header = rows[headerAt]!;
+  const units = unitsIn(header, rows[headerAt + 1]);
+  return {
+    delimiter: candidate.delimiter,
+    header,
+    unitTexts: units ?? header.cells.map(() => ""),
+    rows: rows.slice(headerAt + (units === null ? 1 : 2)).filter((row) => !isSameRow(row, header)),
+    preface: rows.slice(0, headerAt),
+    hasOpenQuote,
+  };
 }

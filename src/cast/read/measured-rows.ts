@@ -1,17 +1,9 @@
 /** The rows of a table as arrays in the program's own units, before they are split into casts. */
-import { convert, type UnitSymbol } from "../../units/index.ts";
-import type { ColumnRole } from "../reading.ts";
-import { ROLE_WORDS } from "./column-names.ts";
+import type { Issue } from "../../base/index.ts";
+import { type BadCell, CellReader } from "./cell-reader.ts";
 import type { FoundTable } from "./find-header.ts";
-import { isMissing, isSentinel, parseNumber } from "./parse-number.ts";
-import { type DateOrder, dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
+import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
-
-/** A cell that should have held a number or a time and holds some other text. */
-export interface BadCell {
-  readonly rowIndex: number;
-  readonly message: string;
-}
 
 export interface MeasuredRows {
   readonly n: number;
@@ -30,87 +22,43 @@ export interface MeasuredRows {
   readonly castName: readonly string[] | null;
   /** YYYY-MM-DD; empty where unreadable. */
   readonly date: readonly string[] | null;
+  /** What tells days apart: the date, or the text as written where it cannot be read. */
+  readonly dateKey: readonly string[] | null;
   /** HH:MM or HH:MM:SS; empty where unreadable. */
   readonly clock: readonly string[] | null;
-  readonly dateOrder: DateOrder;
   readonly badCells: readonly BadCell[];
+  /** About the file as a whole. */
+  readonly issues: readonly Issue[];
 }
 
-const EXPECTED_UNIT = {
-  depth: "m",
-  seaPressure: "dbar",
-  temperature: "degC",
-  practicalSalinity: "1",
-  conductivity: "mS/cm",
-  specificConductance: "mS/cm",
-  densityAnomaly: "kg/m3",
-  latitude: "deg",
-  longitude: "deg",
-  distance: "km",
-} as const satisfies Partial<Record<ColumnRole, UnitSymbol>>;
+const ASSUMED_ORDER: Issue = {
+  severity: "warning",
+  code: "assumed-date-order",
+  message:
+    "no date in the file tells whether day or month stands first; month is assumed; dates such as 2020-03-04 would tell",
+};
 
-type NumberRole = keyof typeof EXPECTED_UNIT;
+type Times = Pick<MeasuredRows, "date" | "dateKey" | "clock">;
 
-/** Reads table cells by role and keeps what it could not read. */
-class CellReader {
-  readonly badCells: BadCell[] = [];
-  readonly #table: FoundTable;
-  readonly #columns: RecognisedColumns;
-
-  constructor(table: FoundTable, columns: RecognisedColumns) {
-    this.#table = table;
-    this.#columns = columns;
-  }
-
-  texts(role: ColumnRole): readonly string[] | null {
-    const column = this.#columns.used[role];
-    return column ? this.#table.rows.map((row) => row.cells[column.columnIndex] ?? "") : null;
-  }
-
-  numbers(role: NumberRole): Float64Array | null {
-    const column = this.#columns.used[role];
-    const texts = this.texts(role);
-    if (!column || texts === null) return null;
-    const from = column.unit ?? EXPECTED_UNIT[role];
-    const isPlace = role === "latitude" || role === "longitude";
-    return Float64Array.from(texts, (text, rowIndex) => {
-      if (!isPlace && isSentinel(text)) return Number.NaN;
-      const value = parseNumber(text, this.#columns.decimalMark);
-      if (value !== null) return convert(value, from, EXPECTED_UNIT[role]);
-      this.reject(rowIndex, `${ROLE_WORDS[role]} "${text}" is not a number; expected a number or a blank`);
-      return Number.NaN;
-    });
-  }
-
-  /** Blank where the text is missing or `read` cannot make sense of it. */
-  times(texts: readonly string[], words: string, read: (text: string) => string | null): readonly string[] {
-    return texts.map((text, rowIndex) => {
-      if (isMissing(text)) return "";
-      const time = read(text);
-      if (time === null) this.reject(rowIndex, `${words} "${text}" is not understood; expected YYYY-MM-DD or HH:MM`);
-      return time ?? "";
-    });
-  }
-
-  private reject(rowIndex: number, message: string): void {
-    this.badCells.push({ rowIndex, message });
-  }
-}
-
-function readTimes(reader: CellReader): Pick<MeasuredRows, "date" | "clock" | "dateOrder"> {
-  const dateTexts = reader.texts("date");
+function readTimes(reader: CellReader): Times {
+  const dateTexts = reader.textsFilledDown("date");
   const momentTexts = reader.texts("dateTime");
   const clockTexts = reader.texts("clock");
-  const dateOrder = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
-  const moment = (text: string) => parseDateTime(text, dateOrder.order);
-  const ownDate = dateTexts && reader.times(dateTexts, "date", (text) => moment(text)?.date ?? null);
-  const ownClock = clockTexts && reader.times(clockTexts, "time", parseClock);
-  const fromMoment = momentTexts && reader.times(momentTexts, "date and time", (text) => moment(text)?.date ?? null);
-  const clockOfMoment = momentTexts?.map((text) => moment(text)?.clock ?? "") ?? null;
-  return { date: ownDate ?? fromMoment, clock: ownClock ?? clockOfMoment, dateOrder };
+  const { order, assumed } = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
+  if (assumed) reader.issues.push(ASSUMED_ORDER);
+  const dateOf = (text: string) => parseDateTime(text, order)?.date ?? null;
+  const clockOf = (text: string) => parseDateTime(text, order)?.clock ?? "";
+  const ownDate = dateTexts && reader.times("date", dateTexts, dateOf);
+  const momentDate = momentTexts && reader.times("dateTime", momentTexts, dateOf);
+  const date = ownDate ?? momentDate;
+  return {
+    date,
+    dateKey: date?.map((day, i) => day || dateTexts?.[i] || "") ?? null,
+    clock: (clockTexts && reader.times("clock", clockTexts, parseClock)) ?? momentTexts?.map(clockOf) ?? null,
+  };
 }
 
-/** Needs a temperature column among the used ones. */
+/** Needs a temperature column among the used ones; without it temperature is missing throughout. */
 export function readMeasuredRows(table: FoundTable, columns: RecognisedColumns): MeasuredRows {
   const reader = new CellReader(table, columns);
   const { rows } = table;
@@ -127,9 +75,10 @@ export function readMeasuredRows(table: FoundTable, columns: RecognisedColumns):
     latitudeDeg: reader.numbers("latitude"),
     longitudeDeg: reader.numbers("longitude"),
     distanceKm: reader.numbers("distance"),
-    station: reader.texts("station"),
-    castName: reader.texts("castName"),
+    station: reader.textsFilledDown("station"),
+    castName: reader.textsFilledDown("castName"),
     ...readTimes(reader),
     badCells: reader.badCells,
+    issues: reader.issues,
   };
 }

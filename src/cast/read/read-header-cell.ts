@@ -1,13 +1,19 @@
 /** What one header says by itself: which role its name has, and the unit written in it. */
-import { type Unit, unitByName } from "../../units/index.ts";
+import { type QuantityKind, type Unit, unitByName } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
 import { COLUMN_NAMES, ROLE_KIND } from "./column-names.ts";
+
+/** A unit as written; `unit` is null when the text names none of the kind that is needed. */
+export interface WrittenUnit {
+  readonly text: string;
+  readonly unit: Unit | null;
+}
 
 export interface HeaderMeaning {
   readonly role: ColumnRole;
   /** Place of the name among those of its role; the smaller the better. */
   readonly rankIndex: number;
-  readonly unit: Unit | null;
+  readonly written: WrittenUnit | null;
 }
 
 const ROLES = Object.keys(COLUMN_NAMES) as readonly ColumnRole[];
@@ -19,65 +25,70 @@ const lettersAndDigits = (text: string): string =>
     .toLowerCase()
     .replace(/[^a-z0-9]/g, "");
 
-/** A name may end in the zone of its clock, which we keep to ourselves: times stay in the zone of the file. */
+/** The name of a clock may end in its zone, which is not used: times stay in the zone of the file. */
 const TIME_ZONE = /(utc|gmt|local|lst|pt|pst|pdt|mst|mdt|cst|cdt|est|edt|cet|cest|bst)$/;
 
-function roleOfName(name: string): { readonly role: ColumnRole; readonly rankIndex: number } | null {
+function roleOfName(name: string): Pick<HeaderMeaning, "role" | "rankIndex"> | null {
   const key = lettersAndDigits(name);
-  if (key === "") return null;
   if (/^distance(from|to|along)/.test(key)) return { role: "distance", rankIndex: 0 };
   for (const role of ROLES) {
-    const rankIndex = COLUMN_NAMES[role].indexOf(key);
-    if (rankIndex >= 0) return { role, rankIndex };
-  }
-  const withoutZone = key.replace(TIME_ZONE, "");
-  for (const role of ["date", "clock", "dateTime"] as const) {
-    const rankIndex = COLUMN_NAMES[role].indexOf(withoutZone);
+    const isTime = role === "date" || role === "clock" || role === "dateTime";
+    const rankIndex = COLUMN_NAMES[role].indexOf(isTime ? key.replace(TIME_ZONE, "") : key);
     if (rankIndex >= 0) return { role, rankIndex };
   }
   return null;
 }
+
+/** What people put in brackets, or in a units row, that is no unit. */
+const REMARK =
+  /^$|^(raw|water|sea ?water|mean|avg|average|corrected|calculated|measured|in.?situ|practical|below .*|ctd|probe.*|sensor.*|primary|\d+|.*\b25\b.*)$/i;
 
 /** Compensated to 25 degC: "Conductivity (uS/cm @ 25 C)" is specific conductance, whatever it calls itself. */
-const AT_25 = /(@|\bat\b|\bref\b|_|\b)\s*25\s*(°|º|deg)?\s*_?c\b/i;
+const AT_25 = /(@|\bat\b|\bref\b|\b)\s*25\s*[°º]?\s*(deg)?\s*_?c\b/i;
 
-function asMeaning(name: string, unitTexts: readonly string[], header: string): HeaderMeaning | null {
+/** A column of seconds or days that have gone by is no clock. */
+const ELAPSED = /^(s|secs?|seconds?|min|mins|minutes?|h|hrs?|hours?|days?|days since .*|seconds since .*)$/i;
+
+/** The first of the texts that is a unit of the kind, else the first that is no mere remark. */
+export function writtenUnit(texts: readonly string[], kind: QuantityKind): WrittenUnit | null {
+  const stripped = texts.map((text) => text.replace(/(@|\bat\b).*$/i, "").trim());
+  for (const text of stripped) {
+    const unit = unitByName(text, kind);
+    if (unit !== null) return { text, unit };
+  }
+  const unknown = stripped.find((text) => !REMARK.test(text));
+  return unknown === undefined ? null : { text: unknown, unit: null };
+}
+
+function meaningOf(name: string, unitTexts: readonly string[], header: string): HeaderMeaning | null {
   const found = roleOfName(name);
   if (found === null) return null;
+  if (found.role === "clock" && unitTexts.some((text) => ELAPSED.test(text.trim()))) return null;
   const role = found.role === "conductivity" && AT_25.test(header) ? "specificConductance" : found.role;
   const kind = ROLE_KIND[role];
-  const unit = kind === undefined ? null : firstUnit(unitTexts, kind);
-  return { role, rankIndex: found.rankIndex, unit };
+  return { role, rankIndex: found.rankIndex, written: kind === undefined ? null : writtenUnit(unitTexts, kind) };
 }
 
-function firstUnit(texts: readonly string[], kind: NonNullable<Unit["kind"]>): Unit | null {
-  for (const text of texts) {
-    const unit = unitByName(text.replace(/(@|\bat\b).*$/i, ""), kind);
-    if (unit !== null) return unit;
-  }
-  return null;
-}
+const BRACKETS = /[([{<]([^)\]}>]*)[)\]}>]/g;
 
 /** "Depth (m)", "temperature [ITS-90, deg C]": name outside the brackets, unit inside. */
 function bracketed(header: string): HeaderMeaning | null {
-  const inside = [...header.matchAll(/[([{<]([^)\]}>]*)[)\]}>]/g)].map((match) => match[1] ?? "");
+  const inside = [...header.matchAll(BRACKETS)].map((match) => match[1] ?? "");
   if (inside.length === 0) return null;
-  const name = header.replace(/[([{<][^)\]}>]*[)\]}>]/g, " ");
-  return asMeaning(name, [...inside, ...inside.flatMap((text) => text.split(/[,;]/))], header);
+  return meaningOf(header.replace(BRACKETS, " "), [...inside, ...inside.flatMap((text) => text.split(/[,;]/))], header);
 }
 
 /** "Depth.feet", "temp_C", "depth, m", "spec_cond_uS_cm": the last one to three words are the unit. */
 function trailing(header: string): HeaderMeaning | null {
   const words = header.split(/[\s_.,:/-]+/).filter((word) => word !== "");
   for (let count = 1; count <= 3 && count < words.length; count++) {
-    const name = words.slice(0, -count).join(" ");
-    const meaning = asMeaning(name, [words.slice(-count).join(" ")], header);
-    if (meaning !== null && meaning.unit !== null) return meaning;
+    const meaning = meaningOf(words.slice(0, -count).join(" "), [words.slice(-count).join(" ")], header);
+    if (meaning?.written?.unit) return meaning;
   }
   return null;
 }
 
 /** Role and unit of a header, or null when its name is none that we use. */
 export function readHeaderCell(header: string): HeaderMeaning | null {
-  return bracketed(header) ?? asMeaning(header, [], header) ?? trailing(header);
+  return bracketed(header) ?? meaningOf(header, [], header) ?? trailing(header);
 }

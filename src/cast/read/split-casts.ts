@@ -26,7 +26,7 @@ const SHORTEST_GAP_S = 60;
 function groupByKeys(rows: MeasuredRows): readonly (readonly number[])[] {
   const groups = new Map<string, number[]>();
   for (let i = 0; i < rows.n; i++) {
-    const key = JSON.stringify([rows.station?.[i], rows.castName?.[i], rows.date?.[i]]);
+    const key = JSON.stringify([rows.station?.[i], rows.castName?.[i], rows.dateKey?.[i]]);
     const group = groups.get(key);
     if (group) group.push(i);
     else groups.set(key, [i]);

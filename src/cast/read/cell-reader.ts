@@ -1,0 +1,106 @@
+/** Reads the cells of a role, and keeps account of what could not be read or had to be filled in. */
+import type { Issue } from "../../base/index.ts";
+import { convert, type UnitSymbol } from "../../units/index.ts";
+import type { ColumnRole } from "../reading.ts";
+import { ROLE_WORDS } from "./column-names.ts";
+import type { FoundTable } from "./find-header.ts";
+import { isMissing, isSentinel, parseNumber } from "./parse-number.ts";
+import type { RecognisedColumns } from "./recognise-columns.ts";
+
+/** A cell that should have held a number or a time and holds some other text. */
+export interface BadCell {
+  readonly rowIndex: number;
+  readonly code: "not-a-number" | "not-a-time";
+  readonly message: string;
+}
+
+/** The units of the program, in which columns of numbers are kept. */
+const OWN_UNIT = {
+  depth: "m",
+  seaPressure: "dbar",
+  temperature: "degC",
+  practicalSalinity: "1",
+  conductivity: "mS/cm",
+  specificConductance: "mS/cm",
+  densityAnomaly: "kg/m3",
+  latitude: "deg",
+  longitude: "deg",
+  distance: "km",
+} as const satisfies Partial<Record<ColumnRole, UnitSymbol>>;
+
+type NumberRole = keyof typeof OWN_UNIT;
+
+export class CellReader {
+  readonly badCells: BadCell[] = [];
+  readonly issues: Issue[] = [];
+  readonly #table: FoundTable;
+  readonly #columns: RecognisedColumns;
+
+  constructor(table: FoundTable, columns: RecognisedColumns) {
+    this.#table = table;
+    this.#columns = columns;
+  }
+
+  /** null where the file has no such column. */
+  texts(role: ColumnRole): readonly string[] | null {
+    const column = this.#columns.used[role];
+    return column ? this.#table.rows.map((row) => row.cells[column.columnIndex] ?? "") : null;
+  }
+
+  /** As `texts`; a blank takes the text above it, as where a sheet writes the station once and leaves it out below. */
+  textsFilledDown(role: ColumnRole): readonly string[] | null {
+    const texts = this.texts(role);
+    if (texts === null) return null;
+    const filledRows: number[] = [];
+    let above = "";
+    const filled = texts.map((text, rowIndex) => {
+      if (!isMissing(text)) above = text;
+      else if (above !== "") filledRows.push(rowIndex);
+      return above;
+    });
+    if (filledRows.length > 0) {
+      const line = this.#table.rows[filledRows[0]!]!.lineIndex;
+      const message = `${ROLE_WORDS[role]} is blank in ${filledRows.length} rows (first line ${line}); taken from the row above`;
+      this.issues.push({ severity: "warning", code: "filled-down", message, line });
+    }
+    return filled;
+  }
+
+  numbers(role: NumberRole): Float64Array | null {
+    const column = this.#columns.used[role];
+    const texts = this.texts(role);
+    if (!column || texts === null) return null;
+    const from = column.unit ?? OWN_UNIT[role];
+    const isPlace = role === "latitude" || role === "longitude";
+    const sentinels: string[] = [];
+    const values = Float64Array.from(texts, (text, rowIndex) => {
+      if (!isPlace && isSentinel(text)) {
+        sentinels.push(text);
+        return Number.NaN;
+      }
+      const value = parseNumber(text, this.#columns.decimalMark);
+      if (value !== null) return convert(value, from, OWN_UNIT[role]);
+      const message = `${ROLE_WORDS[role]} "${text}" is not a number; expected a number or a blank`;
+      this.badCells.push({ rowIndex, code: "not-a-number", message });
+      return Number.NaN;
+    });
+    if (sentinels.length > 0) {
+      const kinds = [...new Set(sentinels)].join(", ");
+      const message = `${ROLE_WORDS[role]}: ${kinds} is read as not measured, in ${sentinels.length} rows`;
+      this.issues.push({ severity: "note", code: "sentinel", message });
+    }
+    return values;
+  }
+
+  /** Blank where there is none, or where `read` cannot make sense of it. */
+  times(role: ColumnRole, texts: readonly string[], read: (text: string) => string | null): readonly string[] {
+    return texts.map((text, rowIndex) => {
+      if (isMissing(text)) return "";
+      const time = read(text);
+      if (time !== null) return time;
+      const message = `${ROLE_WORDS[role]} "${text}" is not understood; expected a form such as 2020-01-13 or 13:46`;
+      this.badCells.push({ rowIndex, code: "not-a-time", message });
+      return "";
+    });
+  }
+}

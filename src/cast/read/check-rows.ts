@@ -1,0 +1,53 @@
+/** What the rows of a table must be like, taken together, before casts can be made of them. */
+import { min } from "simple-statistics";
+import type { Issue } from "../../base/index.ts";
+import type { FoundTable } from "./find-header.ts";
+import type { MeasuredRows } from "./measured-rows.ts";
+
+const overlong = (table: FoundTable) =>
+  table.rows.filter((row) => row.cells.slice(table.header.cells.length).some((cell) => cell !== ""));
+
+/** Rows wider than their header have their values under the wrong names, or a decimal comma among delimiting commas. */
+function widthIssue(table: FoundTable): Issue | null {
+  const wide = overlong(table);
+  const first = wide[0];
+  if (first === undefined) return null;
+  const line = first.lineIndex;
+  const found = `${wide.length} of ${table.rows.length} rows are wider than the header (line ${line}: ${first.cells.length} cells, expected ${table.header.cells.length})`;
+  const isMost = wide.length > table.rows.length / 2;
+  return isMost
+    ? {
+        severity: "error",
+        code: "rows-too-wide",
+        line,
+        message: `${found}; write decimals with a point, or delimit with semicolons`,
+      }
+    : { severity: "warning", code: "rows-too-wide", line, message: `${found}; check them, surplus cells are not read` };
+}
+
+function upsideDownIssue(rows: MeasuredRows): Issue | null {
+  const depths = [...(rows.depthM ?? [])].filter((depth) => !Number.isNaN(depth));
+  const negativeCount = depths.filter((depth) => depth < 0).length;
+  if (negativeCount <= depths.length / 2) return null;
+  const message = `depth is negative in ${negativeCount} of ${depths.length} rows, down to ${min(depths)} m; depth counts positive down: change the sign`;
+  return { severity: "error", code: "depth-upside-down", message };
+}
+
+/** One standard atmosphere is 10.13 dbar; at altitude and in any weather the air weighs between these. */
+const LIGHTEST_AIR_DBAR = 7.5;
+const HEAVIEST_AIR_DBAR = 10.9;
+
+function absolutePressureIssue(rows: MeasuredRows): Issue | null {
+  const pressures = [...(rows.seaPressureDbar ?? [])].filter((pressure) => !Number.isNaN(pressure));
+  if (pressures.length === 0) return null;
+  const least = min(pressures);
+  if (least < LIGHTEST_AIR_DBAR || least > HEAVIEST_AIR_DBAR) return null;
+  const message = `pressure starts at ${least.toFixed(2)} dbar, about the weight of the air; expected 0 at the surface; if it is absolute, take the air pressure off`;
+  return { severity: "warning", code: "pressure-may-be-absolute", message };
+}
+
+/** Only errors keep the rows from being used. */
+export function checkRows(table: FoundTable, rows: MeasuredRows): readonly Issue[] {
+  const issues = [widthIssue(table), upsideDownIssue(rows), absolutePressureIssue(rows)];
+  return issues.filter((issue) => issue !== null);
+}

@@ -1,0 +1,119 @@
+/** What becomes of one column: used in a role and a unit, or not used, and the reason in a plain sentence. */
+import type { Issue } from "../../base/index.ts";
+import type { UnitSymbol } from "../../units/index.ts";
+import type { ColumnReading } from "../reading.ts";
+import { askedUnitCode, chooseUnit } from "./choose-unit.ts";
+import { ROLE_KIND, ROLE_WORDS } from "./column-names.ts";
+import type { Contender } from "./contender.ts";
+import { type DecimalMark, isSentinel, parseNumber } from "./parse-number.ts";
+import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
+
+export interface Decision {
+  readonly reading: ColumnReading;
+  readonly issues: readonly Issue[];
+}
+
+type Place = Pick<ColumnReading, "columnIndex" | "header">;
+
+const leave = ({ columnIndex, header }: Place, why: string, ...issues: readonly Issue[]): Decision => ({
+  reading: { columnIndex, header, role: null, unit: null, reason: `Not used: ${why}.` },
+  issues,
+});
+
+const use = (contender: Contender, unit: UnitSymbol | null, why: string, ...issues: readonly Issue[]): Decision => {
+  const { columnIndex, header, role } = contender;
+  return { reading: { columnIndex, header, role, unit, reason: `Named as ${ROLE_WORDS[role]}; ${why}.` }, issues };
+};
+
+const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
+  [/^$/, "it has no name"],
+  [/flag|(^|[\W_])q[cf]($|[\W_])|quality/i, "a flag about another column"],
+  [/discrete|bottle/i, "single water samples, not the probe"],
+  [/(air|atmos\w*|baro\w*)[\W_]*(press|$)/i, "pressure of the air"],
+  [/abs\w*[\W_]*press/i, "absolute pressure holds the pressure of the air, sea pressure is needed"],
+  [/abs\w*[\W_]*sal/i, "absolute salinity, practical salinity is needed"],
+  [/potential|conservative|theta/i, "temperature in situ is needed"],
+  [
+    /(bottom|max\w*|total|water|station|site|sonar|secchi)[\W_]*depth|bathymetry/i,
+    "a depth of the place, not of the sample",
+  ],
+  [
+    /^e\.?c\.?\b/i,
+    "EC does not say whether it is compensated to 25 degC; name it conductivity or specific conductance",
+  ],
+];
+
+/** Of a column whose name has no role. */
+export function whyUnused(columnIndex: number, header: string): Decision {
+  const known = UNUSED_NAMES.find(([pattern]) => pattern.test(header));
+  return leave({ columnIndex, header }, known?.[1] ?? "its name is none known here");
+}
+
+/** Of a column that lost its role to another. */
+export function passOver(loser: Contender, winner: Contender): Decision {
+  const words = ROLE_WORDS[loser.role];
+  if (loser.filled.length === 0) return leave(loser, `named as ${words}, but empty`);
+  const message = `"${winner.header}" and "${loser.header}" could both be ${words}; "${winner.header}" is used as the better match`;
+  const issue: Issue = { severity: "note", code: "two-columns-for-one-role", message };
+  return leave(loser, `could be ${words} too, but "${winner.header}" is the better match`, issue);
+}
+
+/** Of the only, or the best, column for a role. */
+export function decide(contender: Contender, decimalMark: DecimalMark): Decision {
+  const { role, written } = contender;
+  const words = ROLE_WORDS[role];
+  if (contender.filled.length === 0) return leave(contender, `named as ${words}, but empty`);
+  if (ROLE_KIND[role] === undefined) return decideText(contender);
+  if (written === null) return decideByRule(contender, decimalMark);
+  if (written.unit === null) return askForUnit(contender, `"${written.text}" is no unit of ${words} known here`);
+  return decideByUnit(contender, written.unit.symbol);
+}
+
+/** Text is taken as it is; a column of times must hold times, which seconds since the start are not. */
+function decideText(contender: Contender): Decision {
+  const { role, filled } = contender;
+  const { order } = dateOrderOf(filled.map(datePart));
+  const isRead = (cell: string) => (role === "clock" ? parseClock(cell) : parseDateTime(cell, order)) !== null;
+  const isTime = role === "clock" || role === "dateTime";
+  if (isTime && filled.filter(isRead).length < filled.length / 2) {
+    return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds texts such as "${filled[0]}"`);
+  }
+  return use(contender, null, "its cells are taken as they are");
+}
+
+function decideByRule(contender: Contender, decimalMark: DecimalMark): Decision {
+  const { role, header } = contender;
+  const values = contender.filled
+    .filter((cell) => !isSentinel(cell))
+    .map((cell) => parseNumber(cell, decimalMark))
+    .filter((value) => value !== null);
+  if (values.length === 0) return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds no numbers`);
+  const choice = chooseUnit({ role, header, values })!;
+  const issues = choice.issue === null ? [] : [choice.issue];
+  return choice.unit === null
+    ? leave(contender, `named as ${ROLE_WORDS[role]}; ${choice.reason}`, ...issues)
+    : use(contender, choice.unit, choice.reason, ...issues);
+}
+
+function askForUnit(contender: Contender, why: string): Decision {
+  const message = `"${contender.header}": ${why}; write a unit that is known, or take the column out`;
+  const issue: Issue = { severity: "warning", code: askedUnitCode(contender.role), message };
+  return leave(contender, why, issue);
+}
+
+/** Barometers read in these. */
+const AIR_UNITS: readonly UnitSymbol[] = ["mmHg", "hPa", "atm"];
+
+function decideByUnit(contender: Contender, unit: UnitSymbol): Decision {
+  const { role, header, unitSource } = contender;
+  if (role === "seaPressure" && AIR_UNITS.includes(unit))
+    return leave(contender, `${unit} is how barometers read the air`);
+  const why = `${unit === "1" ? "its unit" : unit} is given in ${unitSource}`;
+  const warn = (code: string, message: string): Decision =>
+    use(contender, unit, why, { severity: "warning", code, message });
+  if (role === "practicalSalinity" && unit === "g/kg") {
+    const message = `"${header}" is in g/kg and read as practical salinity; if it is absolute salinity, it is 0.5 % too high`;
+    return warn("salinity-in-g-kg", message);
+  }
+  return use(contender, unit, why);
+}
