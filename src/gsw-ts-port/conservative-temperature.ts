@@ -1,27 +1,19 @@
 import { CONSERVATIVE_HEAT_CAPACITY } from "./constants.ts";
 import { fillGibbs, type Isohaline, newIsohaline } from "./gibbs-saline.ts";
 import { enthalpyAt, enthalpySlopeAt, fillIsobar, type Isobar, newIsobar, TEMPERATURE_SCALE_C } from "./isobar.ts";
-import { adiabaticTemperature } from "./potential-temperature.ts";
-
-/** Newton doubles its digits: a step below this, in units of 40 degC, leaves an error below 1e-13 degC. */
-const LAST_STEP = 1e-7;
-const MOST_STEPS = 8;
+import { newton } from "./newton.ts";
+import { adiabaticTemperature, LAST_TEMPERATURE_STEP } from "./potential-temperature.ts";
 
 const fromPotential = (surface: Isobar, pt0: number): number =>
   enthalpyAt(surface, pt0 / TEMPERATURE_SCALE_C) / CONSERVATIVE_HEAT_CAPACITY;
 
 function toPotential(surface: Isobar, CT: number): number {
   const target = CONSERVATIVE_HEAT_CAPACITY * CT;
-  let y = CT / TEMPERATURE_SCALE_C;
-  for (let count = 0; count < MOST_STEPS; count++) {
-    const step = (enthalpyAt(surface, y) - target) / enthalpySlopeAt(surface, y);
-    y -= step;
-    if (!(Math.abs(step) > LAST_STEP)) break;
-  }
-  return TEMPERATURE_SCALE_C * y;
+  const step = (y: number): number => (enthalpyAt(surface, y) - target) / enthalpySlopeAt(surface, y);
+  return TEMPERATURE_SCALE_C * newton(CT / TEMPERATURE_SCALE_C, LAST_TEMPERATURE_STEP, step);
 }
 
-const surfaceIsobar = (SA: number): Isobar => fillIsobar(fillGibbs(SA, newIsohaline()), 0, 0, newIsobar());
+const surfaceIsobar = (SA: number): Isobar => fillIsobar(fillGibbs(SA, newIsohaline()), 0, newIsobar());
 
 /**
  * Conservative temperature from potential temperature.
@@ -105,14 +97,14 @@ const newWorkspace = (): Workspace => ({ gibbs: newIsohaline(), surface: newIsob
 
 function conservativeTemperatureOn({ gibbs, surface, local }: Workspace, SA: number, t: number, p: number): number {
   fillGibbs(SA, gibbs);
-  fillIsobar(gibbs, 0, 0, surface);
-  fillIsobar(gibbs, p, 0, local);
+  fillIsobar(gibbs, 0, surface);
+  fillIsobar(gibbs, p, local);
   return fromPotential(surface, adiabaticTemperature(local, surface, t));
 }
 
 function inSituTemperatureOn({ gibbs, surface, local }: Workspace, SA: number, CT: number, p: number): number {
   fillGibbs(SA, gibbs);
-  fillIsobar(gibbs, 0, 0, surface);
-  fillIsobar(gibbs, p, 0, local);
+  fillIsobar(gibbs, 0, surface);
+  fillIsobar(gibbs, p, local);
   return adiabaticTemperature(surface, local, toPotential(surface, CT));
 }

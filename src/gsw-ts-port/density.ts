@@ -18,7 +18,7 @@ export const density = (SA: number, CT: number, p: number): number => 1 / specif
  * @param SA absolute salinity, g/kg; below zero counts as zero
  * @param CT conservative temperature, degC
  * @returns kg/m3; NaN in, NaN out
- * @see IOC, SCOR & IAPSO 2010, eq. 2.8.3
+ * @see IOC, SCOR & IAPSO 2010, sec. 3.6
  */
 export const potentialDensityAnomaly = (SA: number, CT: number): number => density(SA, CT, 0) - 1000;
 

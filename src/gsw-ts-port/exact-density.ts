@@ -1,14 +1,10 @@
-/** Properties of seawater straight from its Gibbs function, in in-situ temperature: the truth that the 75-term polynomial fits. */
+/**
+ * Properties of seawater straight from its Gibbs function, in in-situ temperature: the truth that the 75-term polynomial
+ * fits. Valid from the freezing point to 40 degC, SA 0 to 42 g/kg, to 10^4 dbar.
+ */
 import { fillGibbs, newIsohaline } from "./gibbs-saline.ts";
-import {
-  curvatureAt,
-  fillIsobar,
-  newIsobar,
-  PRESSURE_SCALE_PA,
-  slopeAt,
-  TEMPERATURE_SCALE_C,
-  valueAt,
-} from "./isobar.ts";
+import { fillIsobar, newIsobar, PRESSURE_SCALE_PA, TEMPERATURE_SCALE_C } from "./isobar.ts";
+import { curvatureAt, slopeAt, valueAt } from "./polynomial.ts";
 
 /**
  * In-situ density from the Gibbs function.
@@ -21,7 +17,8 @@ import {
  * @example exactDensity(0, 20, 0) // 998.2071458
  */
 export const exactDensity = (SA: number, t: number, p: number): number =>
-  PRESSURE_SCALE_PA / valueAt(fillIsobar(fillGibbs(SA, newIsohaline()), p, 1, newIsobar()), t / TEMPERATURE_SCALE_C);
+  PRESSURE_SCALE_PA /
+  valueAt(fillIsobar(fillGibbs(SA, newIsohaline()), p, newIsobar(), slopeAt), t / TEMPERATURE_SCALE_C);
 
 /**
  * Speed of sound from the Gibbs function.
@@ -36,11 +33,11 @@ export function exactSoundSpeed(SA: number, t: number, p: number): number {
   const y = t / TEMPERATURE_SCALE_C;
   const gibbs = fillGibbs(SA, newIsohaline());
   const scratch = newIsobar();
-  const gyy = curvatureAt(fillIsobar(gibbs, p, 0, scratch), y);
-  fillIsobar(gibbs, p, 1, scratch);
+  const gyy = curvatureAt(fillIsobar(gibbs, p, scratch), y);
+  fillIsobar(gibbs, p, scratch, slopeAt);
   const gz = valueAt(scratch, y);
   const gyz = slopeAt(scratch, y);
-  const gzz = valueAt(fillIsobar(gibbs, p, 2, scratch), y);
-  // The scales of y cancel; z carries none beyond those of J/kg, so the root is in m/s.
+  const gzz = valueAt(fillIsobar(gibbs, p, scratch, curvatureAt), y);
+  // The scales of y and of z cancel.
   return gz * Math.sqrt(gyy / (gyz * gyz - gyy * gzz));
 }

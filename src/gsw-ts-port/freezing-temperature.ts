@@ -1,11 +1,12 @@
 import { CELSIUS_ZERO_K, PA_PER_DBAR } from "./constants.ts";
 import { fillWaterPotential, newIsohaline } from "./gibbs-saline.ts";
 import { iceGibbs } from "./ice.ts";
-import { fillIsobar, newIsobar, slopeAt, TEMPERATURE_SCALE_C, valueAt } from "./isobar.ts";
+import { fillIsobar, newIsobar, TEMPERATURE_SCALE_C } from "./isobar.ts";
+import { newton } from "./newton.ts";
+import { slopeAt, valueAt } from "./polynomial.ts";
 
-/** Newton doubles its digits: a step below this, degC, leaves an error below 1e-10. */
+/** degC; leaves an error below 1e-11 degC. */
 const LAST_STEP = 1e-5;
-const MOST_STEPS = 12;
 
 /**
  * Temperature at which seawater free of dissolved air is in equilibrium with ice.
@@ -17,15 +18,12 @@ const MOST_STEPS = 12;
  * @example freezingTemperature(35.16504, 0) // -1.9186
  */
 export function freezingTemperature(SA: number, p: number): number {
-  const potential = fillIsobar(fillWaterPotential(SA, newIsohaline()), p, 0, newIsobar());
+  const potential = fillIsobar(fillWaterPotential(SA, newIsohaline()), p, newIsobar());
   // A start within a degree of the answer over the whole range.
-  let t = -0.055 * Math.max(SA, 0) - 7.5e-4 * p;
-  for (let count = 0; count < MOST_STEPS; count++) {
+  const start = -0.055 * Math.max(SA, 0) - 7.5e-4 * p;
+  return newton(start, LAST_STEP, (t) => {
     const ice = iceGibbs(CELSIUS_ZERO_K + t, PA_PER_DBAR * p);
     const y = t / TEMPERATURE_SCALE_C;
-    const step = (valueAt(potential, y) - ice.g) / (slopeAt(potential, y) / TEMPERATURE_SCALE_C - ice.perKelvin);
-    t -= step;
-    if (!(Math.abs(step) > LAST_STEP)) break;
-  }
-  return t;
+    return (valueAt(potential, y) - ice.g) / (slopeAt(potential, y) / TEMPERATURE_SCALE_C - ice.perKelvin);
+  });
 }

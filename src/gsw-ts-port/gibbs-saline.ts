@@ -24,7 +24,7 @@ export function fillGibbs(SA: number, m: Isohaline): Isohaline {
   const x = Math.sqrt(x2);
   const x4 = x2 * x2;
   // x^2 ln(x) goes to 0 with x.
-  return combine(m, x2 === 0 ? 0 : x2 * Math.log(x), x2, x2 * x, x4, x4 * x, x4 * x2, x4 * x2 * x);
+  return fillFromPowers(m, x2 === 0 ? 0 : x2 * Math.log(x), x2, x2 * x, x4, x4 * x, x4 * x2, x4 * x2 * x);
 }
 
 /**
@@ -37,11 +37,11 @@ export function fillWaterPotential(SA: number, m: Isohaline): Isohaline {
   const x2 = Math.max(SA, 0) / SALINITY_SCALE;
   const x = Math.sqrt(x2);
   const x4 = x2 * x2;
-  return combine(m, -0.5 * x2, 0, -0.5 * x2 * x, -x4, -1.5 * x4 * x, -2 * x4 * x2, -2.5 * x4 * x2 * x);
+  return fillFromPowers(m, -0.5 * x2, 0, -0.5 * x2 * x, -x4, -1.5 * x4 * x, -2 * x4 * x2, -2.5 * x4 * x2 * x);
 }
 
 /** Water part plus the saline coefficients times what stands for x^2 ln(x) and for x^2 to x^7. */
-function combine(
+function fillFromPowers(
   m: Isohaline,
   x2lnx: number,
   x2: number,

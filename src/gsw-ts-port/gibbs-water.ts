@@ -16,10 +16,5 @@ const ROWS: readonly (readonly number[])[] = [
   [3.05081646487967, -9.63108119393062],
 ];
 
-export const HIGHEST_TEMPERATURE_POWER = ROWS.length - 1;
-
-/** The highest power of z that goes with y^j; the saline part has none higher. */
-export const HIGHEST_PRESSURE_POWER: readonly number[] = ROWS.map((row) => row.length - 1);
-
 /** The same coefficients at index 10 j + k, so that an index reads as its two powers. */
 export const WATER: readonly number[] = ROWS.flatMap((row) => [...row, ...Array<number>(10 - row.length).fill(0)]);

@@ -25,8 +25,8 @@ const divide = (re: number, a: Complex): Complex => {
   return [(re * a[0]) / square, (-re * a[1]) / square];
 };
 
-/** Resonance of strength r at t, for reduced temperature T: its real part, and the real part of its slope with T. */
-function resonance(r: Complex, t: Complex, T: number): Complex {
+/** Real part of the resonance of strength r at t, for reduced temperature T, and of its slope with T. */
+function resonance(r: Complex, t: Complex, T: number): readonly [value: number, slope: number] {
   const below = shift(t, -T);
   const above = shift(t, T);
   const lnBelow = logarithm(below);

@@ -1,9 +1,10 @@
 import { fillGibbs, newIsohaline } from "./gibbs-saline.ts";
-import { curvatureAt, fillIsobar, type Isobar, newIsobar, slopeAt, TEMPERATURE_SCALE_C } from "./isobar.ts";
+import { fillIsobar, type Isobar, newIsobar, TEMPERATURE_SCALE_C } from "./isobar.ts";
+import { newton } from "./newton.ts";
+import { curvatureAt, slopeAt } from "./polynomial.ts";
 
-/** Newton doubles its digits: a step below this, in units of 40 degC, leaves an error below 1e-13 degC. */
-const LAST_STEP = 1e-7;
-const MOST_STEPS = 8;
+/** In units of 40 degC: leaves an error below 1e-13 degC, also in the enthalpy of water brought to a temperature. */
+export const LAST_TEMPERATURE_STEP = 1e-7;
 
 /**
  * Temperature that water of temperature t on one isobar takes on another without exchange of heat or salt.
@@ -14,14 +15,10 @@ const MOST_STEPS = 8;
  * @returns temperature on `to`, degC
  */
 export function adiabaticTemperature(from: Isobar, to: Isobar, t: number): number {
-  let y = t / TEMPERATURE_SCALE_C;
-  const target = slopeAt(from, y);
-  for (let count = 0; count < MOST_STEPS; count++) {
-    const step = (slopeAt(to, y) - target) / curvatureAt(to, y);
-    y -= step;
-    if (!(Math.abs(step) > LAST_STEP)) break;
-  }
-  return TEMPERATURE_SCALE_C * y;
+  const start = t / TEMPERATURE_SCALE_C;
+  const target = slopeAt(from, start);
+  const step = (y: number): number => (slopeAt(to, y) - target) / curvatureAt(to, y);
+  return TEMPERATURE_SCALE_C * newton(start, LAST_TEMPERATURE_STEP, step);
 }
 
 /**
@@ -37,5 +34,5 @@ export function adiabaticTemperature(from: Isobar, to: Isobar, t: number): numbe
  */
 export function potentialTemperature(SA: number, t: number, p: number, referenceP = 0): number {
   const gibbs = fillGibbs(SA, newIsohaline());
-  return adiabaticTemperature(fillIsobar(gibbs, p, 0, newIsobar()), fillIsobar(gibbs, referenceP, 0, newIsobar()), t);
+  return adiabaticTemperature(fillIsobar(gibbs, p, newIsobar()), fillIsobar(gibbs, referenceP, newIsobar()), t);
 }

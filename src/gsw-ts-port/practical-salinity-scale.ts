@@ -3,6 +3,7 @@
  * of SP 35 at the same temperature and sea pressure 0; and its continuation to fresh water.
  * UNESCO Technical Papers in Marine Science 37 (1981); Hill, Dauphinee & Woods 1986, IEEE J. Oceanic Eng. 11, 109-112.
  */
+import { newton } from "./newton.ts";
 
 const A0 = 0.008;
 const A1 = -0.1692;
@@ -21,9 +22,8 @@ const B5 = -0.0144;
 /** The scale proper ends here; below, the continuation takes over. */
 const LOWEST_SALINITY = 2;
 
-/** Newton steps in q below this leave an error below rounding. */
+/** In q; leaves an error below rounding. */
 const LAST_STEP = 1e-9;
-const MOST_STEPS = 12;
 
 /** Temperature factor of the scale's second polynomial; t68 in degC. Zero at 15 degC. */
 export const temperatureFactor = (t68: number): number => (t68 - 15) / (1 + 0.0162 * (t68 - 15));
@@ -62,16 +62,10 @@ function solve(
   salinity: number,
   f: number,
 ): number {
-  let q = 0.006 + Math.sqrt(salinity / 35);
-  for (let count = 0; count < MOST_STEPS; count++) {
-    const step = (S(q, f) - salinity) / slope(q, f);
-    q -= step;
-    if (!(Math.abs(step) > LAST_STEP)) break;
-  }
-  return q;
+  return newton(0.006 + Math.sqrt(salinity / 35), LAST_STEP, (q) => (S(q, f) - salinity) / slope(q, f));
 }
 
-/** Factor on the continuation that makes it meet the scale at SP 2, at any temperature. IOC et al. 2010, appendix E.3. */
+/** Factor on the continuation that makes it meet the scale at SP 2, at any temperature. IOC et al. 2010, appendix E. */
 const joiningFactor = (f: number): number =>
   LOWEST_SALINITY / hillSalinity(solve(scale, scaleSlope, LOWEST_SALINITY, f), f);
 

@@ -139,7 +139,7 @@ const rootSalinity = (SA: number): number => Math.sqrt(SALINITY_FACTOR * Math.ma
  * @param CT conservative temperature, degC
  * @param p sea pressure, dbar
  * @returns specific volume, m3/kg; NaN in, NaN out
- * @see Roquet et al. 2015, eq. 8
+ * @see Roquet et al. 2015
  * @example specificVolume(32, 10, 100) // 9.756515980668401e-4
  */
 export function specificVolume(SA: number, CT: number, p: number): number {
@@ -156,7 +156,7 @@ export function specificVolume(SA: number, CT: number, p: number): number {
  * @param CT conservative temperature, degC
  * @param p sea pressure, dbar
  * @returns enthalpy difference, J/kg; NaN in, NaN out
- * @see IOC, SCOR & IAPSO 2010, eq. 3.2.1; Roquet et al. 2015
+ * @see IOC, SCOR & IAPSO 2010, appendix A.30; Roquet et al. 2015
  */
 export function dynamicEnthalpy(SA: number, CT: number, p: number): number {
   const x = rootSalinity(SA);

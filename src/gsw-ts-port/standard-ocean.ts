@@ -1,6 +1,10 @@
 import { PA_PER_DBAR, STANDARD_OCEAN_SALINITY } from "./constants.ts";
+import { newton } from "./newton.ts";
 import { dynamicEnthalpy, specificVolume } from "./specific-volume.ts";
 import { GRAVITY_DEPTH_RATE, surfaceGravity } from "./surface-gravity.ts";
+
+/** Leaves an error below rounding: enthalpy is nearly straight in pressure. */
+const LAST_STEP_DBAR = 1e-4;
 
 /**
  * Height in the standard ocean (SA 35.16504 g/kg, CT 0 degC) of a sea pressure: what most probes print as depth.
@@ -30,11 +34,8 @@ export function standardOceanHeight(p: number, lat: number): number {
  */
 export function standardOceanPressure(z: number, lat: number): number {
   const target = -surfaceGravity(lat) * z * (1 - 0.5 * GRAVITY_DEPTH_RATE * z);
-  let p = -z;
-  // Newton, with dh/dp = v: the error falls below rounding after three steps at any ocean depth.
-  for (let step = 0; step < 5; step++) {
+  return newton(-z, LAST_STEP_DBAR, (p) => {
     const excess = dynamicEnthalpy(STANDARD_OCEAN_SALINITY, 0, p) - target;
-    p -= excess / (PA_PER_DBAR * specificVolume(STANDARD_OCEAN_SALINITY, 0, p));
-  }
-  return p;
+    return excess / (PA_PER_DBAR * specificVolume(STANDARD_OCEAN_SALINITY, 0, p));
+  });
 }
