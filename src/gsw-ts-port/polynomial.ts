@@ -1,6 +1,6 @@
 /**
  * Polynomials of degree seven or less, stored as eight coefficients from the lowest power up, starting anywhere in an
- * array. Written out, because loops over coefficients take twice as long.
+ * array. Written out, because a loop over the coefficients is slower.
  */
 
 type Coefficients = readonly number[];
