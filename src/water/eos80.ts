@@ -1,4 +1,4 @@
-import { ipts68FromIts90 } from "./temperature-scale.ts";
+import { IPTS68_PER_ITS90 } from "../gsw-ts-port/index.ts";
 import type { WaterModel } from "./water-model.ts";
 
 /**
@@ -40,7 +40,7 @@ export const eos80: WaterModel = {
   label: "EOS-80",
   salinityScale: "practical",
   temperatureScale: "in-situ",
-  density: (salinity, tempC, seaPressureDbar) => eos80Density(salinity, ipts68FromIts90(tempC), seaPressureDbar),
+  density: (salinity, tempC, seaPressureDbar) => eos80Density(salinity, tempC * IPTS68_PER_ITS90, seaPressureDbar),
   isWithinRange: (salinity, inSituTempC, seaPressureDbar) =>
     salinity >= 0 &&
     salinity <= 42 &&

@@ -1,4 +1,4 @@
-import { ipts68FromIts90 } from "./temperature-scale.ts";
+import { IPTS68_PER_ITS90 } from "../gsw-ts-port/index.ts";
 import type { WaterModel } from "./water-model.ts";
 
 /**
@@ -30,7 +30,8 @@ export const limnological: WaterModel = {
   label: "Limnological (Chen & Millero 1986)",
   salinityScale: "absolute",
   temperatureScale: "in-situ",
-  density: (salinity, tempC, seaPressureDbar) => limnologicalDensity(salinity, ipts68FromIts90(tempC), seaPressureDbar),
+  density: (salinity, tempC, seaPressureDbar) =>
+    limnologicalDensity(salinity, tempC * IPTS68_PER_ITS90, seaPressureDbar),
   isWithinRange: (salinity, inSituTempC, seaPressureDbar) =>
     salinity >= 0 &&
     salinity <= 0.6 &&
