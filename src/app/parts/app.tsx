@@ -1,0 +1,98 @@
+import { useSignal } from "@preact/signals";
+import { useEffect } from "preact/hooks";
+import { readFiles } from "../reading-files.ts";
+import { dispatch, progress, savingTrouble, solved, survey } from "../store.ts";
+import { BasisPanel } from "./basis-panel.tsx";
+import { CastDetails } from "./cast-details.tsx";
+import { CastList } from "./cast-list.tsx";
+import { CastSummary } from "./cast-summary.tsx";
+import { EmptyState } from "./empty-state.tsx";
+import { FileTroubles } from "./file-troubles.tsx";
+import { Header } from "./header.tsx";
+import { LevelsTable } from "./levels-table.tsx";
+import { NumbersTable } from "./numbers-table.tsx";
+import { ProfileCharts } from "./profile-charts.tsx";
+import { Readout } from "./readout.tsx";
+
+export function App() {
+  const isBasisOpen = useSignal(false);
+  const isDropping = useFileDrop();
+  return (
+    <div class={`page${isDropping.value ? " dropping" : ""}`}>
+      <Header isBasisOpen={isBasisOpen} />
+      <CastList />
+      <main>
+        <FileTroubles />
+        <Notes />
+        {survey.value.casts.length === 0 ? <EmptyState /> : <ColumnPlace />}
+      </main>
+      <aside id="basis" class={isBasisOpen.value ? "open" : ""} aria-label="Basis and summary">
+        <BasisPanel />
+        <CastSummary />
+        <CastDetails />
+      </aside>
+    </div>
+  );
+}
+
+function ColumnPlace() {
+  if (solved.value.casts.length === 0) return null;
+  return (
+    <>
+      <h2 class="place">
+        <span>Column</span>
+      </h2>
+      <ProfileCharts />
+      <Readout />
+      <LevelsTable />
+      <NumbersTable />
+    </>
+  );
+}
+
+function Notes() {
+  const running = progress.value;
+  return (
+    <div class="notes" role="status">
+      {savingTrouble.value ? <p class="warn">{savingTrouble.value}</p> : null}
+      {running ? (
+        <p>
+          Solving: {running.doneCount} of {running.allCount} casts done{" "}
+          <button type="button" class="small" onClick={() => dispatch({ kind: "undone" })}>
+            Stop and undo
+          </button>
+        </p>
+      ) : null}
+    </div>
+  );
+}
+
+/** The whole page takes dropped files. */
+function useFileDrop() {
+  const isDropping = useSignal(false);
+  useEffect(() => {
+    const over = (event: DragEvent): void => {
+      if (!event.dataTransfer?.types.includes("Files")) return;
+      event.preventDefault();
+      isDropping.value = true;
+    };
+    const leave = (event: DragEvent): void => {
+      if (event.relatedTarget === null) isDropping.value = false;
+    };
+    const drop = (event: DragEvent): void => {
+      if (!event.dataTransfer?.files.length) return;
+      event.preventDefault();
+      isDropping.value = false;
+      void readFiles([...event.dataTransfer.files]);
+    };
+    document.addEventListener("dragover", over);
+    document.addEventListener("dragleave", leave);
+    document.addEventListener("drop", drop);
+    return () => {
+      document.removeEventListener("dragover", over);
+      document.removeEventListener("dragleave", leave);
+      document.removeEventListener("drop", drop);
+    };
+  }, [isDropping]);
+  return isDropping;
+}

@@ -1,0 +1,40 @@
+import { describeAtDepths, type Solution } from "../../survey/index.ts";
+import type { DisplaySystem } from "../../units/index.ts";
+import { scientific, shownPercent, shownValue } from "../show/shown.ts";
+import { strongestStratification } from "../show/water-at.ts";
+import { castInHand, state } from "../store.ts";
+
+/** The cast in hand in a few lines. */
+export function CastSummary() {
+  const inHand = castInHand.value;
+  if (!inHand?.solution) return null;
+  return (
+    <section aria-label="Summary">
+      <h2>{inHand.cast.name}</h2>
+      <dl>
+        {summaryRows(inHand.solution, state.value.system).map(([quantity, value]) => (
+          <div class="row" key={quantity}>
+            <dt>{quantity}</dt>
+            <dd>{value}</dd>
+          </div>
+        ))}
+      </dl>
+    </section>
+  );
+}
+
+function summaryRows({ column, profile }: Solution, system: DisplaySystem): readonly (readonly [string, string])[] {
+  const bottom = describeAtDepths(column, [column.bottomDepthM]);
+  const strongest = strongestStratification(profile);
+  return [
+    ["Samples used", String(column.n)],
+    ["First sample at", shownValue(column.depthM[0]!, "depth", system)],
+    ["Last sample at", shownValue(column.depthM[column.n - 1]!, "depth", system)],
+    ["Bottom gauge pressure", shownValue(bottom.gaugePressureKPa[0]!, "gaugePressure", system)],
+    ["Departure there", shownValue(bottom.departureKPa[0]!, "departure", system)],
+    ["as head of reference", shownValue(bottom.departureM[0]!, "head", system)],
+    ["of gauge pressure", `${shownPercent(bottom.departureFrac[0]!)} %`],
+    ["Greatest N²", strongest ? `${scientific(strongest.perS2)} s⁻²` : "–"],
+    ["at depth", strongest ? shownValue(strongest.depthM, "depth", system) : "–"],
+  ];
+}

@@ -1,0 +1,2 @@
+export { drawPlumb } from "./draw-plumb.ts";
+export { drawSheet } from "./draw-sheet.ts";
