@@ -7,39 +7,26 @@ const BY_SYMBOL: ReadonlyMap<string, Unit> = new Map(UNITS.map((unit) => [unit.s
 /** The table entry of a symbol. */
 export const unitOf = (symbol: UnitSymbol): Unit => BY_SYMBOL.get(symbol)!;
 
-interface Line {
-  readonly from: Unit;
-  readonly to: Unit;
-  readonly ratio: number;
+function bothUnits(fromSymbol: UnitSymbol, toSymbol: UnitSymbol): readonly [from: Unit, to: Unit] {
+  const [from, to] = [unitOf(fromSymbol), unitOf(toSymbol)];
+  if (from.kind === to.kind) return [from, to];
+  throw new ToolError("DomainError", `${from.symbol} is a unit of ${from.kind}, ${to.symbol} one of ${to.kind}`);
 }
 
-function lineBetween(fromSymbol: UnitSymbol, toSymbol: UnitSymbol): Line {
-  const from = unitOf(fromSymbol);
-  const to = unitOf(toSymbol);
-  if (from.kind !== to.kind) {
-    throw new ToolError("DomainError", `${from.symbol} is a unit of ${from.kind}, ${to.symbol} one of ${to.kind}`);
-  }
-  return { from, to, ratio: from.factor / to.factor };
-}
-
-// Dividing by the inverse keeps decimal multiples exact: 518 uS/cm is 0.518 mS/cm, not 0.5180000000000001.
-const along = (line: Line, value: number): number =>
-  line.from === line.to
-    ? value
-    : (line.ratio >= 1
-        ? (value - line.from.offset) * line.ratio
-        : (value - line.from.offset) / (line.to.factor / line.from.factor)) + line.to.offset;
+// Multiplied first and divided after, decimal multiples come out as they are written: 518 uS/cm is 0.518 mS/cm.
+const moved = (value: number, from: Unit, to: Unit): number =>
+  from === to ? value : ((value - from.offset) * from.factor) / to.factor + to.offset;
 
 /**
  * A value in another unit of the same kind; NaN in, NaN out. Throws a DomainError when the kinds differ.
  * @example convert(100, "ft", "m") // 30.48
  */
 export function convert(value: number, from: UnitSymbol, to: UnitSymbol): number {
-  return along(lineBetween(from, to), value);
+  return moved(value, ...bothUnits(from, to));
 }
 
 /** As `convert`, for each value of an array, into a new array. */
 export function convertArray(values: ArrayLike<number>, from: UnitSymbol, to: UnitSymbol): Float64Array {
-  const line = lineBetween(from, to);
-  return Float64Array.from(values, (value) => along(line, value));
+  const units = bothUnits(from, to);
+  return Float64Array.from(values, (value) => moved(value, ...units));
 }

@@ -79,12 +79,12 @@ export const UNITS = [
   }),
   unit("temperature", "K", 1, ["kelvin", "degK", "deg_K", "degree_K", "degrees_K"], { offset: 273.15 }),
 
-  unit("conductivity", "S/m", 1, ["S m-1", "siemens/m", "siemens per meter", "siemens per metre", "mho/m"]),
-  unit("conductivity", "mS/cm", 0.1, ["mS", "mS cm-1", "mmho/cm", "mmhos/cm", "dS/m", "millisiemens per centimeter"]),
+  unit("conductivity", "S/m", 1e4, ["S m-1", "siemens/m", "siemens per meter", "siemens per metre", "mho/m"]),
+  unit("conductivity", "mS/cm", 1000, ["mS", "mS cm-1", "mmho/cm", "mmhos/cm", "dS/m", "millisiemens per centimeter"]),
   unit(
     "conductivity",
     "uS/cm",
-    1e-4,
+    1,
     [
       "uS",
       "uS cm-1",

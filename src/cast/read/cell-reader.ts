@@ -71,10 +71,9 @@ export class CellReader {
     const texts = this.texts(role);
     if (!column || texts === null) return null;
     const from = column.unit ?? OWN_UNIT[role];
-    const isPlace = role === "latitude" || role === "longitude";
     const sentinels: string[] = [];
     const values = Float64Array.from(texts, (text, rowIndex) => {
-      if (!isPlace && isSentinel(text)) {
+      if (isSentinel(role, text)) {
         sentinels.push(text);
         return Number.NaN;
       }

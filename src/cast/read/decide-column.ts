@@ -84,7 +84,7 @@ function decideText(contender: Contender): Decision {
 function decideByRule(contender: Contender, decimalMark: DecimalMark): Decision {
   const { role, header } = contender;
   const values = contender.filled
-    .filter((cell) => !isSentinel(cell))
+    .filter((cell) => !isSentinel(role, cell))
     .map((cell) => parseNumber(cell, decimalMark))
     .filter((value) => value !== null);
   if (values.length === 0) return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds no numbers`);

@@ -26,14 +26,18 @@ interface Candidate {
 
 const looksNumeric = (cell: string): boolean => /^[-+−]?[\d.,]+(e[-+]?\d+)?$/i.test(cell);
 
-const roleCountOf = (row: Row): number =>
-  row.cells.length < 2 ? 0 : new Set(row.cells.flatMap((cell) => readHeaderCell(cell)?.role ?? [])).size;
+/** How many names a row holds that we know; none if it has only been torn apart at the blanks within its names. */
+function roleCountOf(row: Row, delimiter: Delimiter): number {
+  const isTorn = delimiter.character === " " && row.cells.some((cell) => /[,;|\t]/.test(cell));
+  if (isTorn || row.cells.length < 2) return 0;
+  return new Set(row.cells.flatMap((cell) => readHeaderCell(cell)?.role ?? [])).size;
+}
 
 /** The first of the rows with most known names. */
 function headerByNames(lines: readonly string[], delimiter: Delimiter): Candidate {
   let best: Candidate = { delimiter, headerLineIndex: 0, roleCount: 0 };
   for (const row of parseTable(lines, delimiter).rows) {
-    const roleCount = roleCountOf(row);
+    const roleCount = roleCountOf(row, delimiter);
     if (roleCount > best.roleCount) best = { delimiter, headerLineIndex: row.lineIndex, roleCount };
   }
   return best;

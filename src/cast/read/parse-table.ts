@@ -35,7 +35,7 @@ export const isCommentLine = (line: string): boolean => COMMENT_SIGN.test(line);
 
 export const withoutCommentSign = (line: string): string => line.replace(COMMENT_SIGN, "");
 
-const squeezed = (line: string): string => line.trim().replace(/[ \t]+/g, " ");
+const squeezed = (line: string): string => line.trim().replace(/ +/g, " ");
 
 /**
  * Comment lines are emptied and not taken out, so that lines keep their numbers; a quoted cell that spans lines counts
