@@ -100,8 +100,12 @@ function samplesOf(rows: MeasuredRows, kept: readonly number[]): Samples {
 }
 
 /** A boat drifts on station: the middle of what the rows say. */
-function middle(values: Float64Array | null, indices: readonly number[]): number | null {
-  const found = values ? indices.map((i) => values[i]!).filter((value) => !Number.isNaN(value)) : [];
+function middle(
+  values: Float64Array | null,
+  indices: readonly number[],
+  largest = Number.POSITIVE_INFINITY,
+): number | null {
+  const found = values ? indices.map((i) => values[i]!).filter((value) => Math.abs(value) <= largest) : [];
   return found.length === 0 ? null : median(found);
 }
 
@@ -111,8 +115,8 @@ export function buildCast(rows: MeasuredRows, group: RowGroup, fileName: string)
   return {
     station: group.station,
     time: group.date === null ? null : clock === null ? group.date : `${group.date}T${clock}`,
-    latitudeDeg: middle(rows.latitudeDeg, kept),
-    longitudeDeg: middle(rows.longitudeDeg, kept),
+    latitudeDeg: middle(rows.latitudeDeg, kept, 90),
+    longitudeDeg: middle(rows.longitudeDeg, kept, 180),
     distanceKm: middle(rows.distanceKm, kept),
     fileName,
     samples: samplesOf(rows, kept),

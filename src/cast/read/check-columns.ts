@@ -22,9 +22,17 @@ const askedAbout = (columns: RecognisedColumns, roles: readonly ColumnRole[]): r
 const isStationList = ({ used }: RecognisedColumns): boolean =>
   used.latitude !== undefined && used.longitude !== undefined && used.temperature === undefined;
 
+const LISTED_HEADERS = 12;
+
+function listed(headers: readonly string[]): string {
+  const names = headers.slice(0, LISTED_HEADERS).map((header) => `"${header}"`);
+  const more = headers.length - names.length;
+  return names.join(", ") + (more > 0 ? ` and ${more} more` : "");
+}
+
 /** The errors that keep a table from being read, none when it can be. */
 export function checkColumns(table: FoundTable, columns: RecognisedColumns): readonly Issue[] {
-  const headers = table.header.cells.map((cell) => `"${cell}"`).join(", ");
+  const headers = listed(table.header.cells);
   const error = (code: string, message: string): Issue => ({
     severity: "error",
     code,

@@ -46,8 +46,21 @@ function absolutePressureIssue(rows: MeasuredRows): Issue | null {
   return { severity: "warning", code: "pressure-may-be-absolute", message };
 }
 
+function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDeg: number): Issue | null {
+  const found = degrees?.find((value) => Math.abs(value) > largestDeg);
+  if (found === undefined) return null;
+  const message = `${words} ${found} is outside -${largestDeg} to ${largestDeg} degrees; not used; is it in degrees and decimals?`;
+  return { severity: "warning", code: "off-the-earth", message };
+}
+
 /** Only errors keep the rows from being used. */
 export function checkRows(table: FoundTable, rows: MeasuredRows): readonly Issue[] {
-  const issues = [widthIssue(table), upsideDownIssue(rows), absolutePressureIssue(rows)];
+  const issues = [
+    widthIssue(table),
+    upsideDownIssue(rows),
+    absolutePressureIssue(rows),
+    offTheEarthIssue("latitude", rows.latitudeDeg, 90),
+    offTheEarthIssue("longitude", rows.longitudeDeg, 180),
+  ];
   return issues.filter((issue) => issue !== null);
 }

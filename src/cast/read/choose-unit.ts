@@ -22,7 +22,9 @@ export interface UnitlessColumn {
 }
 
 /** The code of the issue that asks for a unit. */
-export const askedUnitCode = (role: ColumnRole): string => `no-unit-${role}`;
+export const askedUnitCode = (role: ColumnRole): string => `no-unit-${kebab(role)}`;
+
+const kebab = (role: ColumnRole): string => role.replace(/[A-Z]/g, (capital) => `-${capital.toLowerCase()}`);
 
 const shown = (value: number): string => String(Number(value.toPrecision(4)));
 
@@ -35,7 +37,7 @@ function assumed(column: UnitlessColumn, unit: UnitSymbol, why: string, severity
   return {
     unit,
     reason: `no unit in the file, ${unit} assumed because ${why}`,
-    issue: { severity, code: `assumed-unit-${column.role}`, message },
+    issue: { severity, code: `assumed-unit-${kebab(column.role)}`, message },
   };
 }
 

@@ -18,11 +18,15 @@ export interface Contender {
   readonly filled: readonly string[];
 }
 
+/** So many cells tell what kind of thing a column holds. */
+export const TELLING_CELLS = 200;
+
 /** A column named for a date may hold times too, and the other way about: its cells decide. */
 function roleByContent(role: ColumnRole, filled: readonly string[]): ColumnRole {
   if (role !== "date" && role !== "clock" && role !== "dateTime") return role;
-  const { order } = dateOrderOf(filled.map(datePart));
-  const moments = filled.map((cell) => parseDateTime(cell, order)).filter((moment) => moment !== null);
+  const telling = filled.slice(0, TELLING_CELLS);
+  const { order } = dateOrderOf(telling.map(datePart));
+  const moments = telling.map((cell) => parseDateTime(cell, order)).filter((moment) => moment !== null);
   if (moments.length === 0) return role;
   return moments.some((moment) => moment.clock !== null) ? "dateTime" : "date";
 }

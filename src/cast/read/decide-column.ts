@@ -4,7 +4,7 @@ import type { UnitSymbol } from "../../units/index.ts";
 import type { ColumnReading } from "../reading.ts";
 import { askedUnitCode, chooseUnit } from "./choose-unit.ts";
 import { ROLE_KIND, ROLE_WORDS } from "./column-names.ts";
-import type { Contender } from "./contender.ts";
+import { type Contender, TELLING_CELLS } from "./contender.ts";
 import { type DecimalMark, isSentinel, parseNumber } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
 
@@ -71,14 +71,15 @@ export function decide(contender: Contender, decimalMark: DecimalMark): Decision
 
 /** Text is taken as it is; a column of times must hold times, which seconds since the start are not. */
 function decideText(contender: Contender): Decision {
-  const { role, filled } = contender;
-  const { order } = dateOrderOf(filled.map(datePart));
+  const { role } = contender;
+  const telling = contender.filled.slice(0, TELLING_CELLS);
+  const { order } = dateOrderOf(telling.map(datePart));
   const isRead = (cell: string) => (role === "clock" ? parseClock(cell) : parseDateTime(cell, order)) !== null;
   const isTime = role === "clock" || role === "dateTime";
-  if (isTime && filled.filter(isRead).length < filled.length / 2) {
-    return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds texts such as "${filled[0]}"`);
+  if (isTime && telling.filter(isRead).length < telling.length / 2) {
+    return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds texts such as "${telling[0]}"`);
   }
-  return use(contender, null, "its cells are taken as they are");
+  return use(contender, null, isTime || role === "date" ? "its cells read as such" : "taken as written");
 }
 
 function decideByRule(contender: Contender, decimalMark: DecimalMark): Decision {

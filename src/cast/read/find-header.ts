@@ -79,7 +79,8 @@ function unitsIn(header: Row, below: Row | undefined): readonly string[] | null 
   return isUnits ? texts : null;
 }
 
-const isSameRow = (a: Row, b: Row): boolean => a.cells.join("\n") === b.cells.join("\n");
+const isSameRow = (a: Row, b: Row): boolean =>
+  a.cells.length === b.cells.length && a.cells.every((cell, i) => cell === b.cells[i]);
 
 /** The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out. */
 export function findTable(text: string): FoundTable | null {

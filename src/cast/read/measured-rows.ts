@@ -38,6 +38,16 @@ const ASSUMED_ORDER: Issue = {
     "no date in the file tells whether day or month stands first; month is assumed; dates such as 2020-03-04 would tell",
 };
 
+/** Long tables repeat their dates and times row after row. */
+function remembered<T>(parse: (text: string) => T): (text: string) => T {
+  const known = new Map<string, T>();
+  return (text) => {
+    const value = known.has(text) ? (known.get(text) as T) : parse(text);
+    known.set(text, value);
+    return value;
+  };
+}
+
 type Times = Pick<MeasuredRows, "date" | "dateKey" | "clock">;
 
 function readTimes(reader: CellReader): Times {
@@ -46,15 +56,17 @@ function readTimes(reader: CellReader): Times {
   const clockTexts = reader.texts("clock");
   const { order, assumed } = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
   if (assumed) reader.issues.push(ASSUMED_ORDER);
-  const dateOf = (text: string) => parseDateTime(text, order)?.date ?? null;
-  const clockOf = (text: string) => parseDateTime(text, order)?.clock ?? "";
+  const momentOf = remembered((text) => parseDateTime(text, order));
+  const dateOf = (text: string) => momentOf(text)?.date ?? null;
+  const clockOf = (text: string) => momentOf(text)?.clock ?? "";
   const ownDate = dateTexts && reader.times("date", dateTexts, dateOf);
   const momentDate = momentTexts && reader.times("dateTime", momentTexts, dateOf);
   const date = ownDate ?? momentDate;
   return {
     date,
     dateKey: date?.map((day, i) => day || dateTexts?.[i] || "") ?? null,
-    clock: (clockTexts && reader.times("clock", clockTexts, parseClock)) ?? momentTexts?.map(clockOf) ?? null,
+    clock:
+      (clockTexts && reader.times("clock", clockTexts, remembered(parseClock))) ?? momentTexts?.map(clockOf) ?? null,
   };
 }
 

@@ -29,11 +29,11 @@ export const DELIMITERS: readonly Delimiter[] = [
   { character: " ", name: "blanks" },
 ];
 
-const COMMENT_SIGN = /^\s*"?(#|%|\/\/|\*|!)+\s*/;
+const COMMENT_SIGN = /^(\s*"?)(#|%|\/\/)+\s*/;
 
 export const isCommentLine = (line: string): boolean => COMMENT_SIGN.test(line);
 
-export const withoutCommentSign = (line: string): string => line.replace(COMMENT_SIGN, "");
+export const withoutCommentSign = (line: string): string => line.replace(COMMENT_SIGN, "$1");
 
 const squeezed = (line: string): string => line.trim().replace(/ +/g, " ");
 

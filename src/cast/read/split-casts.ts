@@ -22,11 +22,29 @@ export interface SplitRows {
 }
 
 const SHORTEST_GAP_S = 60;
+const LONGEST_PAUSE_S = 600;
+const DAY_S = 86_400;
+
+/** The day of each row, by which days are told apart; a lowering that runs past midnight keeps the day it began on. */
+function daysOf(rows: MeasuredRows): readonly string[] | null {
+  const { date, clock, dateKey } = rows;
+  if (dateKey === null || date === null || clock === null) return dateKey;
+  const days = [...dateKey];
+  for (let i = 1; i < rows.n; i++) {
+    const isSamePlace = rows.station?.[i] === rows.station?.[i - 1] && rows.castName?.[i] === rows.castName?.[i - 1];
+    const isNextDay = Date.parse(date[i]!) - Date.parse(date[i - 1]!) === DAY_S * 1000;
+    const pauseS = DAY_S + secondsOf(clock[i]!) - secondsOf(clock[i - 1]!);
+    const isSameDay = date[i] === date[i - 1] || (isNextDay && pauseS < LONGEST_PAUSE_S);
+    if (isSamePlace && isSameDay) days[i] = days[i - 1]!;
+  }
+  return days;
+}
 
 function groupByKeys(rows: MeasuredRows): readonly (readonly number[])[] {
+  const days = daysOf(rows);
   const groups = new Map<string, number[]>();
   for (let i = 0; i < rows.n; i++) {
-    const key = JSON.stringify([rows.station?.[i], rows.castName?.[i], rows.dateKey?.[i]]);
+    const key = JSON.stringify([rows.station?.[i], rows.castName?.[i], days?.[i]]);
     const group = groups.get(key);
     if (group) group.push(i);
     else groups.set(key, [i]);
@@ -34,19 +52,23 @@ function groupByKeys(rows: MeasuredRows): readonly (readonly number[])[] {
   return [...groups.values()];
 }
 
-/** Rows at which depth jumps back by more than half its whole range, from two rows deep down: not a spike, not a soak. */
+/**
+ * Rows at which depth jumps back by more than half its whole range and stays back: from two rows far on to two rows near
+ * the start, so that neither a spike nor a soak is taken for it; or back to the very depth that the lowering began with.
+ */
 function restartsIn(rowIndices: readonly number[], depths: Float64Array): readonly number[] {
   const measured = rowIndices.filter((i) => !Number.isNaN(depths[i]!));
   const values = measured.map((i) => depths[i]!);
   if (values.length < 4) return [];
   const half = (values.reduce((a, b) => Math.max(a, b)) - values.reduce((a, b) => Math.min(a, b))) / 2;
-  const towards = values[1]! >= values[0]! ? 1 : -1;
+  const towards = values.reduce((sum, value, k) => sum + Math.sign(value - (values[k - 1] ?? value)), 0) < 0 ? -1 : 1;
   let first = values[0]!;
   return measured.filter((_, k) => {
     if (k < 2) return false;
     const jump = (values[k - 1]! - values[k]!) * towards;
     const before = (values[k - 2]! - values[k]!) * towards;
-    const isRestart = half > 0 && jump > half && (before > half || values[k] === first);
+    const after = (values[k - 1]! - (values[k + 1] ?? values[k]!)) * towards;
+    const isRestart = half > 0 && jump > half && (Math.min(before, after) > half || values[k] === first);
     if (isRestart) first = values[k]!;
     return isRestart;
   });

@@ -129,6 +129,16 @@ describe("what stands around the table", () => {
     expectTheCast(reading);
   });
 
+  test.each(["#,", '"#",'])("a header that begins with the number sign as a name: %s", (first) => {
+    const reading = readText(
+      `${first}${LINES[0]}\n${LINES.slice(1)
+        .map((line, i) => `${i},${line}`)
+        .join("\n")}`,
+    );
+    expect(reading.columns.map((column) => column.role)).toEqual([null, "depth", "temperature", "practicalSalinity"]);
+    expectTheCast(reading);
+  });
+
   test("a row of units below the headers gives the units", () => {
     const reading = readText("CTDPRS,CTDTMP,CTDSAL,CTDOXY\nDBAR,ITS-90,PSS-78,UMOL/KG\n5,12,30,200\n10,11,31,190\n");
     expect(reading.columns.map((column) => column.unit)).toEqual(["dbar", "degC", "1", null]);

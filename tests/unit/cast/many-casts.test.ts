@@ -100,10 +100,26 @@ describe("times", () => {
     ["down and up again", [1, 2, 3, 4, 5, 6, 5, 4, 3, 2, 1]],
     ["a soak at the surface", [0.5, 1, 0.4, 0.9, 0.5, 1, 2, 3, 4]],
     ["a spike in depth", [1, 2, 3, 30, 4, 5, 6, 7]],
+    ["depth dropping out for one sample", [1, 2, 3, 4, 5, 6, 0, 7, 8]],
+    ["a soak that starts on the way up", [0.5, 0.4, 0.5, 5, 5.5, 6]],
   ])("%s is one lowering", (_, depths) => {
     const cast = onlyCast(readText(`Depth (m),Temp (C),Sal\n${lowering("", depths)}`));
     expect(cast.samples.n).toBe(depths.length);
     expect(cast.issues).toEqual([]);
+  });
+
+  test("a lowering past midnight is one cast, of the day it began on", () => {
+    const rows = ["13T23:58:40,1", "13T23:59:20,2", "14T00:00:00,3", "14T00:00:40,4"];
+    const cast = onlyCast(
+      readText(`Site,DateTime,Depth (m),Temp\n${rows.map((row) => `A,2020-01-${row},10`).join("\n")}`),
+    );
+    expect(cast).toMatchObject({ time: "2020-01-13T23:58:40", samples: { n: 4 } });
+  });
+
+  test("the next morning is another day", () => {
+    const rows = ["13T23:58:40,1", "13T23:59:20,2", "14T06:00:00,1", "14T06:00:40,2"];
+    const text = `Site,DateTime,Depth (m),Temp\n${rows.map((row) => `A,2020-01-${row},10`).join("\n")}`;
+    expect(namesOf(text)).toEqual(["2020-01-13", "2020-01-14"]);
   });
 
   test("elapsed seconds are no clock", () => {
@@ -111,6 +127,12 @@ describe("times", () => {
     expect(reading.columns[0]!.role).toBeNull();
     expect(onlyCast(reading).time).toBeNull();
   });
+});
+
+test("a latitude that is none is not used, with a warning", () => {
+  const reading = readText("Lat,Lon,Depth (m),Temp (C)\n5130,-3,1,10\n5130,-3,2,10\n");
+  expect(onlyCast(reading)).toMatchObject({ latitudeDeg: null, longitudeDeg: -3 });
+  expect(issueOf(reading.issues, "off-the-earth").message).toContain("latitude 5130 is outside -90 to 90 degrees");
 });
 
 test("place is the middle of what the rows of a cast say", () => {

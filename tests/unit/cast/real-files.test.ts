@@ -149,7 +149,7 @@ describe("lake", () => {
     expect(codesOf(reading.issues)).toEqual([
       "assumed-unit-depth",
       "assumed-unit-temperature",
-      "assumed-unit-specificConductance",
+      "assumed-unit-specific-conductance",
     ]);
     expect(rolesOf(reading).specificConductance).toEqual(["spec_cond", "uS/cm"]);
     expect(reading.columns.filter((column) => column.header.startsWith("flag_")).every((c) => c.role === null)).toBe(
