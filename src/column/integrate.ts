@@ -61,16 +61,17 @@ function march(cast: Cast, basis: Basis, frame: ColumnFrame, record: Record): Kn
       const next = stretch.pressureDown(aboveDepthM, abovePressureDbar, along[k]!);
       const change = Math.abs(next - pressureDbar);
       pressureDbar = next;
-      if (!(change > 1e-11 * pressureDbar)) break;
+      if (!(change > 1e-12 * pressureDbar)) break;
     }
     seaPressureDbar[k] = pressureDbar;
+    takeSample(k, pressureDbar);
   }
   return { depthM, seaPressureDbar, practicalSalinity, inSituTempC, salinity, tempC };
 }
 
 /**
  * Integrates one cast by the physics contract: dp/dz = rho(S(z), T(z), p) g(latitude, z), p(0) = 0, or the same equation
- * solved for z where sea pressure was measured. Good to 1e-8 relative and in practice to 1e-11.
+ * solved for z where sea pressure was measured. Good to 1e-8 relative, in practice to 1e-10.
  * Fails only where no sample can be used; everything else it had to assume or leave out is among the issues.
  */
 export function integrateCast(cast: Cast, basis: Basis): Outcome<Column> {

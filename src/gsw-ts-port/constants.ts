@@ -7,6 +7,9 @@ export const SALINITY_UNIT = STANDARD_OCEAN_SALINITY / 35;
 /** Salinity at which the reduced root salinity sqrt(SA / SALINITY_SCALE) is 1, g/kg: that of SP 40. */
 export const SALINITY_SCALE = 40 * SALINITY_UNIT;
 
+/** One over SALINITY_SCALE as the standard's polynomials round it; more digits would change the last bits of results. */
+export const SALINITY_FACTOR = 0.0248826675584615;
+
 /** The fixed "heat capacity" that turns potential enthalpy into conservative temperature, J/(kg K). IOC et al. 2010, eq. 3.3.3. */
 export const CONSERVATIVE_HEAT_CAPACITY = 3991.86795711963;
 

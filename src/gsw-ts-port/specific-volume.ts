@@ -8,10 +8,9 @@
  * Nested with x inside y inside z. The order of operations is part of the contract: it is what makes the result equal
  * to the reference implementation to the last bit.
  */
-import { PA_PER_DBAR } from "./constants.ts";
+import { PA_PER_DBAR, SALINITY_FACTOR } from "./constants.ts";
 
-/** 1 / SALINITY_SCALE and 24 / SALINITY_SCALE as the fit prints them; more digits would change the last bits of v. */
-const SALINITY_FACTOR = 0.0248826675584615;
+/** 24 / SALINITY_SCALE as the fit prints it; more digits would change the last bits of v. */
 const SALINITY_OFFSET = 0.5971840214030754;
 const TEMPERATURE_FACTOR = 0.025;
 const PRESSURE_FACTOR = 1e-4;
