@@ -29,16 +29,18 @@ function counted(rows: MeasuredRows, found: readonly number[], issue: Found): re
 
 const isNaNAt = (values: Float64Array | null, i: number): boolean => values === null || Number.isNaN(values[i]!);
 
-function textIssues(rows: MeasuredRows, indices: ReadonlySet<number>): readonly Issue[] {
-  const found = rows.badCells.filter((cell) => indices.has(cell.rowIndex));
-  const issues = found.slice(0, LISTED_LINES).map(({ rowIndex, code, message }): Issue => {
-    const line = rows.lineIndex[rowIndex]!;
-    return { severity: "warning", code, message: `line ${line}: ${message}`, line };
-  });
-  const more = found.length - issues.length;
-  if (more > 0)
-    issues.push({ severity: "warning", code: "not-a-number", message: `${more} more cells are not numbers` });
-  return issues;
+function textIssues(rows: MeasuredRows, indices: readonly number[]): readonly Issue[] {
+  const found = indices.flatMap((i) =>
+    (rows.badCells.get(i) ?? []).map((cell) => ({ ...cell, line: rows.lineIndex[i]! })),
+  );
+  const listed = found
+    .slice(0, LISTED_LINES)
+    .map(
+      ({ code, message, line }): Issue => ({ severity: "warning", code, message: `line ${line}: ${message}`, line }),
+    );
+  const more = found.length - listed.length;
+  const message = `${more} more cells hold neither a number nor a time where one is expected`;
+  return more > 0 ? [...listed, { severity: "warning", code: "more-bad-cells", message }] : listed;
 }
 
 interface KeptRows {
@@ -61,7 +63,7 @@ function keepRows(rows: MeasuredRows, group: RowGroup): KeptRows {
   return {
     kept,
     issues: [
-      ...textIssues(rows, new Set(all)),
+      ...textIssues(rows, all),
       ...counted(rows, withoutDepth, { severity: "warning", code: "no-depth", what: `no ${word}; left out` }),
       ...counted(rows, withoutTemp, { severity: "warning", code: "no-temperature", what: "no temperature; left out" }),
       ...counted(rows, inAir, {

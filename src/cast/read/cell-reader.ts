@@ -2,14 +2,13 @@
 import type { Issue } from "../../base/index.ts";
 import { convert, type UnitSymbol } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
-import { ROLE_WORDS } from "./column-names.ts";
+import { type MeasuredRole, ROLE_WORDS } from "./column-names.ts";
 import type { FoundTable } from "./find-header.ts";
 import { isMissing, isSentinel, parseNumber } from "./parse-number.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
 
 /** A cell that should have held a number or a time and holds some other text. */
 export interface BadCell {
-  readonly rowIndex: number;
   readonly code: "not-a-number" | "not-a-time";
   readonly message: string;
 }
@@ -26,12 +25,11 @@ const OWN_UNIT = {
   latitude: "deg",
   longitude: "deg",
   distance: "km",
-} as const satisfies Partial<Record<ColumnRole, UnitSymbol>>;
-
-type NumberRole = keyof typeof OWN_UNIT;
+} as const satisfies Readonly<Record<MeasuredRole, UnitSymbol>>;
 
 export class CellReader {
-  readonly badCells: BadCell[] = [];
+  /** By row of the table. */
+  readonly badCells = new Map<number, BadCell[]>();
   readonly issues: Issue[] = [];
   readonly #table: FoundTable;
   readonly #columns: RecognisedColumns;
@@ -66,7 +64,7 @@ export class CellReader {
     return filled;
   }
 
-  numbers(role: NumberRole): Float64Array | null {
+  numbers(role: MeasuredRole): Float64Array | null {
     const column = this.#columns.used[role];
     const texts = this.texts(role);
     if (!column || texts === null) return null;
@@ -80,7 +78,7 @@ export class CellReader {
       const value = parseNumber(text, this.#columns.decimalMark);
       if (value !== null) return convert(value, from, OWN_UNIT[role]);
       const message = `${ROLE_WORDS[role]} "${text}" is not a number; expected a number or a blank`;
-      this.badCells.push({ rowIndex, code: "not-a-number", message });
+      this.#reject(rowIndex, { code: "not-a-number", message });
       return Number.NaN;
     });
     if (sentinels.length > 0) {
@@ -98,8 +96,14 @@ export class CellReader {
       const time = read(text);
       if (time !== null) return time;
       const message = `${ROLE_WORDS[role]} "${text}" is not understood; expected a form such as 2020-01-13 or 13:46`;
-      this.badCells.push({ rowIndex, code: "not-a-time", message });
+      this.#reject(rowIndex, { code: "not-a-time", message });
       return "";
     });
+  }
+
+  #reject(rowIndex: number, cell: BadCell): void {
+    const found = this.badCells.get(rowIndex);
+    if (found) found.push(cell);
+    else this.badCells.set(rowIndex, [cell]);
   }
 }

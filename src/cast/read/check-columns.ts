@@ -1,19 +1,19 @@
 /** What a table must have before casts can be made of it. */
 import type { Issue } from "../../base/index.ts";
-import type { ColumnRole } from "../reading.ts";
 import { askedUnitCode } from "./choose-unit.ts";
+import type { MeasuredRole } from "./column-names.ts";
 import type { FoundTable } from "./find-header.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
 
-const VERTICAL_ROLES: readonly ColumnRole[] = ["depth", "seaPressure"];
-const TEMPERATURE_ROLES: readonly ColumnRole[] = ["temperature"];
-const SALT_ROLES: readonly ColumnRole[] = ["practicalSalinity", "conductivity", "specificConductance"];
+const VERTICAL_ROLES: readonly MeasuredRole[] = ["depth", "seaPressure"];
+const TEMPERATURE_ROLES: readonly MeasuredRole[] = ["temperature"];
+const SALT_ROLES: readonly MeasuredRole[] = ["practicalSalinity", "conductivity", "specificConductance"];
 
-const hasOneOf = (columns: RecognisedColumns, roles: readonly ColumnRole[]): boolean =>
+const hasOneOf = (columns: RecognisedColumns, roles: readonly MeasuredRole[]): boolean =>
   roles.some((role) => columns.used[role] !== undefined);
 
 /** The questions about units that stand between us and any of the roles. */
-const askedAbout = (columns: RecognisedColumns, roles: readonly ColumnRole[]): readonly Issue[] =>
+const askedAbout = (columns: RecognisedColumns, roles: readonly MeasuredRole[]): readonly Issue[] =>
   columns.issues
     .filter((issue) => roles.some((role) => issue.code === askedUnitCode(role)))
     .map((issue) => ({ ...issue, severity: "error" }));
@@ -40,7 +40,7 @@ export function checkColumns(table: FoundTable, columns: RecognisedColumns): rea
     line: table.header.lineIndex,
   });
   /** A role that is needed: nothing when it is there, else the unit asked for, else the error given. */
-  const needed = (roles: readonly ColumnRole[], missing: Issue | null): readonly Issue[] => {
+  const needed = (roles: readonly MeasuredRole[], missing: Issue | null): readonly Issue[] => {
     if (hasOneOf(columns, roles)) return [];
     const asked = askedAbout(columns, roles);
     return asked.length > 0 || missing === null ? asked : [missing];

@@ -5,7 +5,7 @@
 import { max, median, min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
-import type { ColumnRole } from "../reading.ts";
+import type { MeasuredRole } from "./column-names.ts";
 
 export interface UnitChoice {
   /** null: no unit could be told, the issue says why. */
@@ -15,16 +15,16 @@ export interface UnitChoice {
 }
 
 export interface UnitlessColumn {
-  readonly role: ColumnRole;
+  readonly role: MeasuredRole;
   readonly header: string;
   /** The numbers of the column as written, without the missing ones; at least one. */
   readonly values: readonly number[];
 }
 
 /** The code of the issue that asks for a unit. */
-export const askedUnitCode = (role: ColumnRole): string => `no-unit-${kebab(role)}`;
+export const askedUnitCode = (role: MeasuredRole): string => `no-unit-${kebab(role)}`;
 
-const kebab = (role: ColumnRole): string => role.replace(/[A-Z]/g, (capital) => `-${capital.toLowerCase()}`);
+const kebab = (role: MeasuredRole): string => role.replace(/[A-Z]/g, (capital) => `-${capital.toLowerCase()}`);
 
 const shown = (value: number): string => String(Number(value.toPrecision(4)));
 
@@ -77,8 +77,7 @@ function distanceUnit(column: UnitlessColumn): UnitChoice {
   return assumed(column, "km", "distance without a unit is taken in kilometres", "warning");
 }
 
-/** null for roles that have no unit at all. */
-export function chooseUnit(column: UnitlessColumn): UnitChoice | null {
+export function chooseUnit(column: UnitlessColumn): UnitChoice {
   switch (column.role) {
     case "temperature":
       return temperatureUnit(column);
@@ -98,7 +97,5 @@ export function chooseUnit(column: UnitlessColumn): UnitChoice | null {
     case "latitude":
     case "longitude":
       return silent("deg", "in degrees");
-    default:
-      return null;
   }
 }

@@ -158,8 +158,10 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
   ],
 };
 
-/** What each role is measured in; roles that are text or time are not listed. */
-export const ROLE_KIND: Readonly<Partial<Record<ColumnRole, QuantityKind>>> = {
+/** Roles whose columns hold numbers with a unit; the others hold text or times. */
+export type MeasuredRole = Exclude<ColumnRole, "station" | "castName" | "date" | "clock" | "dateTime">;
+
+export const ROLE_KIND: Readonly<Record<MeasuredRole, QuantityKind>> = {
   depth: "length",
   seaPressure: "pressure",
   temperature: "temperature",
@@ -171,6 +173,8 @@ export const ROLE_KIND: Readonly<Partial<Record<ColumnRole, QuantityKind>>> = {
   longitude: "angle",
   distance: "length",
 };
+
+export const isMeasured = (role: ColumnRole): role is MeasuredRole => role in ROLE_KIND;
 
 export const ROLE_WORDS: Readonly<Record<ColumnRole, string>> = {
   depth: "depth",

@@ -1,6 +1,6 @@
 /** A column that could have a role by its name, before it is compared with others of the same role. */
 import type { ColumnRole } from "../reading.ts";
-import { ROLE_KIND } from "./column-names.ts";
+import { isMeasured, ROLE_KIND } from "./column-names.ts";
 import type { FoundTable } from "./find-header.ts";
 import { isMissing } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseDateTime } from "./parse-time.ts";
@@ -38,8 +38,7 @@ export function contenderOf(table: FoundTable, columnIndex: number): Contender |
   if (meaning === null) return null;
   const filled = table.rows.map((row) => row.cells[columnIndex] ?? "").filter((cell) => !isMissing(cell));
   const role = roleByContent(meaning.role, filled);
-  const kind = ROLE_KIND[role];
-  const fromRow = kind === undefined ? null : writtenUnit([table.unitTexts[columnIndex]!], kind);
+  const fromRow = isMeasured(role) ? writtenUnit([table.unitTexts[columnIndex]!], ROLE_KIND[role]) : null;
   const isInHeader = meaning.written !== null && (meaning.written.unit !== null || fromRow === null);
   return {
     columnIndex,

@@ -3,7 +3,7 @@ import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
 import type { ColumnReading } from "../reading.ts";
 import { askedUnitCode, chooseUnit } from "./choose-unit.ts";
-import { ROLE_KIND, ROLE_WORDS } from "./column-names.ts";
+import { isMeasured, type MeasuredRole, ROLE_WORDS } from "./column-names.ts";
 import { type Contender, TELLING_CELLS } from "./contender.ts";
 import { type DecimalMark, isSentinel, parseNumber } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
@@ -60,46 +60,40 @@ export function passOver(loser: Contender, winner: Contender): Decision {
 
 /** Of the only, or the best, column for a role. */
 export function decide(contender: Contender, decimalMark: DecimalMark): Decision {
-  const { role, written } = contender;
+  const { role, written, filled } = contender;
   const words = ROLE_WORDS[role];
-  if (contender.filled.length === 0) return leave(contender, `named as ${words}, but empty`);
-  if (ROLE_KIND[role] === undefined) return decideText(contender);
-  if (written === null) return decideByRule(contender, decimalMark);
-  if (written.unit === null) return askForUnit(contender, `"${written.text}" is no unit of ${words} known here`);
-  return decideByUnit(contender, written.unit.symbol);
+  if (filled.length === 0) return leave(contender, `named as ${words}, but empty`);
+  if (!isMeasured(role)) return decideText(contender);
+  if (written === null) return decideByRule(contender, role, decimalMark);
+  if (written.unit !== null) return decideByUnit(contender, written.unit.symbol);
+  const why = `"${written.text}" is no unit of ${words} known here`;
+  const message = `"${contender.header}": ${why}; write a unit that is known, or take the column out`;
+  return leave(contender, why, { severity: "warning", code: askedUnitCode(role), message });
 }
 
 /** Text is taken as it is; a column of times must hold times, which seconds since the start are not. */
 function decideText(contender: Contender): Decision {
   const { role } = contender;
+  if (role === "station" || role === "castName") return use(contender, null, "taken as written");
+  if (role === "date") return use(contender, null, "its cells tell the days apart");
   const telling = contender.filled.slice(0, TELLING_CELLS);
   const { order } = dateOrderOf(telling.map(datePart));
   const isRead = (cell: string) => (role === "clock" ? parseClock(cell) : parseDateTime(cell, order)) !== null;
-  const isTime = role === "clock" || role === "dateTime";
-  if (isTime && telling.filter(isRead).length < telling.length / 2) {
-    return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds texts such as "${telling[0]}"`);
-  }
-  return use(contender, null, isTime || role === "date" ? "its cells read as such" : "taken as written");
+  if (telling.filter(isRead).length >= telling.length / 2) return use(contender, null, "its cells read as such");
+  return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds texts such as "${telling[0]}"`);
 }
 
-function decideByRule(contender: Contender, decimalMark: DecimalMark): Decision {
-  const { role, header } = contender;
+function decideByRule(contender: Contender, role: MeasuredRole, decimalMark: DecimalMark): Decision {
   const values = contender.filled
     .filter((cell) => !isSentinel(role, cell))
     .map((cell) => parseNumber(cell, decimalMark))
     .filter((value) => value !== null);
   if (values.length === 0) return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds no numbers`);
-  const choice = chooseUnit({ role, header, values })!;
-  const issues = choice.issue === null ? [] : [choice.issue];
-  return choice.unit === null
-    ? leave(contender, `named as ${ROLE_WORDS[role]}; ${choice.reason}`, ...issues)
-    : use(contender, choice.unit, choice.reason, ...issues);
-}
-
-function askForUnit(contender: Contender, why: string): Decision {
-  const message = `"${contender.header}": ${why}; write a unit that is known, or take the column out`;
-  const issue: Issue = { severity: "warning", code: askedUnitCode(contender.role), message };
-  return leave(contender, why, issue);
+  const { unit, reason, issue } = chooseUnit({ role, header: contender.header, values });
+  const issues = issue === null ? [] : [issue];
+  return unit === null
+    ? leave(contender, `named as ${ROLE_WORDS[role]}; ${reason}`, ...issues)
+    : use(contender, unit, reason, ...issues);
 }
 
 /** Barometers read in these. */
@@ -107,14 +101,11 @@ const AIR_UNITS: readonly UnitSymbol[] = ["mmHg", "hPa", "atm"];
 
 function decideByUnit(contender: Contender, unit: UnitSymbol): Decision {
   const { role, header, unitSource } = contender;
-  if (role === "seaPressure" && AIR_UNITS.includes(unit))
+  if (role === "seaPressure" && AIR_UNITS.includes(unit)) {
     return leave(contender, `${unit} is how barometers read the air`);
-  const why = `${unit === "1" ? "its unit" : unit} is given in ${unitSource}`;
-  const warn = (code: string, message: string): Decision =>
-    use(contender, unit, why, { severity: "warning", code, message });
-  if (role === "practicalSalinity" && unit === "g/kg") {
-    const message = `"${header}" is in g/kg and read as practical salinity; if it is absolute salinity, it is 0.5 % too high`;
-    return warn("salinity-in-g-kg", message);
   }
-  return use(contender, unit, why);
+  const why = `${unit === "1" ? "its unit" : unit} is given in ${unitSource}`;
+  if (role !== "practicalSalinity" || unit !== "g/kg") return use(contender, unit, why);
+  const message = `"${header}" is in g/kg and read as practical salinity; if it is absolute salinity, it is 0.5 % too high`;
+  return use(contender, unit, why, { severity: "warning", code: "salinity-in-g-kg", message });
 }

@@ -1,6 +1,6 @@
 /** Finds the delimiter, the header row and a row of units below it: whichever delimiter makes most sense of a header. */
 import { unitByName } from "../../units/index.ts";
-import { ROLE_KIND } from "./column-names.ts";
+import { isMeasured, ROLE_KIND } from "./column-names.ts";
 import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withoutCommentSign } from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
 
@@ -73,8 +73,7 @@ function unitsIn(header: Row, below: Row | undefined): readonly string[] | null 
   const texts = header.cells.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
   const isUnits = header.cells.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
-    const kind = role === undefined ? undefined : ROLE_KIND[role];
-    return kind !== undefined && unitByName(texts[i]!, kind) !== null;
+    return role !== undefined && isMeasured(role) && unitByName(texts[i]!, ROLE_KIND[role]) !== null;
   });
   return isUnits ? texts : null;
 }

@@ -26,7 +26,8 @@ export interface MeasuredRows {
   readonly dateKey: readonly string[] | null;
   /** HH:MM or HH:MM:SS; empty where unreadable. */
   readonly clock: readonly string[] | null;
-  readonly badCells: readonly BadCell[];
+  /** By row. */
+  readonly badCells: ReadonlyMap<number, readonly BadCell[]>;
   /** About the file as a whole. */
   readonly issues: readonly Issue[];
 }

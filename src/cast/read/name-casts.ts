@@ -15,16 +15,23 @@ const withNoun = (noun: string, text: string): string => {
 
 const isVaried = (texts: readonly (string | null)[]): boolean => new Set(texts).size > 1;
 
+function countsOf(names: readonly string[]): ReadonlyMap<string, number> {
+  const counts = new Map<string, number>();
+  for (const name of names) counts.set(name, (counts.get(name) ?? 0) + 1);
+  return counts;
+}
+
 /** Makes equal names different, by time of day where that does it, else by counting. */
 function madeUnique(names: readonly string[], casts: readonly NameParts[]): readonly string[] {
-  const isShared = (all: readonly string[], name: string) => all.filter((other) => other === name).length > 1;
+  const uses = countsOf(names);
   const timed = names.map((name, i) => {
     const clock = casts[i]!.clock?.slice(0, 5);
-    return clock && isShared(names, name) ? `${name}, ${clock}` : name;
+    return clock && uses.get(name)! > 1 ? `${name}, ${clock}` : name;
   });
+  const timedUses = countsOf(timed);
   const seen = new Map<string, number>();
   return timed.map((name) => {
-    if (!isShared(timed, name)) return name;
+    if (timedUses.get(name) === 1) return name;
     const count = (seen.get(name) ?? 0) + 1;
     seen.set(name, count);
     return `${name} (${count})`;
@@ -34,16 +41,15 @@ function madeUnique(names: readonly string[], casts: readonly NameParts[]): read
 /** One name a cast, all different. */
 export function nameCasts(casts: readonly NameParts[], fileName: string): readonly string[] {
   const hasStations = isVaried(casts.map((cast) => cast.station));
+  const hasLowerings = isVaried(casts.map((cast) => cast.castName));
   const hasDates = isVaried(casts.map((cast) => cast.date));
-  const names = casts.map((cast) => {
-    const station = cast.station === null ? null : withNoun("Station", cast.station);
-    const lowering = cast.castName === null ? null : withNoun("Cast", cast.castName);
+  const names = casts.map(({ station, castName, date }) => {
     const parts = [
-      hasStations || !hasDates ? station : null,
-      station !== null && !isVaried(casts.map((other) => other.castName)) ? null : lowering,
-      hasDates ? cast.date : null,
+      station !== null && (hasStations || !hasDates) ? withNoun("Station", station) : null,
+      castName !== null && (hasLowerings || station === null) ? withNoun("Cast", castName) : null,
+      hasDates ? date : null,
     ].filter((part) => part !== null);
-    return parts.join(", ") || station || lowering || cast.date || baseName(fileName);
+    return parts.join(", ") || date || baseName(fileName);
   });
   return madeUnique(names, casts);
 }

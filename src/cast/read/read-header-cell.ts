@@ -1,7 +1,7 @@
 /** What one header says by itself: which role its name has, and the unit written in it. */
 import { type QuantityKind, type Unit, unitByName } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
-import { COLUMN_NAMES, ROLE_KIND } from "./column-names.ts";
+import { COLUMN_NAMES, isMeasured, ROLE_KIND } from "./column-names.ts";
 
 /** A unit as written; `unit` is null when the text names none of the kind that is needed. */
 export interface WrittenUnit {
@@ -65,8 +65,8 @@ function meaningOf(name: string, unitTexts: readonly string[], header: string): 
   if (found === null) return null;
   if (found.role === "clock" && unitTexts.some((text) => ELAPSED.test(text.trim()))) return null;
   const role = found.role === "conductivity" && AT_25.test(header) ? "specificConductance" : found.role;
-  const kind = ROLE_KIND[role];
-  return { role, rankIndex: found.rankIndex, written: kind === undefined ? null : writtenUnit(unitTexts, kind) };
+  const written = isMeasured(role) ? writtenUnit(unitTexts, ROLE_KIND[role]) : null;
+  return { role, rankIndex: found.rankIndex, written };
 }
 
 const BRACKETS = /[([{<]([^)\]}>]*)[)\]}>]/g;
@@ -78,11 +78,15 @@ function bracketed(header: string): HeaderMeaning | null {
   return meaningOf(header.replace(BRACKETS, " "), [...inside, ...inside.flatMap((text) => text.split(/[,;]/))], header);
 }
 
-/** "Depth.feet", "temp_C", "depth, m", "spec_cond_uS_cm": the last one to three words are the unit. */
+/** "Depth.feet", "temp_C", "TempC", "Depth in m", "spec_cond_uS_cm": the last one to three words are the unit. */
 function trailing(header: string): HeaderMeaning | null {
-  const words = header.split(/[\s_.,:/-]+/).filter((word) => word !== "");
+  const words = header
+    .replace(/([a-z])([A-Z])/g, "$1 $2")
+    .split(/[\s_.,:/-]+/)
+    .filter((word) => word !== "");
   for (let count = 1; count <= 3 && count < words.length; count++) {
-    const meaning = meaningOf(words.slice(0, -count).join(" "), [words.slice(-count).join(" ")], header);
+    const name = words.slice(0, -count).join(" ").replace(/ in$/i, "");
+    const meaning = meaningOf(name, [words.slice(-count).join(" ")], header);
     if (meaning?.written?.unit) return meaning;
   }
   return null;

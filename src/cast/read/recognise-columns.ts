@@ -2,7 +2,7 @@
 import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
 import type { ColumnReading, ColumnRole } from "../reading.ts";
-import { COLUMN_NAMES, ROLE_KIND } from "./column-names.ts";
+import { COLUMN_NAMES, isMeasured } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
 import { type Decision, decide, passOver, whyUnused } from "./decide-column.ts";
 import type { FoundTable } from "./find-header.ts";
@@ -41,7 +41,7 @@ function winnersOf(contenders: readonly Contender[]): ReadonlyMap<ColumnRole, Co
 export function recogniseColumns(table: FoundTable): RecognisedColumns {
   const all = table.header.cells.map((_, columnIndex) => contenderOf(table, columnIndex));
   const contenders = all.filter((contender) => contender !== null);
-  const measured = contenders.filter((contender) => ROLE_KIND[contender.role] !== undefined);
+  const measured = contenders.filter((contender) => isMeasured(contender.role));
   const decimalMark = decimalMarkOf(measured.flatMap((contender) => contender.filled));
   const winners = winnersOf(contenders);
   const decisions = all.map((contender, columnIndex): Decision => {
