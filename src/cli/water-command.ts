@@ -61,15 +61,11 @@ export async function waterCommand(host: Host, args: readonly string[]): Promise
   host.out(
     csvText(
       [...head, ...added.map(([name]) => name)].map((name) => ({ name })),
-      rows.map((row, i) => [...head.map((_, c) => passedThrough(row[c])), ...added.map(([, values]) => values[i]!)]),
+      rows.map((row, i) => [...head.map((_, c) => row[c] ?? null), ...added.map(([, values]) => values[i]!)]),
     ),
   );
   return faulty ? EXIT.badInput : EXIT.done;
 }
-
-/** A number goes out as it came in; only what is no number is text to a spreadsheet. */
-const passedThrough = (cell: string | undefined): string | number | null =>
-  cell === undefined || cell === "" ? null : Number.isFinite(Number(cell)) ? Number(cell) : cell;
 
 async function readTable(
   host: Host,

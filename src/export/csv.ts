@@ -1,13 +1,14 @@
 /** A cell of a table: text, a number at full double precision, or nothing. */
 export type Cell = string | number | null;
 
-/** What a spreadsheet would run as a formula if a cell began with it. */
+/** What a spreadsheet would run as a formula if a cell began with it and were no plain number. */
 const FORMULA_START = /^[=+\-@\t\r]/;
 
 function cellText(cell: Cell): string {
   if (cell === null || (typeof cell === "number" && !Number.isFinite(cell))) return "";
   if (typeof cell === "number") return String(cell);
-  const harmless = FORMULA_START.test(cell) ? `'${cell}` : cell;
+  const isFormula = FORMULA_START.test(cell) && !Number.isFinite(Number(cell));
+  const harmless = isFormula ? `'${cell}` : cell;
   return /[",\r\n]/.test(harmless) ? `"${harmless.replaceAll('"', '""')}"` : harmless;
 }
 
