@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { expectConverted } from "./converted.ts";
 import { codesOf, errorsOf, issueOf, onlyCast, readText, rolesOf } from "./reading.ts";
 
 /** Rows below the given headers; unless they are given, two of 1 in every column but for the first, which goes on to 2. */
@@ -97,15 +98,15 @@ describe("values move into the units of the program", () => {
     );
     const { samples, distanceKm } = onlyCast(readText(text));
     expect([...samples.depthM!]).toEqual([3.048, 6.096]);
-    expect(samples.seaPressureDbar![0]).toBeCloseTo(2.989, 12);
-    expect(samples.inSituTempC[1]).toBeCloseTo(5, 12);
-    expect(samples.conductivityMsCm![0]).toBeCloseTo(35, 12);
-    expect(distanceKm).toBeCloseTo(3.218688, 12);
+    expectConverted(samples.seaPressureDbar![0], 2.989);
+    expectConverted(samples.inSituTempC[1], 5);
+    expectConverted(samples.conductivityMsCm![0], 35);
+    expectConverted(distanceKm, 3.218688);
   });
 
   test("IPTS-68 becomes ITS-90 by t68 = 1.00024 t90", () => {
     const text = table(["Depth (m)", "Temp (IPTS-68)", "Sal"], [1, 15.0036, 30], [2, 10.0024, 31]);
-    expect(onlyCast(readText(text)).samples.inSituTempC[0]).toBeCloseTo(15, 12);
+    expectConverted(onlyCast(readText(text)).samples.inSituTempC[0], 15);
   });
 });
 

@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { expectConverted } from "./converted.ts";
 import { onlyCast, readBytes, readText } from "./reading.ts";
 
 const LINES = ["Depth (m),Temperature (°C),Salinity", "0.5,12.25,3.5", "1,12,4", "1.5,11.75,20.5"];
@@ -150,7 +151,7 @@ describe("what stands around the table", () => {
     const reading = readText("depth,temp,sal\n[ft],[deg F],[psu]\n10,50,1\n20,41,2\n");
     const { samples } = onlyCast(reading);
     expect([...samples.depthM!]).toEqual([3.048, 6.096]);
-    expect(samples.inSituTempC[0]).toBeCloseTo(10, 12);
+    expectConverted(samples.inSituTempC[0], 10);
   });
 
   test("headers repeated further down, as where files were joined, are passed over", () => {

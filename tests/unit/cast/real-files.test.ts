@@ -1,6 +1,7 @@
 import { createHash } from "node:crypto";
 import { readdirSync } from "node:fs";
 import { describe, expect, test } from "vitest";
+import { expectConverted } from "./converted.ts";
 import { bytesOfFile, codesOf, errorsOf, readDataFile, rolesOf } from "./reading.ts";
 
 // First and last samples are copied by eye from the files; counts are those of tests/data/README.md.
@@ -121,8 +122,8 @@ describe("ship channel", () => {
     const { samples, ...cast } = reading.casts[0]!;
     expect(cast).toMatchObject({ name: "Station 16, 2016-06-30", station: "16", time: "2016-06-30T07:40:55" });
     expect(samples.n).toBe(14);
-    expect(samples.depthM?.[0]).toBeCloseTo(1.891 * 0.3048, 12);
-    expect(samples.depthM?.at(-1)).toBeCloseTo(32.064 * 0.3048, 12);
+    expectConverted(samples.depthM?.[0], 1.891 * 0.3048);
+    expectConverted(samples.depthM?.at(-1), 32.064 * 0.3048);
     expect([samples.specificConductanceMsCm?.[0], samples.inSituTempC[0]]).toEqual([0.148, 22.93]);
     expect(samples.conductivityMsCm).toBeNull();
     expect(samples.practicalSalinity).toBeNull();
@@ -131,7 +132,7 @@ describe("ship channel", () => {
   test("keeps the last sample", () => {
     const { samples, station } = reading.casts.at(-1)!;
     expect(station).toBe("WSP");
-    expect(samples.depthM?.at(-1)).toBeCloseTo(13.539 * 0.3048, 12);
+    expectConverted(samples.depthM?.at(-1), 13.539 * 0.3048);
     expect([samples.inSituTempC.at(-1), samples.specificConductanceMsCm?.at(-1)]).toEqual([17.19, 0.663]);
   });
 });
