@@ -45,6 +45,13 @@ export class CellReader {
     return column ? this.#table.rows.map((row) => row.cells[column.columnIndex] ?? "") : null;
   }
 
+  /** The header and the unit of a column, as written; empty where there is no such column. */
+  nameOf(role: ColumnRole): string {
+    const column = this.#columns.used[role];
+    if (!column) return "";
+    return `${this.#table.header.cells[column.columnIndex]} ${this.#table.unitTexts[column.columnIndex]}`;
+  }
+
   /** As `texts`; a blank takes the text above it, as where a sheet writes the station once and leaves it out below. */
   textsFilledDown(role: ColumnRole): readonly string[] | null {
     const texts = this.texts(role);

@@ -75,6 +75,7 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "ctdconductivity",
     "ctdcond",
     "actualconductivity",
+    "actualcond",
     "rawconductivity",
     "conductivity",
     "cond",

@@ -29,7 +29,7 @@ const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
   [/^$/, "it has no name"],
   [/flag|(^|[\W_])q[cf]($|[\W_])|quality/i, "a flag about another column"],
   [/discrete|bottle/i, "single water samples, not the probe"],
-  [/(air|atmos\w*|baro\w*)[\W_]*(press|$)/i, "pressure of the air"],
+  [/baro|(air|atmos\w*)[\W_]*press/i, "pressure of the air"],
   [/abs\w*[\W_]*press/i, "absolute pressure holds the pressure of the air, sea pressure is needed"],
   [/abs\w*[\W_]*sal/i, "absolute salinity, practical salinity is needed"],
   [/potential|conservative|theta/i, "temperature in situ is needed"],
@@ -88,7 +88,11 @@ function decideByRule(contender: Contender, role: MeasuredRole, decimalMark: Dec
     .filter((cell) => !isSentinel(role, cell))
     .map((cell) => parseNumber(cell, decimalMark))
     .filter((value) => value !== null);
-  if (values.length === 0) return leave(contender, `named as ${ROLE_WORDS[role]}, but it holds no numbers`);
+  if (values.length === 0) {
+    const why = `named as ${ROLE_WORDS[role]}, but it holds no numbers`;
+    const message = `"${contender.header}" is ${why}, only texts such as "${contender.filled[0]}"; it is not used`;
+    return leave(contender, why, { severity: "warning", code: "no-numbers", message });
+  }
   const { unit, reason, issue } = chooseUnit({ role, header: contender.header, values });
   const issues = issue === null ? [] : [issue];
   return unit === null

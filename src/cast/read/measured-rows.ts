@@ -2,7 +2,7 @@
 import type { Issue } from "../../base/index.ts";
 import { type BadCell, CellReader } from "./cell-reader.ts";
 import type { FoundTable } from "./find-header.ts";
-import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
+import { dateOrderOf, datePart, orderInName, parseClock, parseDateTime } from "./parse-time.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
 
 export interface MeasuredRows {
@@ -55,8 +55,10 @@ function readTimes(reader: CellReader): Times {
   const dateTexts = reader.textsFilledDown("date");
   const momentTexts = reader.texts("dateTime");
   const clockTexts = reader.texts("clock");
-  const { order, assumed } = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
-  if (assumed) reader.issues.push(ASSUMED_ORDER);
+  const told = orderInName(`${reader.nameOf("date")} ${reader.nameOf("dateTime")}`);
+  const found = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
+  if (found.assumed && told === null) reader.issues.push(ASSUMED_ORDER);
+  const order = found.assumed ? (told ?? found.order) : found.order;
   const momentOf = remembered((text) => parseDateTime(text, order));
   const dateOf = (text: string) => momentOf(text)?.date ?? null;
   const clockOf = (text: string) => momentOf(text)?.clock ?? "";

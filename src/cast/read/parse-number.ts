@@ -21,14 +21,3 @@ export function parseNumber(text: string, decimalMark: DecimalMark): number | nu
   if (!NUMBER[decimalMark].test(plain)) return null;
   return Number(plain.replace(",", "."));
 }
-
-/** The decimal mark of a table, told from the cells that show one. */
-export function decimalMarkOf(cells: Iterable<string>): DecimalMark {
-  let commas = 0;
-  let points = 0;
-  for (const cell of cells) {
-    if (/^[-+−]?\d*,\d+$/.test(cell)) commas += 1;
-    else if (/^[-+−]?\d*\.\d+$/.test(cell)) points += 1;
-  }
-  return commas > points ? "," : ".";
-}

@@ -25,6 +25,12 @@ function isoDate(year: number, month: number, day: number): string | null {
   return month >= 1 && month <= 12 && day >= 1 && day <= lastDay ? `${year}-${two(month)}-${two(day)}` : null;
 }
 
+/** The order that a header such as "Date (MM/DD/YYYY)" spells out. */
+export function orderInName(text: string): SlashOrder | null {
+  if (/\bm{1,3}[/.-]d{1,2}[/.-]y{2,4}\b/i.test(text)) return "month-first";
+  return /\bd{1,2}[/.-]m{1,3}[/.-]y{2,4}\b/i.test(text) ? "day-first" : null;
+}
+
 /** Day first or month first, for a whole column; points between the figures always mean day first. */
 export function dateOrderOf(texts: Iterable<string>): DateOrder {
   let order: SlashOrder | null = null;

@@ -47,7 +47,7 @@ const REMARK =
 const AT_25 = /(@|\bat\b|\bref\b|\b)\s*25\s*[°º]?\s*(deg)?\s*_?c\b/i;
 
 /** A column of seconds or days that have gone by is no clock. */
-const ELAPSED = /^(s|secs?|seconds?|min|mins|minutes?|h|hrs?|hours?|days?|days since .*|seconds since .*)$/i;
+const ELAPSED = /^[^:]*\b(s|secs?|seconds?|mins?|minutes?|h|hrs?|hours?|days?)\b[^:]*$/i;
 
 /** The first of the texts that is a unit of the kind, else the first that is no mere remark. */
 export function writtenUnit(texts: readonly string[], kind: QuantityKind): WrittenUnit | null {

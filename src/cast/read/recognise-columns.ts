@@ -5,10 +5,11 @@ import type { ColumnReading, ColumnRole } from "../reading.ts";
 import { COLUMN_NAMES, isMeasured } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
 import { type Decision, decide, passOver, whyUnused } from "./decide-column.ts";
+import { decimalMarkOf } from "./decimal-mark.ts";
 import type { FoundTable } from "./find-header.ts";
-import { type DecimalMark, decimalMarkOf } from "./parse-number.ts";
+import type { DecimalMark } from "./parse-number.ts";
 
-export interface UsedColumn {
+interface UsedColumn {
   readonly columnIndex: number;
   /** null for text and times. */
   readonly unit: UnitSymbol | null;
@@ -20,6 +21,12 @@ export interface RecognisedColumns {
   readonly decimalMark: DecimalMark;
   readonly issues: readonly Issue[];
 }
+
+const ASSUMED_COMMA: Issue = {
+  severity: "warning",
+  code: "assumed-decimal-comma",
+  message: "every comma stands before three digits; it is read as the decimal mark; if it parts thousands, take it out",
+};
 
 /** Better first: one with values, the better name, a stated unit, the place in the file. */
 const byMerit = (a: Contender, b: Contender): number =>
@@ -42,7 +49,8 @@ export function recogniseColumns(table: FoundTable): RecognisedColumns {
   const all = table.header.cells.map((_, columnIndex) => contenderOf(table, columnIndex));
   const contenders = all.filter((contender) => contender !== null);
   const measured = contenders.filter((contender) => isMeasured(contender.role));
-  const decimalMark = decimalMarkOf(measured.flatMap((contender) => contender.filled));
+  const cells = measured.flatMap((contender) => contender.filled);
+  const { mark: decimalMark, assumed } = decimalMarkOf(cells, table.delimiter.character);
   const winners = winnersOf(contenders);
   const decisions = all.map((contender, columnIndex): Decision => {
     if (contender === null) return whyUnused(columnIndex, table.header.cells[columnIndex]!);
@@ -58,6 +66,6 @@ export function recogniseColumns(table: FoundTable): RecognisedColumns {
     used,
     readings: decisions.map((decision) => decision.reading),
     decimalMark,
-    issues: decisions.flatMap((decision) => decision.issues),
+    issues: [...(assumed ? [ASSUMED_COMMA] : []), ...decisions.flatMap((decision) => decision.issues)],
   };
 }

@@ -203,6 +203,11 @@ describe("units that the file does not give", () => {
     expect(errors[0]!.message).toContain(`"${text}" is no unit of depth known here`);
   });
 
+  test("a column that holds texts alone is not used, with a warning", () => {
+    const reading = readText(table(["Depth (m)", "Temp (C)", "Lat"], [1, 9, "38 02.5 N"], [2, 9, "38 02.5 N"]));
+    expect(issueOf(reading.issues, "no-numbers").message).toContain('"38 02.5 N"');
+  });
+
   test("a remark in brackets is no unit", () => {
     expect(readText(table(["Depth (below surface)", "Temp (C)", "Sal"])).columns[0]).toMatchObject({
       role: "depth",

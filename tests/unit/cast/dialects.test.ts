@@ -101,6 +101,24 @@ describe("delimiters and decimal marks", () => {
     expectTheCast(readText("Depth, m;Temp, C;Sal\n0,5;12,25;3,5\n1;12;4\n1,5;11,75;20,5"));
   });
 
+  test("a quoted comma before three digits between commas is named, never read as a decimal", () => {
+    const { samples, issues } = onlyCast(readText('Depth (m),Temp (C),SpCond (uS/cm)\n1,12,"1,234"\n2,12,"1,240"\n'));
+    expect([...samples.specificConductanceMsCm!]).toEqual([Number.NaN, Number.NaN]);
+    expect(issues[0]!.message).toBe(
+      'line 2: specific conductance "1,234" is not a number; expected a number or a blank',
+    );
+  });
+
+  test("nothing but commas before three digits between semicolons is a decimal comma, with a warning", () => {
+    const reading = readText("Depth (m);Temp (C);Sal\n1;12,345;30,125\n2;12,340;30,130\n");
+    expect(onlyCast(reading).samples.inSituTempC[0]).toBe(12.345);
+    expect(reading.issues.map((issue) => issue.code)).toEqual(["assumed-decimal-comma"]);
+  });
+
+  test("one comma that can only be a decimal mark settles it", () => {
+    expect(readText("Depth (m);Temp (C);Sal\n0,5;12,345;30,125\n1;12,340;30,130\n").issues).toEqual([]);
+  });
+
   test("exponents, plus signs and true minus signs are numbers", () => {
     const { samples } = onlyCast(readText("Depth (m),Temp (C),Sal\n5e-1,−1.5,+31\n1.0E0,-1.25,3.1e1\n"));
     expect([...samples.depthM!]).toEqual([0.5, 1]);

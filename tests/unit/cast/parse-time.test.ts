@@ -47,6 +47,15 @@ describe("dates", () => {
   });
 });
 
+test.each([
+  ["Date (MM/DD/YYYY)", "2017-02-08"],
+  ["Date (dd/mm/yy)", "2017-08-02"],
+])("a header that spells out the order is believed where the dates do not tell: %s", (header, time) => {
+  const reading = readText(`${header},Depth (m),Temp (C),Sal\n2/8/17,1,10,30\n2/8/17,2,10,30\n`);
+  expect(reading.casts[0]!.time).toBe(time);
+  expect(reading.issues).toEqual([]);
+});
+
 describe("times of day", () => {
   test.each([
     ["629", "06:29"],
