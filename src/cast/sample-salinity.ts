@@ -2,35 +2,32 @@ import { practicalSalinityFromConductivity } from "../gsw-ts-port/index.ts";
 import { practicalSalinityFromSpecificConductance } from "../water/index.ts";
 import type { Samples } from "./cast.ts";
 
-/** Where a cast's salinity comes from, best first; `basis` when the probe measured none. */
-export type SalinitySource = "practicalSalinity" | "conductivity" | "specificConductance" | "basis";
-
-export function salinitySource(samples: Samples): SalinitySource {
-  if (samples.practicalSalinity) return "practicalSalinity";
-  if (samples.conductivityMsCm) return "conductivity";
-  if (samples.specificConductanceMsCm) return "specificConductance";
-  return "basis";
+/** How a cast's samples get their practical salinity. */
+export interface SampleSalinity {
+  /** What was measured, best first; `basis` when the probe measured none of them. */
+  readonly source: "practicalSalinity" | "conductivity" | "specificConductance" | "basis";
+  /** Practical salinity of a sample; conductivity needs the sea pressure there, the others do not. NaN where missing. */
+  readonly at: (sampleIndex: number, seaPressureDbar: number) => number;
 }
 
-/**
- * Practical salinity of one sample. Conductivity needs the sea pressure at the sample; the others do not use it.
- * @param unmeasuredPracticalSalinity what the basis says where the probe measured none
- * @returns NaN where the sample has no value
- */
-export function samplePracticalSalinity(
-  samples: Samples,
-  sampleIndex: number,
-  seaPressureDbar: number,
-  unmeasuredPracticalSalinity: number,
-): number {
-  if (samples.practicalSalinity) return samples.practicalSalinity[sampleIndex]!;
-  if (samples.conductivityMsCm)
-    return practicalSalinityFromConductivity(
-      samples.conductivityMsCm[sampleIndex]!,
-      samples.inSituTempC[sampleIndex]!,
-      seaPressureDbar,
-    );
-  if (samples.specificConductanceMsCm)
-    return practicalSalinityFromSpecificConductance(samples.specificConductanceMsCm[sampleIndex]!);
-  return unmeasuredPracticalSalinity;
+/** A column of which this cast has not one value counts as not measured. */
+const measured = (values: Float64Array | null): values is Float64Array =>
+  values?.some((value) => !Number.isNaN(value)) ?? false;
+
+/** @param unmeasuredPracticalSalinity what the basis says where the probe measured none */
+export function sampleSalinity(samples: Samples, unmeasuredPracticalSalinity: number): SampleSalinity {
+  const { practicalSalinity, conductivityMsCm, specificConductanceMsCm, inSituTempC } = samples;
+  if (measured(practicalSalinity)) return { source: "practicalSalinity", at: (i) => practicalSalinity[i]! };
+  if (measured(conductivityMsCm))
+    return {
+      source: "conductivity",
+      at: (i, seaPressureDbar) =>
+        practicalSalinityFromConductivity(conductivityMsCm[i]!, inSituTempC[i]!, seaPressureDbar),
+    };
+  if (measured(specificConductanceMsCm))
+    return {
+      source: "specificConductance",
+      at: (i) => practicalSalinityFromSpecificConductance(specificConductanceMsCm[i]!),
+    };
+  return { source: "basis", at: () => unmeasuredPracticalSalinity };
 }

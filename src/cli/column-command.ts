@@ -13,7 +13,8 @@ import { addCasts, emptySurvey, type SolvedCast, type Survey, solve } from "../s
 import { columnOptions } from "./column-options.ts";
 import { columnText } from "./column-text.ts";
 import { castFileNames } from "./file-names.ts";
-import { EXIT, type ExitCode, type Host, issueLine } from "./host.ts";
+import { EXIT, type ExitCode, type Host } from "./host.ts";
+import { castIssueLines, issueLine } from "./issue-lines.ts";
 import { readCastFiles } from "./read-files.ts";
 import { COLUMN_USAGE } from "./usage.ts";
 
@@ -31,8 +32,15 @@ export async function columnCommand(host: Host, args: readonly string[]): Promis
     if (reading.ok) survey = addCasts(survey, reading.value.casts);
   }
   const solved = solve(survey);
-  for (const { cast, issues } of solved)
-    for (const issue of issues) host.err(issueLine(`${cast.fileName}: ${cast.name}`, issue));
+  for (const path of new Set(options.files)) {
+    const own = solved.filter(({ cast }) => cast.fileName === path);
+    host.err(
+      castIssueLines(
+        path,
+        own.map(({ cast, issues }) => ({ castName: cast.name, issues })),
+      ),
+    );
+  }
 
   if (options.json) host.out(`${JSON.stringify(surveyJson(survey, solved))}\n`);
   if (options.out !== null) await writeTables(host, options.out, survey, solved, sourcesOf(files));

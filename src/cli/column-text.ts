@@ -1,4 +1,4 @@
-import type { Basis, Profile, SolvedCast, Survey } from "../survey/index.ts";
+import { type Basis, type Profile, type SolvedCast, type Survey, waterLabel } from "../survey/index.ts";
 import { textTable } from "./text-table.ts";
 
 /** A terminal shows this many rows of a cast at most; --out and --json give all. */
@@ -60,7 +60,7 @@ export function columnText(survey: Survey, { cast, solution }: SolvedCast): stri
   return [
     `${cast.name}  (${cast.fileName})`,
     `  ${[...whereAndWhen(survey.basis, cast), `${column.n} samples from ${first} to ${last} m`].join(", ")}`,
-    `  departure from ${column.referenceRhoKgM3.toFixed(3)} kg/m3, air ${survey.basis.airPressureKPa} kPa`,
+    `  ${waterLabel(survey.basis.water)}, departure from ${column.referenceRhoKgM3.toFixed(3)} kg/m3, air ${survey.basis.airPressureKPa} kPa`,
     textTable(
       HEADS,
       table.map((row) => row.text),

@@ -1,5 +1,3 @@
-import type { Issue } from "../base/index.ts";
-
 /** What a command needs of the machine; tests bring their own. */
 export interface Host {
   readonly out: (text: string) => void;
@@ -17,10 +15,4 @@ export type ExitCode = (typeof EXIT)[keyof typeof EXIT];
 /** The command line itself is wrong: said in one line, exit 64. */
 export class UsageError extends Error {
   override readonly name = "UsageError";
-}
-
-/** `file:line: severity: message`, as editors and terminals know it. */
-export function issueLine(fileName: string, issue: Issue): string {
-  const where = issue.line === undefined ? fileName : `${fileName}:${issue.line}`;
-  return `${where}: ${issue.severity === "error" ? "" : `${issue.severity}: `}${issue.message}\n`;
 }

@@ -1,6 +1,7 @@
 import { parseArgs } from "node:util";
 import type { Cast, FileReading } from "../cast/index.ts";
-import { EXIT, type ExitCode, type Host, issueLine, UsageError } from "./host.ts";
+import { EXIT, type ExitCode, type Host, UsageError } from "./host.ts";
+import { castIssueLines, issueLine } from "./issue-lines.ts";
 import { readCastFiles } from "./read-files.ts";
 import { textTable } from "./text-table.ts";
 import { INSPECT_USAGE } from "./usage.ts";
@@ -22,8 +23,12 @@ export async function inspectCommand(host: Host, args: readonly string[]): Promi
     if (reading.ok) host.out(`${readingText(reading.value)}\n`);
     for (const issue of reading.issues) (reading.ok ? host.out : host.err)(issueLine(path, issue));
     if (reading.ok)
-      for (const cast of reading.value.casts)
-        for (const issue of cast.issues) host.out(issueLine(`${path}: ${cast.name}`, issue));
+      host.out(
+        castIssueLines(
+          path,
+          reading.value.casts.map(({ name, issues }) => ({ castName: name, issues })),
+        ),
+      );
   }
   return files.every((file) => file.reading.ok) ? EXIT.done : EXIT.badInput;
 }

@@ -2,7 +2,8 @@ import { parseArgs } from "node:util";
 import Papa from "papaparse";
 import { csvText } from "../export/index.ts";
 import { type WaterPoints, waterAtPoints } from "../survey/index.ts";
-import { EXIT, type ExitCode, type Host, issueLine, UsageError } from "./host.ts";
+import { EXIT, type ExitCode, type Host, UsageError } from "./host.ts";
+import { issueLine } from "./issue-lines.ts";
 import { WATER_USAGE } from "./usage.ts";
 
 const SALINITY_COLUMNS = ["absolute_salinity_g_kg", "practical_salinity", "conductivity_mS_cm"] as const;

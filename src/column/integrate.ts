@@ -1,5 +1,5 @@
 import { failed, type Issue, type Outcome, succeeded } from "../base/index.ts";
-import { type Cast, samplePracticalSalinity } from "../cast/index.ts";
+import { type Cast, sampleSalinity } from "../cast/index.ts";
 import { ownSalinity, ownTemperature, waterModel } from "../water/index.ts";
 import type { Basis } from "./basis.ts";
 import type { Column } from "./column.ts";
@@ -24,13 +24,9 @@ function march(cast: Cast, basis: Basis, frame: ColumnFrame, record: Record): Kn
   const tempC = new Float64Array(n);
   const stretch = new Stretch(frame);
 
+  const measuredSalinity = sampleSalinity(cast.samples, basis.unmeasuredPracticalSalinity);
   const takeSample = (k: number, pressureDbar: number): void => {
-    practicalSalinity[k] = samplePracticalSalinity(
-      cast.samples,
-      sampleIndex[k]!,
-      pressureDbar,
-      basis.unmeasuredPracticalSalinity,
-    );
+    practicalSalinity[k] = measuredSalinity.at(sampleIndex[k]!, pressureDbar);
     salinity[k] = ownSalinity(frame.model, practicalSalinity[k]);
     tempC[k] = ownTemperature(frame.model, {
       salinity: salinity[k],
@@ -82,7 +78,7 @@ export function integrateCast(cast: Cast, basis: Basis): Outcome<Column> {
     return failed(...record.issues, {
       severity: "error",
       code: "no-usable-sample",
-      message: `${cast.name}: no sample has depth, temperature and salinity in water; check the columns and units`,
+      message: `no sample has depth, temperature and salinity in water; check the columns and units`,
     });
   const frame: ColumnFrame = { coordinate: record.coordinate, latitudeDeg, model: waterModel(basis.water) };
   const knots = march(cast, basis, frame, record);

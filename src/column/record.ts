@@ -1,5 +1,5 @@
 import type { Issue } from "../base/index.ts";
-import { type Cast, type Samples, salinitySource, samplePracticalSalinity } from "../cast/index.ts";
+import { type Cast, type Samples, sampleSalinity } from "../cast/index.ts";
 import { PA_PER_DBAR, standardOceanPressure } from "../gsw-ts-port/index.ts";
 import type { Basis } from "./basis.ts";
 import { STANDARD_GRAVITY_MS2 } from "./gravity.ts";
@@ -48,6 +48,7 @@ const listOfLines = (samples: Samples, indices: readonly number[]): string => {
 /** Picks the samples a column can stand on and sorts them; what is left out is said. */
 export function recordOf(cast: Cast, basis: Basis, latitudeDeg: number | null): Record {
   const { samples } = cast;
+  const salinity = sampleSalinity(samples, basis.unmeasuredPracticalSalinity);
   const { coordinate, values } = measuredCoordinate(samples, basis, latitudeDeg);
   const usable: number[] = [];
   const inAir: number[] = [];
@@ -55,8 +56,7 @@ export function recordOf(cast: Cast, basis: Basis, latitudeDeg: number | null): 
   for (let i = 0; i < samples.n; i++) {
     const x = values[i]!;
     // Conductivity needs a pressure to become salinity, but is missing or not whatever the pressure.
-    const salinity = samplePracticalSalinity(samples, i, 0, basis.unmeasuredPracticalSalinity);
-    if (!Number.isFinite(x + samples.inSituTempC[i]! + salinity)) incomplete.push(i);
+    if (!Number.isFinite(x + samples.inSituTempC[i]! + salinity.at(i, 0))) incomplete.push(i);
     else if (x < 0) inAir.push(i);
     else usable.push(i);
   }
@@ -80,7 +80,7 @@ export function recordOf(cast: Cast, basis: Basis, latitudeDeg: number | null): 
       "not-in-order",
       "samples are not in order of depth and were sorted; a raw record that goes down and up should be cut to one way first",
     );
-  if (salinitySource(samples) === "basis")
+  if (salinity.source === "basis")
     issues.push({
       severity: "note",
       code: "salinity-assumed",

@@ -1,5 +1,5 @@
 import type { Issue } from "../base/index.ts";
-import { type Cast, samplePracticalSalinity } from "../cast/index.ts";
+import { type Cast, sampleSalinity } from "../cast/index.ts";
 import { ownSalinity, ownTemperature, waterModel } from "../water/index.ts";
 
 /**
@@ -17,10 +17,11 @@ export function densityDisagreement(
   const stated = samples.statedSigmaKgM3;
   if (!stated) return { sampleIndex: [], issues: [] };
   const model = waterModel({ id: "teos10" });
+  const measured = sampleSalinity(samples, unmeasuredPracticalSalinity);
   const sampleIndex: number[] = [];
   const issues: Issue[] = [];
   for (let i = 0; i < samples.n; i++) {
-    const salinity = ownSalinity(model, samplePracticalSalinity(samples, i, 0, unmeasuredPracticalSalinity));
+    const salinity = ownSalinity(model, measured.at(i, 0));
     const tempC = ownTemperature(model, { salinity, inSituTempC: samples.inSituTempC[i]!, seaPressureDbar: 0 });
     const computedKgM3 = model.density(salinity, tempC, 0) - 1000;
     if (!(Math.abs(computedKgM3 - stated[i]!) > AGREEMENT_KGM3)) continue;

@@ -9,7 +9,7 @@ export {
   type ReferenceDensity,
 } from "../column/index.ts";
 export type { Level, LevelId } from "../design/index.ts";
-export type { WaterChoice } from "../water/index.ts";
+export { type WaterChoice, waterLabel } from "../water/index.ts";
 export { addCasts } from "./add-casts.ts";
 export { type History, redo, remember, startHistory, undo } from "./history.ts";
 export { type Solution, type SolvedCast, solve, solveCast } from "./solve.ts";

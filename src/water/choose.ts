@@ -29,3 +29,6 @@ export function waterModel(choice: WaterChoice): WaterModel {
       return constantWater(choice.rhoKgM3);
   }
 }
+
+/** The name of the model for people. */
+export const waterLabel = (choice: WaterChoice): string => waterModel(choice).label;

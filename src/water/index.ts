@@ -1,4 +1,4 @@
-export { waterModel } from "./choose.ts";
+export { waterLabel, waterModel } from "./choose.ts";
 export { eos80Density } from "./eos80.ts";
 export { agencySalinity, pureWaterDensity, saundersPressure, unescoDepth } from "./handbook.ts";
 export { limnologicalDensity } from "./limnological.ts";

@@ -107,7 +107,7 @@ describe("layerhead column on a terminal", () => {
     expect(out).toMatchInlineSnapshot(`
       "a  (a.csv)
         51.4 deg N, 3 samples from 0.50 to 4.00 m
-        departure from 1025.000 kg/m3, air 101.325 kPa
+        TEOS-10, departure from 1025.000 kg/m3, air 101.325 kPa
         depth  temperature  salinity   density  sea pressure   gauge  absolute  departure  departure  departure
             m         degC         1     kg/m3          dbar     kPa       kPa        kPa          m          %
         0.000       18.000     3.000  1000.896        0.0000   0.000   101.325      0.000     0.0000          -  surface-gap
