@@ -58,16 +58,27 @@ function temperatureUnit(column: UnitlessColumn): UnitChoice {
   return assumed(column, "degC", why, "note");
 }
 
+/** No natural water conducts more than this, in S/m and in mS/cm. */
+const MOST_S_PER_M = 7;
+const MOST_MS_PER_CM = 70;
+
 /**
- * By the median: sea water measures 3 to 6 S/m or 30 to 60 mS/cm, and what exceeds 100 can only be uS/cm. Brackish water
- * in mS/cm and sea water in S/m overlap from 0.3 to 3, and in between are values that no unit makes typical.
+ * By the median: sea water measures 3 to 6 S/m or 30 to 60 mS/cm, and from 100 up it can only be uS/cm. Brackish water in
+ * mS/cm and sea water in S/m overlap, and a soft lake has as many uS/cm as the sea has mS/cm: specific conductance, which
+ * is mostly of fresh water, is told by the last rule alone.
  */
 function conductivityUnit(column: UnitlessColumn): UnitChoice {
   const middle = median([...column.values]);
+  const most = max([...column.values]);
   const why = `the median is ${shown(middle)}`;
+  const canBeSea = column.role === "conductivity";
   if (middle >= 100) return assumed(column, "uS/cm", `${why}, too high for mS/cm or S/m`, "warning");
-  if (middle >= 30 && middle <= 60) return assumed(column, "mS/cm", `${why}, as of sea water in mS/cm`, "warning");
-  if (middle >= 3 && middle <= 6) return assumed(column, "S/m", `${why}, as of sea water in S/m`, "warning");
+  if (canBeSea && middle >= 30 && middle <= 60 && most <= MOST_MS_PER_CM) {
+    return assumed(column, "mS/cm", `${why}, as of sea water in mS/cm`, "warning");
+  }
+  if (canBeSea && middle >= 3 && middle <= 6 && most <= MOST_S_PER_M) {
+    return assumed(column, "S/m", `${why}, as of sea water in S/m`, "warning");
+  }
   return undecided(column, `${why}, which could be more than one of uS/cm, mS/cm and S/m`, "uS/cm");
 }
 

@@ -188,6 +188,15 @@ describe("units that the file does not give", () => {
     expect(errors[0]!.severity).toBe("error");
   });
 
+  test.each([45, 4.4])("specific conductance around %d could be a soft lake's as well: an error asks", (value) => {
+    const text = table(["Depth (m)", "Temp (C)", "SpCond"], [1, 10, value], [2, 10, value]);
+    expect(codesOf(errorsOf(text))).toEqual(["no-unit-specific-conductance"]);
+  });
+
+  test("a brackish column in mS/cm is not taken for sea water in S/m because of its median", () => {
+    expect(codesOf(errorsOf(withCond(1, 4, 38)))).toEqual(["no-unit-conductivity"]);
+  });
+
   test("beside a salinity column the same conductivity is left unused with a warning", () => {
     const reading = readText(table(["Depth (m)", "Temp (C)", "Sal", "Cond"], [1, 10, 1, 2], [2, 10, 1, 2]));
     expect(rolesOf(reading).conductivity).toBeUndefined();
