@@ -19,6 +19,14 @@ export interface Samples {
   readonly conductivityMsCm: Float64Array | null;
   /** Conductivity compensated to 25 degC by the instrument. */
   readonly specificConductanceMsCm: Float64Array | null;
+  /** As the file states it, on any composition. */
+  readonly absSalinityGKg: Float64Array | null;
+  /** Dry mass of suspended grains per volume of the mixture. */
+  readonly suspendedSedimentKgM3: Float64Array | null;
+  /** Since the first sample of the cast. */
+  readonly timeS: Float64Array | null;
+  /** The flag the file itself gives a sample, in the meaning of the QARTOD manuals: 1 pass, 2 not evaluated, 3 suspect, 4 fail, 9 missing. */
+  readonly statedFlag: Uint8Array | null;
   /** Density anomaly at zero sea pressure as the file states it, density minus 1000: never used, only compared. */
   readonly statedSigmaKgM3: Float64Array | null;
 }
@@ -38,6 +46,8 @@ export interface Cast {
   readonly longitudeDeg: number | null;
   /** Along the channel, from the file's own origin. */
   readonly distanceKm: number | null;
+  /** Depth of the bed below the water surface at the time of the cast, where the file or a list of stations has it. */
+  readonly waterDepthM: number | null;
   readonly fileName: string;
   readonly samples: Samples;
   /** What was met while reading this cast; rows that were left out are named here. */

@@ -1,11 +1,11 @@
-import { practicalSalinityFromConductivity } from "../gsw-ts-port/index.ts";
+import { practicalSalinityFromConductivity, practicalSalinityFromReference } from "../gsw-ts-port/index.ts";
 import { practicalSalinityFromSpecificConductance } from "../water/index.ts";
 import type { Samples } from "./cast.ts";
 
 /** How a cast's samples get their practical salinity. */
 export interface SampleSalinity {
   /** What was measured, best first; `basis` when the probe measured none of them. */
-  readonly source: "practicalSalinity" | "conductivity" | "specificConductance" | "basis";
+  readonly source: "practicalSalinity" | "absSalinity" | "conductivity" | "specificConductance" | "basis";
   /** Practical salinity of a sample; conductivity needs the sea pressure there, the others do not. NaN where missing. */
   readonly at: (sampleIndex: number, seaPressureDbar: number) => number;
 }
@@ -16,8 +16,10 @@ const measured = (values: Float64Array | null): values is Float64Array =>
 
 /** @param unmeasuredPracticalSalinity what the basis says where the probe measured none */
 export function sampleSalinity(samples: Samples, unmeasuredPracticalSalinity: number): SampleSalinity {
-  const { practicalSalinity, conductivityMsCm, specificConductanceMsCm, inSituTempC } = samples;
+  const { practicalSalinity, absSalinityGKg, conductivityMsCm, specificConductanceMsCm, inSituTempC } = samples;
   if (measured(practicalSalinity)) return { source: "practicalSalinity", at: (i) => practicalSalinity[i]! };
+  if (measured(absSalinityGKg))
+    return { source: "absSalinity", at: (i) => practicalSalinityFromReference(absSalinityGKg[i]!) };
   if (measured(conductivityMsCm))
     return {
       source: "conductivity",

@@ -27,6 +27,8 @@ export interface Column {
   readonly salinity: Float64Array;
   /** On the water model's own scale, ITS-90. */
   readonly tempC: Float64Array;
+  /** Below the surface, from the basis or else the cast; null where neither has one below the last sample. */
+  readonly bedDepthM: number | null;
   /** The bed where it is known and below the last sample, else the last sample. */
   readonly bottomDepthM: number;
   /** Density the constant-density estimate is made with. */

@@ -83,8 +83,8 @@ export function integrateCast(cast: Cast, basis: Basis): Outcome<Column> {
   const frame: ColumnFrame = { coordinate: record.coordinate, latitudeDeg, model: waterModel(basis.water) };
   const knots = march(cast, basis, frame, record);
   const lastDepthM = knots.depthM[n - 1]!;
-  const bedBelow = basis.bedDepthM !== null && basis.bedDepthM >= lastDepthM;
-  const bottomDepthM = bedBelow ? basis.bedDepthM : lastDepthM;
+  const statedBedM = basis.bedDepthM ?? cast.waterDepthM;
+  const bedDepthM = statedBedM !== null && statedBedM >= lastDepthM ? statedBedM : null;
 
   const issues: Issue[] = [...record.issues];
   if (latitudeDeg === null)
@@ -94,11 +94,11 @@ export function integrateCast(cast: Cast, basis: Basis): Outcome<Column> {
       message:
         "no latitude in file or basis; standard gravity 9.80665 m/s2 is used, with 0.15 % as its standard uncertainty",
     });
-  if (basis.bedDepthM !== null && !bedBelow)
+  if (statedBedM !== null && bedDepthM === null)
     issues.push({
       severity: "warning",
       code: "bed-above-last-sample",
-      message: `bed at ${basis.bedDepthM} m lies above the last sample at ${lastDepthM.toFixed(3)} m; the bed is not used, correct it or the depths`,
+      message: `bed at ${statedBedM} m lies above the last sample at ${lastDepthM.toFixed(3)} m; the bed is not used, correct it or the depths`,
     });
   const outside = countOutsideRange(knots, frame);
   if (outside > 0)
@@ -116,7 +116,8 @@ export function integrateCast(cast: Cast, basis: Basis): Outcome<Column> {
     n,
     sampleIndex: record.sampleIndex,
     ...knots,
-    bottomDepthM,
+    bedDepthM,
+    bottomDepthM: bedDepthM ?? lastDepthM,
     issues,
   };
   return succeeded({ ...unreferenced, referenceRhoKgM3: referenceDensityOf(unreferenced) }, issues);

@@ -46,10 +46,9 @@ export function nodesAtDepths(column: Column, depthsM: ArrayLike<number>, origin
   };
   const { salinity, tempC } = column;
   const along = column.coordinate === "depth" ? column.depthM : column.seaPressureDbar;
-  const bedKnown = column.basis.bedDepthM !== null && column.bottomDepthM === column.basis.bedDepthM;
   for (let i = 0; i < n; i++) {
     const depthM = nodes.depthM[i]!;
-    if (!(depthM >= 0) || (bedKnown && depthM > column.bottomDepthM)) continue;
+    if (!(depthM >= 0) || depthM > (column.bedDepthM ?? Number.POSITIVE_INFINITY)) continue;
     const above = knotAbove(column, depthM);
     const k = Math.max(above, 0);
     if (above >= 0 && k + 1 < column.n) stretch.between({ along, salinity, tempC }, k);
@@ -67,11 +66,7 @@ export function nodesAtDepths(column: Column, depthsM: ArrayLike<number>, origin
 /** The column's own rows: the water surface, every sample, and the bed where the basis gives one. */
 export function nodesOfProfile(column: Column): Nodes {
   const surface = nodesAtDepths(column, [0], "surface-gap");
-  const bed = nodesAtDepths(
-    column,
-    column.bottomDepthM === column.basis.bedDepthM ? [column.bottomDepthM] : [],
-    "bed-gap",
-  );
+  const bed = nodesAtDepths(column, column.bedDepthM === null ? [] : [column.bedDepthM], "bed-gap");
   const joined = (pick: (part: Pick<Nodes, "depthM" | "seaPressureDbar" | "salinity" | "tempC">) => Float64Array) =>
     Float64Array.from([...pick(surface), ...pick(column), ...pick(bed)]);
   return {

@@ -47,14 +47,13 @@ export function solveCast(survey: Pick<Survey, "basis" | "levels">, cast: Cast):
 function levelIssues(survey: Pick<Survey, "levels">, column: Column): readonly Issue[] {
   const firstDepthM = column.depthM[0]!;
   const lastDepthM = column.depthM[column.n - 1]!;
-  const bedKnown = column.basis.bedDepthM === column.bottomDepthM;
   return survey.levels.flatMap((level): Issue[] => {
     const at = `level ${level.name} at ${level.depthM} m`;
     const warn = (code: string, message: string): Issue[] => [{ severity: "warning", code, message }];
-    if (bedKnown && level.depthM > column.bottomDepthM)
+    if (column.bedDepthM !== null && level.depthM > column.bedDepthM)
       return warn(
         "level-below-bed",
-        `${at} lies below the bed at ${column.bottomDepthM} m; it has no result, move it or the bed`,
+        `${at} lies below the bed at ${column.bedDepthM} m; it has no result, move it or the bed`,
       );
     if (level.depthM > lastDepthM)
       return warn(

@@ -10,8 +10,11 @@ export function castOf(
     readonly conductivityMsCm?: readonly number[];
     readonly specificConductanceMsCm?: readonly number[];
     readonly statedSigmaKgM3?: readonly number[];
+    readonly absSalinityGKg?: readonly number[];
+    readonly timeS?: readonly number[];
+    readonly statedFlag?: readonly number[];
   },
-  place: Partial<Pick<Cast, "name" | "latitudeDeg" | "station" | "distanceKm">> = {},
+  place: Partial<Pick<Cast, "name" | "latitudeDeg" | "station" | "distanceKm" | "waterDepthM">> = {},
 ): Cast {
   const array = (values: readonly number[] | undefined) => (values ? Float64Array.from(values) : null);
   const samples: Samples = {
@@ -24,6 +27,10 @@ export function castOf(
     conductivityMsCm: array(columns.conductivityMsCm),
     specificConductanceMsCm: array(columns.specificConductanceMsCm),
     statedSigmaKgM3: array(columns.statedSigmaKgM3),
+    absSalinityGKg: array(columns.absSalinityGKg),
+    suspendedSedimentKgM3: null,
+    timeS: array(columns.timeS),
+    statedFlag: columns.statedFlag ? Uint8Array.from(columns.statedFlag) : null,
   };
   return {
     id: "cast" as CastId,
@@ -33,6 +40,7 @@ export function castOf(
     latitudeDeg: null,
     longitudeDeg: null,
     distanceKm: null,
+    waterDepthM: null,
     fileName: "cast.csv",
     issues: [],
     ...place,

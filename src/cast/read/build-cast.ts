@@ -97,6 +97,10 @@ function samplesOf(rows: MeasuredRows, kept: readonly number[]): Samples {
     practicalSalinity: pick(rows.practicalSalinity),
     conductivityMsCm: pick(rows.conductivityMsCm),
     specificConductanceMsCm: pick(rows.specificConductanceMsCm),
+    absSalinityGKg: null,
+    suspendedSedimentKgM3: null,
+    timeS: null,
+    statedFlag: null,
     statedSigmaKgM3: pick(rows.statedSigmaKgM3),
   };
 }
@@ -120,6 +124,7 @@ export function buildCast(rows: MeasuredRows, group: RowGroup, fileName: string)
     latitudeDeg: middle(rows.latitudeDeg, kept, 90),
     longitudeDeg: middle(rows.longitudeDeg, kept, 180),
     distanceKm: middle(rows.distanceKm, kept),
+    waterDepthM: null,
     fileName,
     samples: samplesOf(rows, kept),
     issues,
