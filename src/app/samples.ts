@@ -1,18 +1,20 @@
+import type { Basis } from "../survey/index.ts";
 import { readText } from "./reading-files.ts";
+import type { SurveyStart } from "./state/reduce.ts";
 
 /** Invented files that come with the page, fetched from its own origin when asked for. */
 const FILES = import.meta.glob<string>("../../sample-data/*.csv", { query: "?raw", import: "default" });
 
-export type SampleName = "estuary" | "reservoir";
+const FRESH: Partial<Basis> = { referenceDensity: { kind: "number", rhoKgM3: 1000 } };
 
-const TITLE: Readonly<Record<SampleName, string>> = {
-  estuary: "Sample estuary (invented)",
-  reservoir: "Sample reservoir (invented)",
-};
+const SAMPLES = {
+  estuary: { name: "Corrow estuary (invented)" },
+  reservoir: { name: "Halvane reservoir (invented)", basis: FRESH },
+} as const satisfies Readonly<Record<string, SurveyStart>>;
 
-export async function loadSample(name: SampleName): Promise<void> {
+export async function loadSample(sample: keyof typeof SAMPLES): Promise<void> {
   for (const [path, load] of Object.entries(FILES)) {
     const fileName = path.slice(path.lastIndexOf("/") + 1);
-    if (fileName.includes(name)) await readText(fileName, await load(), TITLE[name]);
+    if (fileName.includes(sample)) await readText(fileName, await load(), SAMPLES[sample]);
   }
 }

@@ -1,13 +1,17 @@
 import { effect } from "@preact/signals";
 import type { SolvedCast, Survey } from "../survey/index.ts";
 import { nextShare, stillValid } from "./state/solved-share.ts";
-import { progress, solved, survey } from "./store.ts";
+import { progress, solved, solvingTrouble, survey } from "./store.ts";
 import { thread } from "./thread.ts";
 
 /** Keeps the results up to date with the survey, in the background; work that a newer change outdates is called off. */
 export function keepSolved(): void {
   effect(() => {
-    void solveInShares(survey.value);
+    const wanted = survey.value;
+    solveInShares(wanted).catch((cause: unknown) => {
+      progress.value = null;
+      solvingTrouble.value = `The results are not up to date: ${cause instanceof Error ? cause.message : String(cause)}.`;
+    });
   });
 }
 
@@ -27,5 +31,6 @@ async function solveInShares(wanted: Survey): Promise<void> {
     waiting = waiting.slice(share.length);
   }
   progress.value = null;
+  solvingTrouble.value = "";
   solved.value = { survey: wanted, casts: wanted.casts.map((cast) => results.get(cast.id)!) };
 }

@@ -32,5 +32,8 @@ export const visibleCasts = computed((): readonly SolvedCast[] => {
 /** Where the plumb line hangs, null where it is not out. */
 export const plumbDepthM = signal<number | null>(null);
 
+/** Why there are no results for the last change; empty while solving works. */
+export const solvingTrouble = signal("");
+
 /** Why the last change could not be saved; empty while saving works. */
 export const savingTrouble = signal("");

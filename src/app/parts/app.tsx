@@ -1,7 +1,7 @@
 import { useSignal } from "@preact/signals";
-import { useEffect } from "preact/hooks";
-import { readFiles } from "../reading-files.ts";
-import { dispatch, progress, savingTrouble, solved, survey } from "../store.ts";
+import { dispatch, progress, savingTrouble, solved, solvingTrouble, survey } from "../store.ts";
+import { useFileDrop } from "../use-file-drop.ts";
+import { useUndoKeys } from "../use-undo-keys.ts";
 import { BasisPanel } from "./basis-panel.tsx";
 import { CastDetails } from "./cast-details.tsx";
 import { CastList } from "./cast-list.tsx";
@@ -17,6 +17,7 @@ import { Readout } from "./readout.tsx";
 export function App() {
   const isBasisOpen = useSignal(false);
   const isDropping = useFileDrop();
+  useUndoKeys();
   return (
     <div class={`page${isDropping.value ? " dropping" : ""}`}>
       <Header isBasisOpen={isBasisOpen} />
@@ -55,6 +56,7 @@ function Notes() {
   return (
     <div class="notes" role="status">
       {savingTrouble.value ? <p class="warn">{savingTrouble.value}</p> : null}
+      {solvingTrouble.value ? <p class="warn">{solvingTrouble.value}</p> : null}
       {running ? (
         <p>
           Solving: {running.doneCount} of {running.allCount} casts done{" "}
@@ -65,34 +67,4 @@ function Notes() {
       ) : null}
     </div>
   );
-}
-
-/** The whole page takes dropped files. */
-function useFileDrop() {
-  const isDropping = useSignal(false);
-  useEffect(() => {
-    const over = (event: DragEvent): void => {
-      if (!event.dataTransfer?.types.includes("Files")) return;
-      event.preventDefault();
-      isDropping.value = true;
-    };
-    const leave = (event: DragEvent): void => {
-      if (event.relatedTarget === null) isDropping.value = false;
-    };
-    const drop = (event: DragEvent): void => {
-      if (!event.dataTransfer?.files.length) return;
-      event.preventDefault();
-      isDropping.value = false;
-      void readFiles([...event.dataTransfer.files]);
-    };
-    document.addEventListener("dragover", over);
-    document.addEventListener("dragleave", leave);
-    document.addEventListener("drop", drop);
-    return () => {
-      document.removeEventListener("dragover", over);
-      document.removeEventListener("dragleave", leave);
-      document.removeEventListener("drop", drop);
-    };
-  }, [isDropping]);
-  return isDropping;
 }

@@ -54,6 +54,7 @@ export function BasisPanel() {
         value={basis.latitudeDeg}
         unit="deg"
         shownUnit="deg"
+        digitsCount={4}
         least={-90}
         most={90}
         emptyMeans={latitudeWithout(inHand)}

@@ -30,7 +30,7 @@ function summaryRows({ column, profile }: Solution, system: DisplaySystem): read
     ["Samples used", String(column.n)],
     ["First sample at", shownValue(column.depthM[0]!, "depth", system)],
     ["Last sample at", shownValue(column.depthM[column.n - 1]!, "depth", system)],
-    ["Bottom gauge pressure", shownValue(bottom.gaugePressureKPa[0]!, "gaugePressure", system)],
+    ["Gauge at bottom", shownValue(bottom.gaugePressureKPa[0]!, "gaugePressure", system)],
     ["Departure there", shownValue(bottom.departureKPa[0]!, "departure", system)],
     ["as head of reference", shownValue(bottom.departureM[0]!, "head", system)],
     ["of gauge pressure", `${shownPercent(bottom.departureFrac[0]!)} %`],

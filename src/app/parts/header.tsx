@@ -64,7 +64,7 @@ function SurveyName() {
 }
 
 /** A button that opens the file chooser; the input itself stays out of sight but can be reached by scripts. */
-export function AddCasts() {
+function AddCasts() {
   const input = useRef<HTMLInputElement>(null);
   return (
     <>

@@ -7,7 +7,7 @@ import { governingCast } from "../state/governing-cast.ts";
 import { castInHand, dispatch, solved, state, visibleCasts } from "../store.ts";
 import { QuantityEntry } from "./number-entry.tsx";
 
-export const DEEPEST_LEVEL_M = 12_000;
+const DEEPEST_LEVEL_M = 12_000;
 
 type Values = Solution["levels"];
 
@@ -36,7 +36,7 @@ export function LevelsTable() {
   const { levels, basis } = solved.value.survey;
   const columns = COLUMNS.filter((column) => !column.needsDatum || basis.waterSurfaceElevationM !== null);
   return (
-    <section class="levels" aria-label="Levels">
+    <section class="level-table" aria-label="Levels">
       <div class="table-head">
         <h2>Levels in {inHand?.cast.name ?? "no cast"}</h2>
         <AddLevel system={system} />
@@ -57,10 +57,7 @@ export function LevelsTable() {
                     {title} {quantity === "percent" ? "%" : unitLabel(quantity, system)}
                   </th>
                 ))}
-                <th scope="col">Greatest gauge</th>
-                <th scope="col">
-                  <span class="hidden-text">Delete</span>
-                </th>
+                <th scope="col">Greatest gauge {unitLabel("gaugePressure", system)}</th>
               </tr>
             </thead>
             <tbody>
@@ -101,6 +98,15 @@ function LevelRow({ level, levelIndex, columns, system }: RowProps) {
             dispatch({ kind: "level-renamed", levelId: level.id, name: event.currentTarget.value.trim() || level.name })
           }
         />
+        <button
+          type="button"
+          class="plain remove"
+          aria-label={`Delete ${level.name}`}
+          title="Delete"
+          onClick={() => dispatch({ kind: "level-removed", levelId: level.id })}
+        >
+          ×
+        </button>
         {note ? <small class="warn">{note}</small> : null}
       </th>
       <td>
@@ -120,17 +126,6 @@ function LevelRow({ level, levelIndex, columns, system }: RowProps) {
       ))}
       <td>
         <Governing levelIndex={levelIndex} system={system} />
-      </td>
-      <td>
-        <button
-          type="button"
-          class="plain remove"
-          aria-label={`Delete ${level.name}`}
-          title="Delete"
-          onClick={() => dispatch({ kind: "level-removed", levelId: level.id })}
-        >
-          ×
-        </button>
       </td>
     </tr>
   );

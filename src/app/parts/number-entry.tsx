@@ -4,9 +4,16 @@ import { ownUnit, type PageQuantity } from "../show/shown.ts";
 
 const TRUE_MINUS = "−";
 
+/** More decimals than anybody types: they come of a change of units. */
+const MOST_TYPED_DECIMALS_COUNT = 4;
+
 /** As many digits as were given, but none that a change of units made up. */
-const entryText = (value: number | null): string =>
-  value === null ? "" : String(Number(value.toPrecision(8))).replace("-", TRUE_MINUS);
+function entryText(value: number | null, digitsCount: number): string {
+  if (value === null) return "";
+  const given = String(Number(value.toPrecision(8)));
+  const isTyped = (given.split(".")[1] ?? "").length <= MOST_TYPED_DECIMALS_COUNT;
+  return (isTyped ? given : String(Number(value.toFixed(digitsCount)))).replace("-", TRUE_MINUS);
+}
 
 const parsed = (text: string): number => {
   const plain = text.trim().replace(TRUE_MINUS, "-").replace(",", ".");
@@ -28,13 +35,15 @@ interface EntryProps {
 interface UnitProps {
   readonly unit: UnitSymbol;
   readonly shownUnit: UnitSymbol;
+  /** Decimals where a change of units would show more than was typed. */
+  readonly digitsCount: number;
 }
 
 /** An entry for one number. What it cannot take it refuses with the range in a sentence; the last good value stays. */
 export function NumberEntry(props: EntryProps & UnitProps) {
-  const { label, value, unit, shownUnit, emptyMeans, isLabelHidden } = props;
+  const { label, value, unit, shownUnit, digitsCount, emptyMeans, isLabelHidden } = props;
   const id = useId();
-  const good = entryText(value === null ? null : convert(value, unit, shownUnit));
+  const good = entryText(value === null ? null : convert(value, unit, shownUnit), digitsCount);
   const [text, setText] = useState(good);
   const [refusal, setRefusal] = useState("");
   const unitLabel = unitOf(shownUnit).label;
@@ -52,13 +61,13 @@ export function NumberEntry(props: EntryProps & UnitProps) {
     const entered = convert(parsed(text), shownUnit, unit);
     if (entered >= props.least && entered <= props.most) {
       setRefusal("");
-      // Equal values bring no new props that would tidy the text.
-      setText(entered === value ? good : entryText(convert(entered, unit, shownUnit)));
+      // A new value comes back as props and replaces this.
+      setText(good);
       props.onValue(entered);
       return;
     }
     const [least, most] = [props.least, props.most].map((end) =>
-      entryText(Number(convert(end, unit, shownUnit).toPrecision(4))),
+      entryText(Number(convert(end, unit, shownUnit).toPrecision(4)), digitsCount),
     );
     const range = `from ${least} to ${most}${unitLabel && ` ${unitLabel}`}`;
     setRefusal(`${label} must be a number ${range}; ${kept(good, emptyMeans)}`);
@@ -108,5 +117,6 @@ const kept = (good: string, emptyMeans: string | undefined): string =>
 /** A number entry in the unit that the page shows for a quantity. */
 export function QuantityEntry(props: EntryProps & { readonly quantity: PageQuantity; readonly system: DisplaySystem }) {
   const { quantity, system, ...rest } = props;
-  return <NumberEntry {...rest} unit={ownUnit(quantity)} shownUnit={displayUnit(quantity, system).unit} />;
+  const shown = displayUnit(quantity, system);
+  return <NumberEntry {...rest} unit={ownUnit(quantity)} shownUnit={shown.unit} digitsCount={shown.digitsCount} />;
 }

@@ -14,11 +14,15 @@ interface Drag {
   readonly depthM: number;
 }
 
+/** A finger that slides along the charts reads values; one that stays drops a level. */
+const CLICK_SLACK_PX = 5;
+
 /** The linked panels. One slider for keyboard and screen reader: its value is the depth of the plumb line. */
 export function ProfileCharts() {
   const svg = useRef<SVGSVGElement>(null);
   const size = useSignal({ widthPx: 0, heightPx: 0 });
   const drag = useSignal<Drag | null>(null);
+  const pressedAtPx = useRef<number | null>(null);
   const source = useComputed((): SheetSource => {
     const { castInHandId, colourIndexOf, system } = state.value;
     const levels = survey.value.levels.map((level) =>
@@ -66,9 +70,10 @@ export function ProfileCharts() {
     return sheet.value ? tidyDepthM(inMetres(depthAtPx(sheet.value.depth, event.clientY - box.top))) : 0;
   };
   const onPointerDown = (event: PointerEvent): void => {
-    const levelId = (event.target as Element).closest("[data-level] .handle, [data-level] .flag")?.parentElement
-      ?.dataset?.level;
-    if (event.button !== 0 || !levelId) return;
+    if (event.button !== 0) return;
+    pressedAtPx.current = event.clientY;
+    const levelId = (event.target as Element).closest<SVGGElement>("[data-level]")?.dataset.level;
+    if (!levelId) return;
     svg.current!.setPointerCapture(event.pointerId);
     drag.value = { levelId: levelId as LevelId, depthM: depthUnder(event) };
   };
@@ -77,10 +82,14 @@ export function ProfileCharts() {
     if (drag.value) drag.value = { ...drag.value, depthM: depthUnder(event) };
   };
   const onPointerUp = (event: PointerEvent): void => {
-    if (event.button !== 0) return;
-    if (drag.value) dispatch({ kind: "level-moved", ...drag.value });
-    else dispatch({ kind: "level-added", depthM: depthUnder(event) });
-    drag.value = null;
+    const pressedAt = pressedAtPx.current;
+    if (event.button !== 0 || pressedAt === null) return;
+    pressedAtPx.current = null;
+    const hasStayed = Math.abs(event.clientY - pressedAt) < CLICK_SLACK_PX;
+    if (drag.value) {
+      if (!hasStayed) dispatch({ kind: "level-moved", ...drag.value });
+      drag.value = null;
+    } else if (hasStayed) dispatch({ kind: "level-added", depthM: depthUnder(event) });
   };
   const onKeyDown = (event: KeyboardEvent): void => {
     const next = movedBy(event.key, plumbDepthM.value ?? 0, deepestM());
@@ -94,7 +103,7 @@ export function ProfileCharts() {
   const depthM = plumbDepthM.value ?? 0;
   return (
     <div
-      class="charts"
+      class={`charts${drag.value ? " dragging" : ""}`}
       role="slider"
       tabIndex={0}
       aria-label={`Plumb line through the profiles of ${castInHand.value?.cast.name ?? "no cast"}; Enter drops a level`}
@@ -108,11 +117,11 @@ export function ProfileCharts() {
       <svg
         ref={svg}
         aria-hidden="true"
-        class={drag.value ? "dragging" : ""}
         onPointerDown={onPointerDown}
         onPointerMove={onPointerMove}
         onPointerUp={onPointerUp}
         onPointerCancel={() => {
+          pressedAtPx.current = null;
           drag.value = null;
         }}
       />

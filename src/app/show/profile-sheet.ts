@@ -63,7 +63,7 @@ const PANELS: readonly PanelKind[] = [
 ];
 
 /** @example "1025 kg/m³", "surface sample" */
-export function referenceName({ referenceDensity }: Basis, system: DisplaySystem): string {
+function referenceName({ referenceDensity }: Basis, system: DisplaySystem): string {
   switch (referenceDensity.kind) {
     case "surface":
       return "surface sample";

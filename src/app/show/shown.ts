@@ -39,11 +39,13 @@ export const shownNumber = (value: number, quantity: PageQuantity, system: Displ
     ? scientific(value)
     : formatQuantity(value, OWN_UNIT[quantity], quantity, system);
 
+const NO_BREAK_SPACE = "\u00a0";
+
 /** As `shownNumber`, with the unit. */
 export function shownValue(value: number, quantity: PageQuantity, system: DisplaySystem): string {
   const number = shownNumber(value, quantity, system);
   const unit = unitLabel(quantity, system);
-  return Number.isNaN(value) || unit === "" ? number : `${number} ${unit}`;
+  return Number.isNaN(value) || unit === "" ? number : `${number}${NO_BREAK_SPACE}${unit}`;
 }
 
 /** @example shownPercent(-0.0123) // "−1.230" */

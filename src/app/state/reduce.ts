@@ -12,8 +12,14 @@ export interface ReadFile {
   readonly outcome: Outcome<FileReading>;
 }
 
+/** What a survey that has no casts yet takes over with its first files. */
+export interface SurveyStart {
+  readonly name: string;
+  readonly basis?: Partial<Basis>;
+}
+
 export type Action =
-  | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly surveyName: string }
+  | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly start: SurveyStart }
   | { readonly kind: "troubles-dismissed" }
   | { readonly kind: "survey-renamed"; readonly name: string }
   | { readonly kind: "survey-cleared" }
@@ -30,7 +36,7 @@ export type Action =
   | { readonly kind: "redone" };
 
 /** Colours told apart by eye; with more casts they come round again. */
-export const COLOURS_COUNT = 6;
+const COLOURS_COUNT = 6;
 
 /** The next state. What changes the survey goes through its history and can be undone; the rest is how one looks at it. */
 export function reduce(state: AppState, action: Action): AppState {
@@ -38,13 +44,13 @@ export function reduce(state: AppState, action: Action): AppState {
   const change = (next: Survey): AppState => settled({ ...state, history: remember(state.history, next) });
   switch (action.kind) {
     case "files-read":
-      return filesRead(state, action.files, action.surveyName);
+      return filesRead(state, action.files, action.start);
     case "troubles-dismissed":
       return { ...state, troubles: [] };
     case "survey-renamed":
       return change({ ...survey, name: action.name });
     case "survey-cleared":
-      return change(emptySurvey);
+      return { ...change(emptySurvey), troubles: [] };
     case "cast-taken":
       return { ...state, castInHandId: action.castId, hiddenIds: without(state.hiddenIds, action.castId) };
     case "cast-toggled":
@@ -99,14 +105,15 @@ function coloured(casts: readonly Cast[], worn: AppState["colourIndexOf"]): AppS
   return next;
 }
 
-function filesRead(state: AppState, files: readonly ReadFile[], surveyName: string): AppState {
+function filesRead(state: AppState, files: readonly ReadFile[], start: SurveyStart): AppState {
   const survey = surveyOf(state);
   const read = files.flatMap(({ outcome, sha256 }) => (outcome.ok ? [{ ...outcome.value, sha256 }] : []));
   const casts = read.flatMap((reading) => reading.casts);
-  const next: Survey =
-    casts.length === 0
+  const begun: Survey =
+    survey.casts.length > 0
       ? survey
-      : { ...addCasts(survey, casts), name: survey.name || (survey.casts.length === 0 ? surveyName : survey.name) };
+      : { ...survey, name: survey.name || start.name, basis: { ...survey.basis, ...start.basis } };
+  const next = casts.length === 0 ? survey : addCasts(begun, casts);
   const readings = read.map(({ casts: _, ...reading }) => reading);
   const readAgain = new Set(readings.map((reading) => reading.fileName));
   const troubles = files.flatMap(({ fileName, outcome }): FileTrouble[] => {

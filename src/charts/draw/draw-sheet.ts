@@ -13,7 +13,9 @@ const NOTE_LINE_PX = 13;
 
 /** Draws everything that stays while the pointer moves. */
 export function drawSheet(root: SVGSVGElement, sheet: SheetLayout): void {
-  const svg = select(root).attr("viewBox", `0 0 ${sheet.widthPx} ${sheet.heightPx}`);
+  const svg = select(root)
+    .attr("viewBox", `0 0 ${sheet.widthPx} ${sheet.heightPx}`)
+    .classed("crowded", sheet.isCrowded);
   const layer = (name: string): Group => {
     const found = svg.selectChild<SVGGElement>(`g.${name}`);
     return found.empty() ? svg.append("g").attr("class", name) : found;

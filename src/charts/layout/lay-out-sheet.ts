@@ -1,15 +1,17 @@
 import { type DepthAxis, depthAxis, depthPx } from "./depth-axis.ts";
 import { layOutCurve } from "./lay-out-curve.ts";
 import { placeLevelLabels } from "./place-level-labels.ts";
+import { powerOfTen } from "./power-of-ten.ts";
 import type { PanelInput, PanelLayout, SheetInput, SheetLayout, Size } from "./sheet.ts";
 import { labelWidthPx, titleWidthPx } from "./text-width.ts";
-import { linearAxis, logAxis, powerOfTen, valuePx } from "./value-axis.ts";
+import { linearAxis, logAxis, valuePx } from "./value-axis.ts";
 
 const MARGIN = { leftPx: 58, rightPx: 12, topPx: 44, bottomPx: 8 } as const;
 const BETWEEN_PANELS_PX = 16;
 const LEAST_PANEL_PX = 118;
 /** With more curves than this, each is thinned harder: nobody can follow one of them. */
 const FEW_CURVES_COUNT = 20;
+const CROWD_CURVES_COUNT = 60;
 
 /** Panels side by side over one depth axis, to fill a size. */
 export function layOutSheet(input: SheetInput, size: Size): SheetLayout {
@@ -29,6 +31,7 @@ export function layOutSheet(input: SheetInput, size: Size): SheetLayout {
     ...size,
     leftPx,
     rightPx,
+    isCrowded: chosen.some((panel) => panel.curves.length > CROWD_CURVES_COUNT),
     depthUnit: input.depthUnit,
     depth,
     panels,

@@ -92,6 +92,8 @@ export interface LevelLayout {
 export interface SheetLayout extends Size {
   readonly leftPx: number;
   readonly rightPx: number;
+  /** So many curves that only their mass can be seen. */
+  readonly isCrowded: boolean;
   readonly depthUnit: string;
   readonly depth: DepthAxis;
   readonly panels: readonly PanelLayout[];

@@ -1,7 +1,9 @@
-import { scaleLinear, scaleLog } from "d3-scale";
+import { extent } from "d3-array";
+import { scaleLinear } from "d3-scale";
+import { powerOfTen } from "./power-of-ten.ts";
 import { labelWidthPx } from "./text-width.ts";
 
-export interface ValueTick {
+interface ValueTick {
   readonly xPx: number;
   readonly label: string;
   readonly anchor: "start" | "middle" | "end";
@@ -19,9 +21,9 @@ export interface ValueAxis {
 
 type Frame = Pick<ValueAxis, "leftPx" | "rightPx">;
 
-const LEAST_SPACE_PX = 10;
+/** Between two labels; the second only where one label would be left otherwise. */
+const SPACES_PX = [12, 5];
 const MOST_DECADES = 5;
-const PX_PER_TICK = 38;
 /** Ends are rounded to eighths of the range or so, however few ticks there is room for. */
 const ROUNDING_COUNT = 8;
 
@@ -34,17 +36,11 @@ export function valuePx(axis: ValueAxis, value: number): number {
   return axis.leftPx + along * (axis.rightPx - axis.leftPx);
 }
 
-function extentOf(arrays: Iterable<ArrayLike<number>>, keep: (value: number) => boolean): [number, number] | null {
-  let least = Number.POSITIVE_INFINITY;
-  let most = Number.NEGATIVE_INFINITY;
-  for (const values of arrays)
-    for (let i = 0; i < values.length; i++) {
-      const value = values[i]!;
-      if (!keep(value)) continue;
-      if (value < least) least = value;
-      if (value > most) most = value;
-    }
-  return least <= most ? [least, most] : null;
+/** Least and most of the values in some arrays that `keep` lets through; null where there are none. */
+function extentOf(arrays: Iterable<Float64Array>, keep: (value: number) => boolean): readonly [number, number] | null {
+  const ends = Array.from(arrays, (values) => extent(values, (value) => (keep(value) ? value : Number.NaN)));
+  const [least, most] = extent(ends.flat(), (end) => end);
+  return least === undefined ? null : [least, most];
 }
 
 /** The most ticks that fit without touching; the two at the ends stay inside the frame. */
@@ -52,10 +48,11 @@ function fittingTicks(
   axis: Omit<ValueAxis, "ticks">,
   candidates: readonly (readonly [number, string])[][],
 ): ValueTick[] {
-  for (const candidate of candidates) {
-    const ticks = candidate.map(([value, label]) => placed(axis, value, label));
-    if (ticks.length > 1 && !ticks.some((tick, i) => i > 0 && touches(ticks[i - 1]!, tick))) return ticks;
-  }
+  for (const spacePx of SPACES_PX)
+    for (const candidate of candidates) {
+      const ticks = candidate.map(([value, label]) => placed(axis, value, label));
+      if (ticks.length > 1 && ticks.every((tick, i) => i === 0 || isClear(ticks[i - 1]!, tick, spacePx))) return ticks;
+    }
   return (candidates.at(-1) ?? []).slice(0, 1).map(([value, label]) => placed(axis, value, label));
 }
 
@@ -66,69 +63,37 @@ function placed(axis: Omit<ValueAxis, "ticks">, value: number, label: string): V
   return { xPx, label, anchor };
 }
 
-function touches(left: ValueTick, right: ValueTick): boolean {
+function isClear(left: ValueTick, right: ValueTick, spacePx: number): boolean {
   const reach = { start: 1, middle: 0.5, end: 0 } as const;
   const leftEndPx = left.xPx + labelWidthPx(left.label) * reach[left.anchor];
   const rightStartPx = right.xPx - labelWidthPx(right.label) * (1 - reach[right.anchor]);
-  return leftEndPx + LEAST_SPACE_PX > rightStartPx;
+  return leftEndPx + spacePx <= rightStartPx;
 }
 
 /** An axis from the least to the most of the values, widened to whole ticks. */
-export function linearAxis(arrays: Iterable<ArrayLike<number>>, frame: Frame, withZero = false): ValueAxis {
+export function linearAxis(arrays: Iterable<Float64Array>, frame: Frame, withZero = false): ValueAxis {
   const found = extentOf(arrays, Number.isFinite) ?? [0, 1];
   let [least, most] = withZero ? [Math.min(0, found[0]), Math.max(0, found[1])] : found;
   if (least === most) [least, most] = least === 0 ? [0, 1] : [least - 0.5, most + 0.5];
-  const mostTicksCount = Math.max(2, Math.floor((frame.rightPx - frame.leftPx) / PX_PER_TICK));
   const scale = scaleLinear().domain([least, most]).nice(ROUNDING_COUNT);
   const [from, to] = scale.domain() as [number, number];
   const axis = { kind: "linear" as const, from, to, ...frame };
-  const candidates = Array.from({ length: mostTicksCount }, (_, k) => mostTicksCount - k).map((count) => {
+  const candidates = Array.from({ length: ROUNDING_COUNT }, (_, k) => ROUNDING_COUNT - k).map((count) => {
     const format = scale.tickFormat(count, "f");
     return scale.ticks(count).map((value) => [value, format(value)] as const);
   });
-  return {
-    ...axis,
-    ticks: fittingTicks(axis, [
-      ...candidates,
-      [from, to].map((v) => [v, scale.tickFormat(ROUNDING_COUNT, "f")(v)] as const),
-    ]),
-  };
+  return { ...axis, ticks: fittingTicks(axis, candidates) };
 }
 
-const SUPERSCRIPT: Readonly<Record<string, string>> = {
-  "-": "⁻",
-  "0": "⁰",
-  "1": "¹",
-  "2": "²",
-  "3": "³",
-  "4": "⁴",
-  "5": "⁵",
-  "6": "⁶",
-  "7": "⁷",
-  "8": "⁸",
-  "9": "⁹",
-};
-
-/** @example powerOfTen(-4) // "10⁻⁴" */
-export const powerOfTen = (exponent: number): string =>
-  `10${[...String(exponent)].map((character) => SUPERSCRIPT[character]).join("")}`;
-
 /** A log axis of whole decades, at most five below the largest value: what lies lower is marked at the edge. */
-export function logAxis(arrays: Iterable<ArrayLike<number>>, frame: Frame): ValueAxis {
+export function logAxis(arrays: Iterable<Float64Array>, frame: Frame): ValueAxis {
   const [least, most] = extentOf(arrays, (value) => value > 0 && Number.isFinite(value)) ?? [1e-5, 1e-1];
   const top = Math.max(Math.ceil(Math.log10(most)), Math.floor(Math.log10(least)) + 1);
   const bottom = Math.max(Math.floor(Math.log10(least)), top - MOST_DECADES);
   const axis = { kind: "log" as const, from: 10 ** bottom, to: 10 ** top, ...frame };
-  const decades = scaleLog()
-    .domain([axis.from, axis.to])
-    .ticks(top - bottom)
-    .filter(isDecade);
+  const exponents = Array.from({ length: top - bottom + 1 }, (_, k) => bottom + k);
   const candidates = [1, 2, 3, 5].map((step) =>
-    decades
-      .filter((_, k) => k % step === 0)
-      .map((value) => [value, powerOfTen(Math.round(Math.log10(value)))] as const),
+    exponents.filter((_, k) => k % step === 0).map((exponent) => [10 ** exponent, powerOfTen(exponent)] as const),
   );
   return { ...axis, ticks: fittingTicks(axis, candidates) };
 }
-
-const isDecade = (value: number): boolean => Math.abs(Math.log10(value) - Math.round(Math.log10(value))) < 1e-9;

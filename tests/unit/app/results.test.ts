@@ -1,0 +1,129 @@
+import { describe, expect, it } from "vitest";
+import { shownPercent, shownValue } from "../../../src/app/show/shown.ts";
+import { behindDepth, buoyancyAround, strongestStratification } from "../../../src/app/show/water-at.ts";
+import { exportFiles } from "../../../src/app/state/export-files.ts";
+import { governingCast } from "../../../src/app/state/governing-cast.ts";
+import { nextShare, stillValid } from "../../../src/app/state/solved-share.ts";
+import { defaultBasis, type LevelId, type Survey, solve } from "../../../src/survey/index.ts";
+import { castOf } from "../../support/cast-of.ts";
+
+const castNamed = (name: string, salinity: number, deepestM = 4) =>
+  castOf(
+    {
+      depthM: [1, 2, deepestM],
+      inSituTempC: [15, 14, 12],
+      practicalSalinity: [salinity, salinity + 2, salinity + 4],
+    },
+    { name },
+  );
+
+const surveyOf = (over: Partial<Survey> = {}): Survey => ({
+  name: "Spring neaps",
+  casts: [castNamed("Fresh", 1), castNamed("Salt", 30)],
+  basis: defaultBasis,
+  levels: [{ id: "level-1" as LevelId, name: "Intake", depthM: 3 }],
+  ...over,
+});
+
+describe("governingCast", () => {
+  it("is the cast whose water is heaviest above the level", () => {
+    const solved = solve(surveyOf());
+    expect(governingCast(solved, 0)?.name).toBe("Salt");
+    expect(governingCast(solved, 0)?.gaugePressureKPa).toBe(solved[1]!.solution!.levels.gaugePressureKPa[0]);
+  });
+
+  it("is nobody without casts, and at a level below every bed", () => {
+    expect(governingCast([], 0)).toBeNull();
+    const basis = { ...defaultBasis, bedDepthM: 5 };
+    const levels = [{ id: "a" as LevelId, name: "a", depthM: 6 }];
+    expect(governingCast(solve(surveyOf({ basis, levels })), 0)).toBeNull();
+  });
+});
+
+describe("sharing out the work", () => {
+  it("keeps a result as long as cast, basis and levels are the same", () => {
+    const survey = surveyOf();
+    const solved = { survey, casts: solve(survey) };
+    const more = { ...survey, name: "Renamed", casts: [...survey.casts, castNamed("New", 5)] };
+    expect(stillValid(solved, more).map(({ cast }) => cast.name)).toEqual(["Fresh", "Salt"]);
+    expect(stillValid(solved, { ...survey, basis: { ...defaultBasis } })).toEqual([]);
+    expect(stillValid(solved, { ...survey, levels: [] })).toEqual([]);
+  });
+
+  it("takes casts from the front up to a limit of samples, and at least one", () => {
+    const withN = (n: number) => ({ ...castNamed("c", 1), samples: { ...castNamed("c", 1).samples, n } });
+    const casts = [withN(3000), withN(900), withN(200), withN(1)];
+    expect(nextShare(casts)).toEqual(casts.slice(0, 2));
+    expect(nextShare([withN(100_000), withN(1)]).length).toBe(1);
+    expect(nextShare([])).toEqual([]);
+  });
+});
+
+describe("what stands behind a depth", () => {
+  it("tells samples from held water and from no water", () => {
+    const { column } = solve(surveyOf({ basis: { ...defaultBasis, bedDepthM: 5 } }))[0]!.solution!;
+    expect(behindDepth(column, 0.5)).toBe("above-first-sample");
+    expect(behindDepth(column, 1)).toBe("sampled");
+    expect(behindDepth(column, 4)).toBe("sampled");
+    expect(behindDepth(column, 4.5)).toBe("below-last-sample");
+    expect(behindDepth(column, 5.5)).toBe("no-water");
+    expect(behindDepth(column, Number.NaN)).toBe("no-water");
+  });
+
+  it("finds the buoyancy frequency between the samples around a depth", () => {
+    const { profile } = solve(surveyOf())[0]!.solution!;
+    const perS2 = profile.buoyancyFrequencySquaredPerS2;
+    expect(buoyancyAround(profile, 1.5)).toBe(perS2[1]);
+    expect(buoyancyAround(profile, 3)).toBe(perS2[2]);
+    expect(buoyancyAround(profile, 0.5)).toBeNaN();
+    expect(buoyancyAround(profile, 9)).toBeNaN();
+    expect(strongestStratification(profile)).toEqual({ perS2: perS2[1], depthM: 1.5 });
+  });
+});
+
+describe("exportFiles", () => {
+  const survey = surveyOf();
+  const casts = solve(survey);
+  const readings = [
+    {
+      fileName: casts[0]!.cast.fileName,
+      sha256: "ab",
+      encoding: "UTF-8",
+      delimiter: "comma",
+      decimalMark: ".",
+      headerLineIndex: 1,
+      columns: [],
+      splitBy: "station",
+      rowCount: 6,
+      issues: [],
+    },
+  ] as const;
+  const source = { survey, casts, inHand: casts[1]!, readings };
+
+  it("puts metadata with the checksum beside each table", () => {
+    const [table, metadata] = exportFiles("cast-profile", source);
+    expect(table!.name).toBe("salt-profile.csv");
+    expect(table!.text.split("\n")[1]).toMatch(/^Salt,0,/);
+    expect(metadata!.name).toBe("salt-profile.csv-metadata.json");
+    expect(JSON.parse(metadata!.text)).toMatchObject({
+      url: "salt-profile.csv",
+      notes: [{ sources: [{ sha256: "ab" }] }],
+    });
+  });
+
+  it("names files after the survey, in letters every file system takes", () => {
+    const named = { ...source, survey: { ...survey, name: "../Été: 2026 / α" } };
+    expect(exportFiles("levels", named)[0]!.name).toBe("e-te-2026-α-levels.csv");
+    expect(exportFiles("everything", { ...source, survey: { ...survey, name: "" } })[0]!.name).toBe("survey.json");
+  });
+});
+
+describe("shown numbers", () => {
+  it("carries unit and true minus, and a dash for what does not exist", () => {
+    expect(shownValue(-0.5, "departure", "SI")).toBe("−0.500\u00a0kPa");
+    expect(shownValue(3.048, "depth", "US")).toBe("10.00\u00a0ft");
+    expect(shownValue(Number.NaN, "elevation", "SI")).toBe("–");
+    expect(shownValue(0.00245, "buoyancyFrequencySquared", "SI")).toBe("2.45×10⁻³\u00a0s⁻²");
+    expect(shownPercent(-0.01234)).toBe("−1.234");
+  });
+});
