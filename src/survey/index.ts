@@ -9,8 +9,17 @@ export {
   type ReferenceDensity,
 } from "../column/index.ts";
 export type { Level, LevelId } from "../design/index.ts";
+export {
+  defaultPreparation,
+  type FlagEdit,
+  type Preparation,
+  type PreparedCast,
+  QUALITY_FLAG,
+  type WaterKind,
+} from "../quality/index.ts";
 export { type WaterChoice, waterLabel } from "../water/index.ts";
 export { addCasts } from "./add-casts.ts";
+export { addFlagEdits, removeFlagEdits, type SampleRange } from "./flag-edits.ts";
 export { type History, redo, remember, startHistory, undo } from "./history.ts";
 export { type Solution, type SolvedCast, solve, solveCast } from "./solve.ts";
 export { emptySurvey, type Survey } from "./survey.ts";

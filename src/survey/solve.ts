@@ -1,21 +1,23 @@
 import type { Issue } from "../base/index.ts";
 import type { Cast } from "../cast/index.ts";
 import { type Column, describeAtDepths, integrateCast, type Profile, sampledProfile } from "../column/index.ts";
-import { flagSamples, QUALITY_FLAG } from "../quality/index.ts";
-import type { Survey } from "./survey.ts";
+import { type PreparedCast, prepareCast, QUALITY_FLAG } from "../quality/index.ts";
+import { emptySurvey, type Survey } from "./survey.ts";
 
 /** What a survey says about one of its casts; plain data, so that it can be handed between threads. */
 export type SolvedCast = {
   readonly cast: Cast;
   /** From reading and from solving, in that order. */
   readonly issues: readonly Issue[];
+  /** The cast's samples after their tests: what each is flagged, why, and whether it is in the column. */
+  readonly prepared: PreparedCast;
 } & ({ readonly solution: Solution } | { readonly solution: null });
 
 export interface Solution {
   readonly column: Column;
   /** Surface, samples in order of depth, and the bed where it is known. */
   readonly profile: Profile;
-  /** Quality flag of each row of the profile (QARTOD); 9 where there was no sample. */
+  /** Quality flag of each row of the profile (QARTOD), the worst of a bin; 9 where there was no sample. */
   readonly flag: Uint8Array;
   /** One row a level, in the survey's order. */
   readonly levels: Profile;
@@ -24,24 +26,29 @@ export interface Solution {
 /** The one way from a survey to its results: the page, the command and the library all come through here. */
 export const solve = (survey: Survey): readonly SolvedCast[] => survey.casts.map((cast) => solveCast(survey, cast));
 
+/** What solving one cast needs of a survey; without a word on them, samples are prepared as in an empty survey. */
+type SolvingTerms = Pick<Survey, "basis" | "levels"> & Partial<Pick<Survey, "preparation" | "flagEdits">>;
+
 /** One cast of a survey. Never throws for bad data: a cast without a solution says why among its issues. */
-export function solveCast(survey: Pick<Survey, "basis" | "levels">, cast: Cast): SolvedCast {
-  const integrated = integrateCast(cast, survey.basis);
-  if (!integrated.ok) return { cast, issues: [...cast.issues, ...integrated.issues], solution: null };
+export function solveCast(survey: SolvingTerms, cast: Cast): SolvedCast {
+  const { basis, levels, preparation, flagEdits } = { ...emptySurvey, ...survey };
+  const prepared = prepareCast(cast, preparation, flagEdits, basis.unmeasuredPracticalSalinity);
+  const found = [...cast.issues, ...prepared.issues];
+  const integrated = integrateCast(prepared.cast, basis);
+  if (!integrated.ok) return { cast, issues: [...found, ...integrated.issues], prepared, solution: null };
   const column = integrated.value;
   const profile = sampledProfile(column);
-  const { flag: sampleFlag, issues: qualityIssues } = flagSamples(cast, survey.basis.unmeasuredPracticalSalinity);
   const flag = new Uint8Array(profile.n).fill(QUALITY_FLAG.missing);
   // The first row is the surface; the samples follow in the column's order.
   column.sampleIndex.forEach((sample, knot) => {
-    flag[knot + 1] = sampleFlag[sample]!;
+    flag[knot + 1] = prepared.preparedFlag[sample]!;
   });
-  const levels = describeAtDepths(
+  const atLevels = describeAtDepths(
     column,
-    survey.levels.map((level) => level.depthM),
+    levels.map((level) => level.depthM),
   );
-  const issues = [...cast.issues, ...integrated.issues, ...qualityIssues, ...levelIssues(survey, column)];
-  return { cast, issues, solution: { column, profile, flag, levels } };
+  const issues = [...found, ...integrated.issues, ...levelIssues(survey, column)];
+  return { cast, issues, prepared, solution: { column, profile, flag, levels: atLevels } };
 }
 
 function levelIssues(survey: Pick<Survey, "levels">, column: Column): readonly Issue[] {

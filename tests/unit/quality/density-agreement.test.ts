@@ -1,11 +1,15 @@
 import { describe, expect, it } from "vitest";
-import { flagSamples, QUALITY_FLAG } from "../../../src/quality/index.ts";
+import { defaultPreparation, prepareCast, QUALITY_FLAG } from "../../../src/quality/index.ts";
 import { castOf } from "../../support/cast-of.ts";
 import { readDataFile } from "../cast/reading.ts";
 
+const flagsOf = (columns: Parameters<typeof castOf>[0]) => [
+  ...prepareCast(castOf(columns), defaultPreparation, [], 0).flag,
+];
+
 const suspects = (fileName: string) =>
   readDataFile(fileName).casts.flatMap((cast) => {
-    const { flag, issues } = flagSamples(cast, 0);
+    const { flag, issues } = prepareCast(cast, defaultPreparation, [], 0);
     const lines = [...flag.keys()]
       .filter((i) => flag[i] === QUALITY_FLAG.suspect)
       .map((i) => cast.samples.lineIndex[i]!);
@@ -30,7 +34,7 @@ describe("a density anomaly that the file states", () => {
 
   it("flags nothing where a row or the file states none", () => {
     const sample = { depthM: [1, 2], inSituTempC: [10, 10], practicalSalinity: [20, 20] };
-    expect([...flagSamples(castOf(sample), 0).flag]).toEqual([2, 2]);
-    expect([...flagSamples(castOf({ ...sample, statedSigmaKgM3: [Number.NaN, 12] }), 0).flag]).toEqual([2, 3]);
+    expect(flagsOf(sample)).toEqual([2, 2]);
+    expect(flagsOf({ ...sample, statedSigmaKgM3: [Number.NaN, 12] })).toEqual([2, 3]);
   });
 });
