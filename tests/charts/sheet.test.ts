@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import {
   type CurveInput,
+  layOutLevels,
   layOutPlumb,
   layOutSheet,
   type PanelInput,
@@ -36,7 +37,6 @@ const sheet = (over: Partial<SheetInput> = {}): SheetInput => ({
   depthUnit: "m",
   deepest: 10,
   panels: [panel("left"), panel("right", { share: 2 })],
-  levels: [],
   gaps: [],
   ...over,
 });
@@ -88,19 +88,6 @@ describe("layOutSheet", () => {
     expect(n2([1e-9, 1e-2, Number.NaN])).toEqual(["thin: below 10⁻⁷"]);
   });
 
-  it("puts the name of a level where no curve runs, and not upon another name", () => {
-    const steep = panel("right", { curves: [curve([10, 10, 10])] });
-    const levels = [
-      { levelId: "1", depth: 5, label: "Intake · 5.00 m" },
-      { levelId: "2", depth: 5.05, label: "Logger · 5.05 m" },
-    ];
-    const [first, second] = layOutSheet(sheet({ panels: [panel("left"), steep], levels }), size).levels;
-    const { axis } = layOutSheet(sheet({ panels: [panel("left"), steep] }), size).panels[1]!;
-    // The curve stands in the middle of the right panel; both ends are free, the right one is liked better.
-    expect(first).toMatchObject({ anchor: "end", labelXPx: axis.rightPx - 5 });
-    expect([second!.labelXPx, second!.labelYPx]).not.toEqual([first!.labelXPx, first!.labelYPx]);
-  });
-
   it("stands without casts", () => {
     const laid = layOutSheet(sheet({ deepest: 0, panels: [panel("left", { curves: [] })] }), size);
     expect(laid.panels[0]!.curves).toEqual([]);
@@ -137,5 +124,41 @@ describe("layOutPlumb", () => {
       { colourIndex: 0, isInHand: true, values: { left: -4, right: 99 } },
     ]);
     expect(plumb.dots).toEqual([]);
+  });
+});
+
+describe("layOutLevels", () => {
+  const levels = [
+    { levelId: "1", depth: 5.15, label: "Intake · 5.15 m" },
+    { levelId: "2", depth: 5.2, label: "Logger · 5.20 m" },
+  ];
+  const upright = (value: number) => panel("right", { curves: [curve([value, value, value])] });
+
+  it("puts a name at the right end of the last panel where no curve runs there", () => {
+    // One value stands in the middle of its axis, so both ends of the panel are free.
+    const laid = layOutSheet(sheet({ panels: [panel("left"), upright(10)] }), size);
+    const [first] = layOutLevels(laid, levels);
+    const { rightPx } = laid.panels[1]!.axis;
+    expect(first).toMatchObject({ levelId: "1", anchor: "end", labelXPx: rightPx - 5 });
+    expect(first!.yPx).toBeCloseTo(194, 9);
+    expect(first!.labelYPx).toBeCloseTo(189, 9);
+  });
+
+  it("moves a name away from curves and from other names", () => {
+    const wall = panel("right", { curves: [curve([9, 9, 9]), curve([0, 0, 0]), curve([10, 10, 10])] });
+    const laid = layOutSheet(sheet({ panels: [panel("left"), wall] }), size);
+    const [first, second] = layOutLevels(laid, levels);
+    expect(first).toMatchObject({ anchor: "start", labelXPx: laid.panels[1]!.axis.leftPx + 5 });
+    expect(second).not.toMatchObject({ labelXPx: first!.labelXPx, labelYPx: first!.labelYPx });
+  });
+
+  it("keeps a long name within the sheet", () => {
+    const laid = layOutSheet(
+      sheet({ panels: [panel("left"), panel("right", { curves: [curve([1, 5, 9]), curve([9, 5, 1])] })] }),
+      size,
+    );
+    const label = "An intake with a name that is longer than a panel is wide";
+    const [level] = layOutLevels(laid, [{ levelId: "1", depth: 5, label }]);
+    expect(level).toMatchObject({ anchor: "end", labelXPx: laid.rightPx - 5 });
   });
 });

@@ -38,6 +38,23 @@ describe("basis, units and history", () => {
     expect(await page.getByRole("alert").count()).toBe(0);
   });
 
+  it("keeps an entry when the next one is filled at once", async () => {
+    const { page } = await session.open();
+    await loadSample(page);
+    for (const [label, value] of [
+      ["Bed depth", "19"],
+      ["Surface elevation", "1.5"],
+      ["Air pressure", "99"],
+    ] as const) {
+      await page.getByLabel(label).fill(value);
+      await page.keyboard.press("Enter");
+    }
+    await page.getByLabel("Latitude").focus();
+    expect(await page.getByLabel("Bed depth").inputValue()).toBe("19");
+    expect(await page.getByLabel("Surface elevation").inputValue()).toBe("1.5");
+    await expect.poll(() => page.getByText("Bed gap").textContent()).toMatch(/^Bed gap 0\.\d\d/);
+  });
+
   it("gives elevations once a datum is given", async () => {
     const { page } = await session.open();
     await loadSample(page);

@@ -25,6 +25,7 @@ export function App() {
       <main>
         <FileTroubles />
         <Notes />
+        <Progress />
         {survey.value.casts.length === 0 ? <EmptyState /> : <ColumnPlace />}
       </main>
       <aside id="basis" class={isBasisOpen.value ? "open" : ""} aria-label="Basis and summary">
@@ -52,19 +53,27 @@ function ColumnPlace() {
 }
 
 function Notes() {
-  const running = progress.value;
+  const troubles = [savingTrouble.value, solvingTrouble.value].filter((trouble) => trouble !== "");
   return (
     <div class="notes" role="status">
-      {savingTrouble.value ? <p class="warn">{savingTrouble.value}</p> : null}
-      {solvingTrouble.value ? <p class="warn">{solvingTrouble.value}</p> : null}
-      {running ? (
-        <p>
-          Solving: {running.doneCount} of {running.allCount} casts done{" "}
-          <button type="button" class="small" onClick={() => dispatch({ kind: "undone" })}>
-            Stop and undo
-          </button>
+      {troubles.map((trouble) => (
+        <p key={trouble} class="warn">
+          {trouble}
         </p>
-      ) : null}
+      ))}
     </div>
   );
+}
+
+/** Lies over the place's heading, so that nothing moves when it comes and goes. */
+function Progress() {
+  const running = progress.value;
+  return running ? (
+    <p class="progress">
+      Solving: {running.doneCount} of {running.allCount} casts done{" "}
+      <button type="button" class="small" onClick={() => dispatch({ kind: "undone" })}>
+        Stop and undo
+      </button>
+    </p>
+  ) : null;
 }

@@ -1,4 +1,5 @@
 import type { Basis, DepthMade, SolvedCast, WaterChoice } from "../../survey/index.ts";
+import type { DisplaySystem } from "../../units/index.ts";
 import { shownValue } from "../show/shown.ts";
 import { castInHand, dispatch, state, survey } from "../store.ts";
 import { Choice } from "./choice.tsx";
@@ -104,7 +105,7 @@ export function BasisPanel() {
         system={system}
         least={0.01}
         most={12_000}
-        emptyMeans="last sample"
+        emptyMeans={bedWithout(inHand, system)}
         onValue={(bedDepthM) => change({ bedDepthM })}
       />
       <QuantityEntry
@@ -130,6 +131,12 @@ export function BasisPanel() {
 function latitudeWithout(inHand: SolvedCast | null): string {
   const fromFile = inHand?.cast.latitudeDeg ?? null;
   return fromFile === null ? "standard gravity" : `${Number(fromFile.toFixed(4))}° from file`.replace("-", "−");
+}
+
+/** What stands in when the basis gives no bed. */
+function bedWithout(inHand: SolvedCast | null, system: DisplaySystem): string {
+  const fromFile = inHand?.cast.waterDepthM ?? null;
+  return fromFile === null ? "last sample" : `${shownValue(fromFile, "depth", system)} from file`;
 }
 
 /** The gaps can only be held as yet; said all the same, with their thickness, since numbers there stand on no sample. */

@@ -41,7 +41,7 @@ function HowRead({ reading }: { readonly reading: KeptReading }) {
           <div key={column.columnIndex}>
             <dt>
               <b>{column.header || `column ${column.columnIndex + 1}`}</b> {column.role ? "→ " : ""}
-              {column.role ? ROLE_WORDS[column.role] : ""}
+              {column.role ? inWords(column.role) : ""}
               {column.unit && column.unit !== "1" ? `, ${column.unit}` : ""}
             </dt>
             <dd>{column.reason}</dd>
@@ -52,20 +52,5 @@ function HowRead({ reading }: { readonly reading: KeptReading }) {
   );
 }
 
-const ROLE_WORDS: Readonly<Record<NonNullable<KeptReading["columns"][number]["role"]>, string>> = {
-  depth: "depth",
-  seaPressure: "sea pressure",
-  temperature: "temperature",
-  practicalSalinity: "practical salinity",
-  conductivity: "conductivity",
-  specificConductance: "specific conductance",
-  densityAnomaly: "density anomaly",
-  station: "station",
-  castName: "cast name",
-  date: "date",
-  clock: "time of day",
-  dateTime: "date and time",
-  latitude: "latitude",
-  longitude: "longitude",
-  distance: "distance",
-};
+/** @example inWords("specificConductance") // "specific conductance" */
+const inWords = (role: string): string => role.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);

@@ -92,6 +92,7 @@ function LevelRow({ level, levelIndex, columns, system }: RowProps) {
         <input
           type="text"
           class="level-name"
+          maxLength={40}
           aria-label={`Name of ${level.name}`}
           value={level.name}
           onChange={(event) =>
@@ -112,7 +113,7 @@ function LevelRow({ level, levelIndex, columns, system }: RowProps) {
       <td>
         <QuantityEntry
           label={`Depth of ${level.name}`}
-          isLabelHidden
+          isCell
           value={level.depthM}
           quantity="depth"
           system={system}

@@ -1,4 +1,5 @@
-import { useEffect, useId, useState } from "preact/hooks";
+import type { JSX } from "preact";
+import { useId, useState } from "preact/hooks";
 import { convert, type DisplaySystem, displayUnit, type UnitSymbol, unitOf } from "../../units/index.ts";
 import { ownUnit, type PageQuantity } from "../show/shown.ts";
 
@@ -8,11 +9,13 @@ const TRUE_MINUS = "−";
 const MOST_TYPED_DECIMALS_COUNT = 4;
 
 /** As many digits as were given, but none that a change of units made up. */
-function entryText(value: number | null, digitsCount: number): string {
+function entryText(value: number | null, digitsCount: number, isPadded = false): string {
   if (value === null) return "";
   const given = String(Number(value.toPrecision(8)));
-  const isTyped = (given.split(".")[1] ?? "").length <= MOST_TYPED_DECIMALS_COUNT;
-  return (isTyped ? given : String(Number(value.toFixed(digitsCount)))).replace("-", TRUE_MINUS);
+  const decimalsCount = (given.split(".")[1] ?? "").length;
+  const fixed = value.toFixed(digitsCount);
+  const isFixed = decimalsCount > MOST_TYPED_DECIMALS_COUNT || (isPadded && decimalsCount < digitsCount);
+  return (isFixed ? (isPadded ? fixed : String(Number(fixed))) : given).replace("-", TRUE_MINUS);
 }
 
 const parsed = (text: string): number => {
@@ -29,7 +32,8 @@ interface EntryProps {
   /** What shows in an empty entry; with it, an empty entry means null. */
   readonly emptyMeans?: string;
   readonly onValue: (value: number | null) => void;
-  readonly isLabelHidden?: boolean;
+  /** In a table: no visible label or unit, and as many decimals as its neighbours. */
+  readonly isCell?: boolean;
 }
 
 interface UnitProps {
@@ -41,47 +45,41 @@ interface UnitProps {
 
 /** An entry for one number. What it cannot take it refuses with the range in a sentence; the last good value stays. */
 export function NumberEntry(props: EntryProps & UnitProps) {
-  const { label, value, unit, shownUnit, digitsCount, emptyMeans, isLabelHidden } = props;
+  const { label, value, unit, shownUnit, digitsCount, emptyMeans, isCell } = props;
   const id = useId();
-  const good = entryText(value === null ? null : convert(value, unit, shownUnit), digitsCount);
-  const [text, setText] = useState(good);
-  const [refusal, setRefusal] = useState("");
+  const good = entryText(value === null ? null : convert(value, unit, shownUnit), digitsCount, isCell);
+  // What is being typed and not yet taken; null shows the good value, whatever that has become meanwhile.
+  const [draft, setDraft] = useState<string | null>(null);
+  const [refusedRange, setRefusedRange] = useState("");
+  const text = draft ?? good;
   const unitLabel = unitOf(shownUnit).label;
-  useEffect(() => {
-    setText(good);
-    setRefusal("");
-  }, [good]);
+  const refusal = refusedRange && `${label} must be a number ${refusedRange}; ${kept(good, emptyMeans)}`;
 
-  const commit = (): void => {
-    if (text === good) return;
-    if (text.trim() === "" && emptyMeans !== undefined) {
-      props.onValue(null);
-      return;
-    }
-    const entered = convert(parsed(text), shownUnit, unit);
-    if (entered >= props.least && entered <= props.most) {
-      setRefusal("");
-      // A new value comes back as props and replaces this.
-      setText(good);
-      props.onValue(entered);
+  const settle = (): void => {
+    setDraft(null);
+    setRefusedRange("");
+  };
+  const commit = (typed: string): void => {
+    const meansNull = typed.trim() === "" && emptyMeans !== undefined;
+    const entered = meansNull ? null : convert(parsed(typed), shownUnit, unit);
+    if (typed === good || entered === null || (entered >= props.least && entered <= props.most)) {
+      settle();
+      if (typed !== good) props.onValue(entered);
       return;
     }
     const [least, most] = [props.least, props.most].map((end) =>
       entryText(Number(convert(end, unit, shownUnit).toPrecision(4)), digitsCount),
     );
-    const range = `from ${least} to ${most}${unitLabel && ` ${unitLabel}`}`;
-    setRefusal(`${label} must be a number ${range}; ${kept(good, emptyMeans)}`);
+    setRefusedRange(`from ${least} to ${most}${unitLabel && ` ${unitLabel}`}`);
   };
-  const onKeyDown = (event: KeyboardEvent): void => {
-    if (event.key === "Enter") commit();
-    if (event.key !== "Escape") return;
-    setText(good);
-    setRefusal("");
+  const onKeyDown = (event: JSX.TargetedKeyboardEvent<HTMLInputElement>): void => {
+    if (event.key === "Enter") commit(event.currentTarget.value);
+    if (event.key === "Escape") settle();
   };
 
   return (
     <div class={`entry${refusal ? " refused" : ""}`}>
-      <label for={id} class={isLabelHidden ? "hidden-text" : ""}>
+      <label for={id} class={isCell ? "hidden-text" : ""}>
         {label}
       </label>
       <span class="field">
@@ -94,11 +92,11 @@ export function NumberEntry(props: EntryProps & UnitProps) {
           placeholder={emptyMeans ?? ""}
           aria-invalid={refusal !== ""}
           aria-describedby={refusal ? `${id}-refusal` : undefined}
-          onInput={(event) => setText(event.currentTarget.value)}
-          onBlur={commit}
+          onInput={(event) => setDraft(event.currentTarget.value)}
+          onBlur={(event) => commit(event.currentTarget.value)}
           onKeyDown={onKeyDown}
         />
-        {unitLabel && (text !== "" || emptyMeans === undefined) && !isLabelHidden ? (
+        {unitLabel && (text !== "" || emptyMeans === undefined) && !isCell ? (
           <span class="unit">{unitLabel}</span>
         ) : null}
       </span>

@@ -1,10 +1,10 @@
 import { useComputed, useSignal, useSignalEffect } from "@preact/signals";
 import { useEffect, useRef } from "preact/hooks";
-import { drawPlumb, drawSheet } from "../../charts/draw/index.ts";
-import { depthAtPx, layOutPlumb, layOutSheet } from "../../charts/layout/index.ts";
+import { drawLevels, drawPlumb, drawSheet } from "../../charts/draw/index.ts";
+import { depthAtPx, layOutLevels, layOutPlumb, layOutSheet } from "../../charts/layout/index.ts";
 import type { LevelId } from "../../survey/index.ts";
 import { convert, displayUnit } from "../../units/index.ts";
-import { plumbValues, profileSheet, type SheetSource } from "../show/profile-sheet.ts";
+import { levelInputs, plumbValues, profileSheet, type SheetSource } from "../show/profile-sheet.ts";
 import { shownValue } from "../show/shown.ts";
 import { castInHand, dispatch, plumbDepthM, solved, state, survey, visibleCasts } from "../store.ts";
 
@@ -19,30 +19,28 @@ const CLICK_SLACK_PX = 5;
 
 /** The linked panels. One slider for keyboard and screen reader: its value is the depth of the plumb line. */
 export function ProfileCharts() {
-  const svg = useRef<SVGSVGElement>(null);
+  const curves = useRef<SVGSVGElement>(null);
+  const overlay = useRef<SVGSVGElement>(null);
   const size = useSignal({ widthPx: 0, heightPx: 0 });
   const drag = useSignal<Drag | null>(null);
   const pressedAtPx = useRef<number | null>(null);
   const source = useComputed((): SheetSource => {
     const { castInHandId, colourIndexOf, system } = state.value;
-    const levels = survey.value.levels.map((level) =>
-      level.id === drag.value?.levelId ? { ...level, depthM: drag.value.depthM } : level,
-    );
-    return {
-      solved: visibleCasts.value,
-      castInHandId,
-      colourIndexOf,
-      basis: solved.value.survey.basis,
-      levels,
-      system,
-    };
+    const { levels } = survey.value;
+    const { basis } = solved.value.survey;
+    return { solved: visibleCasts.value, castInHandId, colourIndexOf, basis, levels, system };
   });
   const sheet = useComputed(() =>
     size.value.widthPx > 0 ? layOutSheet(profileSheet(source.value), size.value) : null,
   );
+  const levels = useComputed(() =>
+    survey.value.levels.map((level) =>
+      level.id === drag.value?.levelId ? { ...level, depthM: drag.value.depthM } : level,
+    ),
+  );
 
   useEffect(() => {
-    const frame = svg.current!.parentElement!;
+    const frame = overlay.current!.parentElement!;
     const observer = new ResizeObserver(() => {
       size.value = { widthPx: frame.clientWidth, heightPx: frame.clientHeight };
     });
@@ -50,14 +48,20 @@ export function ProfileCharts() {
     return () => observer.disconnect();
   }, [size]);
   useSignalEffect(() => {
-    if (sheet.value) drawSheet(svg.current!, sheet.value);
+    if (sheet.value) drawSheet(curves.current!, sheet.value);
+  });
+  useSignalEffect(() => {
+    if (!sheet.value) return;
+    const laid = layOutLevels(sheet.value, levelInputs(levels.value, state.value.system));
+    drawLevels(overlay.current!, sheet.value, laid);
   });
   useSignalEffect(() => {
     if (!sheet.value) return;
     const depthM = plumbDepthM.value;
     const depth = depthM === null ? null : inShownDepth(depthM);
     drawPlumb(
-      svg.current!,
+      overlay.current!,
+      sheet.value,
       depthM === null || depth === null || depth > sheet.value.depth.bottom
         ? null
         : layOutPlumb(sheet.value, depth, plumbValues(source.value, depthM)),
@@ -66,7 +70,7 @@ export function ProfileCharts() {
 
   const deepestM = (): number => inMetres(sheet.value?.depth.bottom ?? 0);
   const depthUnder = (event: PointerEvent): number => {
-    const box = svg.current!.getBoundingClientRect();
+    const box = overlay.current!.getBoundingClientRect();
     return sheet.value ? tidyDepthM(inMetres(depthAtPx(sheet.value.depth, event.clientY - box.top))) : 0;
   };
   const onPointerDown = (event: PointerEvent): void => {
@@ -74,7 +78,7 @@ export function ProfileCharts() {
     pressedAtPx.current = event.clientY;
     const levelId = (event.target as Element).closest<SVGGElement>("[data-level]")?.dataset.level;
     if (!levelId) return;
-    svg.current!.setPointerCapture(event.pointerId);
+    overlay.current!.setPointerCapture(event.pointerId);
     drag.value = { levelId: levelId as LevelId, depthM: depthUnder(event) };
   };
   const onPointerMove = (event: PointerEvent): void => {
@@ -114,8 +118,9 @@ export function ProfileCharts() {
       aria-valuetext={shownValue(depthM, "depth", state.value.system)}
       onKeyDown={onKeyDown}
     >
+      <svg ref={curves} aria-hidden="true" />
       <svg
-        ref={svg}
+        ref={overlay}
         aria-hidden="true"
         onPointerDown={onPointerDown}
         onPointerMove={onPointerMove}

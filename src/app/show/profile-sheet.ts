@@ -1,4 +1,4 @@
-import type { CurveInput, PanelInput, PlumbValue, SheetInput } from "../../charts/layout/index.ts";
+import type { CurveInput, LevelInput, PanelInput, PlumbValue, SheetInput } from "../../charts/layout/index.ts";
 import { type Basis, describeAtDepths, type Level, type Profile, type SolvedCast } from "../../survey/index.ts";
 import { convert, convertArray, type DisplaySystem, displayUnit } from "../../units/index.ts";
 import { ownUnit, type PageQuantity, shownValue, unitLabel } from "./shown.ts";
@@ -122,17 +122,20 @@ export function profileSheet(source: SheetSource): SheetInput {
       unit: unitLabel(quantity, system),
       curves: curvesOf(PANELS[k]!),
     })),
-    levels: levels.map(({ id, name, depthM }) => ({
-      levelId: id,
-      depth: inShownUnitOne(depthM, "depth", system),
-      label: `${name} · ${shownValue(depthM, "depth", system)}`,
-    })),
     gaps: gapsOf(drawn.find(({ cast }) => cast.id === source.castInHandId)).map(([fromM, toM]) => ({
       from: inShownUnitOne(fromM, "depth", system),
       to: inShownUnitOne(toM, "depth", system),
     })),
   };
 }
+
+/** Levels as the charts write them. */
+export const levelInputs = (levels: readonly Level[], system: DisplaySystem): readonly LevelInput[] =>
+  levels.map(({ id, name, depthM }) => ({
+    levelId: id,
+    depth: inShownUnitOne(depthM, "depth", system),
+    label: `${name} · ${shownValue(depthM, "depth", system)}`,
+  }));
 
 /** Depths in m between which a cast has no samples, at the surface and at the bed. */
 function gapsOf(inHand: SolvedCast | undefined): readonly (readonly [number, number])[] {

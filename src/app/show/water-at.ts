@@ -4,8 +4,7 @@ import type { Column, Profile } from "../../survey/index.ts";
 export type Behind = "sampled" | "above-first-sample" | "below-last-sample" | "no-water";
 
 export function behindDepth(column: Column, depthM: number): Behind {
-  const bedKnown = column.basis.bedDepthM === column.bottomDepthM;
-  if (!(depthM >= 0) || (bedKnown && depthM > column.bottomDepthM)) return "no-water";
+  if (!(depthM >= 0) || depthM > (column.bedDepthM ?? Number.POSITIVE_INFINITY)) return "no-water";
   if (depthM < column.depthM[0]!) return "above-first-sample";
   return depthM > column.depthM[column.n - 1]! ? "below-last-sample" : "sampled";
 }

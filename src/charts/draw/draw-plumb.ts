@@ -1,11 +1,14 @@
-import { select } from "d3-selection";
-import type { PlumbLayout } from "../layout/index.ts";
+import type { PlumbLayout, SheetLayout } from "../layout/index.ts";
+import { layer, sized } from "./layer.ts";
 
 const WEIGHT = "l9,5l-9,5z";
 
-/** Draws the plumb line over a sheet, or takes it away. Cheap enough for every move of the pointer. */
-export function drawPlumb(root: SVGSVGElement, plumb: PlumbLayout | null): void {
-  const group = select(root).selectChild("g.plumb");
+/**
+ * Draws the plumb line in an element that lies over the sheet, or takes it away. In an element of its own, so that a move
+ * of the pointer does not make the browser paint all curves again.
+ */
+export function drawPlumb(root: SVGSVGElement, sheet: SheetLayout, plumb: PlumbLayout | null): void {
+  const group = layer(sized(root, sheet), "plumb");
   const lines = plumb
     ? [
         { look: "line", path: `M${plumb.leftPx},${plumb.yPx}H${plumb.rightPx}` },

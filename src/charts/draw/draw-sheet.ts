@@ -1,5 +1,6 @@
 import { type Selection, select } from "d3-selection";
 import type { SheetLayout } from "../layout/index.ts";
+import { layer, sized } from "./layer.ts";
 
 /* Joins a sheet's layout to an SVG element. Classes carry the look (charts.css); a cast's colour comes by its class. */
 
@@ -7,23 +8,13 @@ type Group = Selection<SVGGElement, unknown, null, undefined>;
 type Panel = SheetLayout["panels"][number];
 
 const TICK_ABOVE_PX = 6;
-const FLAG = "l-9,-5v10z";
-const FLAG_GAP_PX = 3;
 const NOTE_LINE_PX = 13;
 
-/** Draws everything that stays while the pointer moves. */
+/** Draws axes and curves: what stays while the pointer moves. */
 export function drawSheet(root: SVGSVGElement, sheet: SheetLayout): void {
-  const svg = select(root)
-    .attr("viewBox", `0 0 ${sheet.widthPx} ${sheet.heightPx}`)
-    .classed("crowded", sheet.isCrowded);
-  const layer = (name: string): Group => {
-    const found = svg.selectChild<SVGGElement>(`g.${name}`);
-    return found.empty() ? svg.append("g").attr("class", name) : found;
-  };
-  drawDepthAxis(layer("depth-axis"), sheet);
-  drawPanels(layer("panels"), sheet);
-  drawLevels(layer("levels"), sheet);
-  layer("plumb");
+  const svg = sized(root, sheet).classed("crowded", sheet.isCrowded);
+  drawDepthAxis(layer(svg, "depth-axis"), sheet);
+  drawPanels(layer(svg, "panels"), sheet);
 }
 
 function drawDepthAxis(group: Group, sheet: SheetLayout): void {
@@ -133,31 +124,4 @@ function drawPanel(group: Group, panel: Panel, { depth, gaps }: SheetLayout): vo
     .attr("x", (text) => text.xPx)
     .attr("y", (text) => text.yPx)
     .text((text) => text.label);
-}
-
-function drawLevels(group: Group, sheet: SheetLayout): void {
-  const joined = group
-    .selectAll<SVGGElement, SheetLayout["levels"][number]>("g.level")
-    .data(sheet.levels, (level) => level.levelId)
-    .join((enter) => {
-      const level = enter.append("g").attr("class", "level");
-      level.append("path").attr("class", "line");
-      level.append("path").attr("class", "flag");
-      level.append("rect").attr("class", "handle").attr("width", 30).attr("height", 24);
-      level.append("text").attr("class", "name");
-      return level;
-    })
-    .attr("data-level", (level) => level.levelId);
-  joined.select("path.line").attr("d", (level) => `M${sheet.leftPx - FLAG_GAP_PX},${level.yPx}H${sheet.rightPx}`);
-  joined.select("path.flag").attr("d", (level) => `M${sheet.leftPx - FLAG_GAP_PX},${level.yPx}${FLAG}`);
-  joined
-    .select("rect.handle")
-    .attr("x", sheet.leftPx - 28)
-    .attr("y", (level) => level.yPx - 12);
-  joined
-    .select("text.name")
-    .attr("text-anchor", (level) => level.anchor)
-    .attr("x", (level) => level.labelXPx)
-    .attr("y", (level) => level.labelYPx)
-    .text((level) => level.label);
 }

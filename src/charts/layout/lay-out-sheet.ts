@@ -1,6 +1,5 @@
 import { type DepthAxis, depthAxis, depthPx } from "./depth-axis.ts";
 import { layOutCurve } from "./lay-out-curve.ts";
-import { placeLevelLabels } from "./place-level-labels.ts";
 import { powerOfTen } from "./power-of-ten.ts";
 import type { PanelInput, PanelLayout, SheetInput, SheetLayout, Size } from "./sheet.ts";
 import { labelWidthPx, titleWidthPx } from "./text-width.ts";
@@ -13,7 +12,7 @@ const LEAST_PANEL_PX = 118;
 const FEW_CURVES_COUNT = 20;
 const CROWD_CURVES_COUNT = 60;
 
-/** Panels side by side over one depth axis, to fill a size. */
+/** Panels side by side over one depth axis, to fill a size. Levels come after, so that one can be dragged at little cost. */
 export function layOutSheet(input: SheetInput, size: Size): SheetLayout {
   const leftPx = MARGIN.leftPx;
   const rightPx = size.widthPx - MARGIN.rightPx;
@@ -35,7 +34,6 @@ export function layOutSheet(input: SheetInput, size: Size): SheetLayout {
     depthUnit: input.depthUnit,
     depth,
     panels,
-    levels: placeLevelLabels(input.levels, (at) => depthPx(depth, at), panels),
     gaps: input.gaps.map(({ from, to }) => ({
       topPx: depthPx(depth, from),
       heightPx: depthPx(depth, to) - depthPx(depth, from),

@@ -43,7 +43,6 @@ export interface SheetInput {
   readonly depthUnit: string;
   readonly deepest: number;
   readonly panels: readonly PanelInput[];
-  readonly levels: readonly LevelInput[];
   /** Stretches of depth without samples in the cast in hand. */
   readonly gaps: readonly { readonly from: number; readonly to: number }[];
 }
@@ -97,6 +96,5 @@ export interface SheetLayout extends Size {
   readonly depthUnit: string;
   readonly depth: DepthAxis;
   readonly panels: readonly PanelLayout[];
-  readonly levels: readonly LevelLayout[];
   readonly gaps: readonly { readonly topPx: number; readonly heightPx: number }[];
 }

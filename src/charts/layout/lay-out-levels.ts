@@ -1,4 +1,7 @@
-import type { LevelInput, LevelLayout, PanelLayout } from "./sheet.ts";
+import { bisector } from "d3-array";
+import type { Point } from "./decimate-line.ts";
+import { depthPx } from "./depth-axis.ts";
+import type { LevelInput, LevelLayout, PanelLayout, SheetLayout } from "./sheet.ts";
 import { labelWidthPx } from "./text-width.ts";
 
 interface Box {
@@ -15,21 +18,25 @@ const INSET_PX = 5;
 /** Beyond this many curves a panel is full wherever one looks. */
 const MOST_CURVES_COUNT = 30;
 
+/** Against one for a curve that is crossed. */
+const COVERED_COST = 100;
+const CUT_COST = 10_000;
+
 type Placing = Omit<LevelLayout, "levelId" | "label" | "yPx"> & { readonly box: Box };
 
-/** Puts each level's name at the end of a panel where it crosses the fewest curves and no other name. */
-export function placeLevelLabels(
-  levels: readonly LevelInput[],
-  yPxOf: (depth: number) => number,
-  panels: readonly PanelLayout[],
-): readonly LevelLayout[] {
+/** Levels across a sheet: each name stands at the end of a panel where it crosses the fewest curves and no other name. */
+export function layOutLevels(sheet: SheetLayout, levels: readonly LevelInput[]): readonly LevelLayout[] {
+  const { depth, panels } = sheet;
   const taken: Box[] = [];
   return levels.map((level) => {
-    const yPx = yPxOf(level.depth);
+    const yPx = depthPx(depth, level.depth);
     let best: Placing | null = null;
     let leastCost = Number.POSITIVE_INFINITY;
     for (const placing of placings(level, yPx, panels)) {
-      const cost = 100 * taken.filter((box) => overlap(box, placing.box)).length + crossings(placing.box, panels);
+      const { box } = placing;
+      const isCut = box.leftPx < sheet.leftPx || box.rightPx > sheet.rightPx;
+      const coveredCount = taken.filter((other) => overlap(other, box)).length;
+      const cost = (isCut ? CUT_COST : 0) + COVERED_COST * coveredCount + crossings(box, panels);
       if (cost < leastCost) {
         best = placing;
         leastCost = cost;
@@ -63,21 +70,21 @@ function crossings(box: Box, panels: readonly PanelLayout[]): number {
   for (const { axis, curves } of panels) {
     if (box.leftPx < axis.leftPx && box.rightPx > axis.leftPx) count += 2;
     if (box.rightPx < axis.leftPx || box.leftPx > axis.rightPx) continue;
-    for (const { points } of curves.slice(-MOST_CURVES_COUNT))
-      for (let i = 1; i < points.length; i++) {
-        const [x0, y0] = points[i - 1]!;
-        const [x1, y1] = points[i]!;
-        const leg = {
-          leftPx: Math.min(x0, x1),
-          rightPx: Math.max(x0, x1),
-          topPx: Math.min(y0, y1),
-          bottomPx: Math.max(y0, y1),
-        };
-        if (y1 - y0 < 1e3 && overlap(leg, box)) {
-          count++;
-          break;
-        }
-      }
+    for (const { points } of curves.slice(-MOST_CURVES_COUNT)) if (crosses(points, box)) count++;
   }
   return count;
 }
+
+/** Whether a curve, which runs down the page, has a leg through a box. */
+function crosses(points: readonly Point[], box: Box): boolean {
+  for (let i = Math.max(1, firstBelow(points, box.topPx)); i < points.length; i++) {
+    const [x0, y0] = points[i - 1]!;
+    const [x1, y1] = points[i]!;
+    if (y0 > box.bottomPx) return false;
+    if (overlap({ leftPx: Math.min(x0, x1), rightPx: Math.max(x0, x1), topPx: y0 - 1, bottomPx: y1 + 1 }, box))
+      return true;
+  }
+  return false;
+}
+
+const firstBelow = bisector((point: Point) => point[1]).left;
