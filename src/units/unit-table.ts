@@ -37,7 +37,12 @@ export const UNITS = [
   unit("pressure", "MPa", 1e6, ["megapascal", "megapascals"]),
   unit("pressure", "dbar", 1e4, ["decibar", "decibars", "db", "dbars"]),
   unit("pressure", "bar", 1e5, ["bars"]),
-  unit("pressure", "psi", POUND_FORCE_N / (FOOT_M / 12) ** 2, ["lbf/in2", "psig", "pound_force_per_square_inch"]),
+  unit("pressure", "psi", POUND_FORCE_N / (FOOT_M / 12) ** 2, [
+    "lbf/in2",
+    "psig",
+    "psia",
+    "pound_force_per_square_inch",
+  ]),
   unit("pressure", "mH2O", WATER_COLUMN_PA, ["m_H2O", "meter_H2O", "mwc"], { label: "mH₂O" }),
   unit("pressure", "ftH2O", WATER_COLUMN_PA * FOOT_M, ["ft_H2O", "foot_H2O", "feet_H2O"], { label: "ftH₂O" }),
   unit("pressure", "mmHg", 13.5951 * STANDARD_GRAVITY_MS2, ["mm_Hg", "millimeter_Hg"]),
@@ -101,9 +106,15 @@ export const UNITS = [
     ],
     { label: "µS/cm" },
   ),
+  // To the conductivity of standard sea water at 15 degC (IPTS-68), 42.914 mS/cm: Culkin and Smith (1980).
+  unit("conductivity", "ratio", 42914, ["conductivity ratio", "R", "C(S,t,p)/C(35,15,0)"]),
 
-  unit("density", "kg/m3", 1, ["kg m-3", "kilogram per cubic meter", "kilograms per cubic metre"], { label: "kg/m³" }),
+  unit("density", "kg/m3", 1, ["kg m-3", "g/L", "g L-1", "kilogram per cubic meter", "kilograms per cubic metre"], {
+    label: "kg/m³",
+  }),
   unit("density", "g/cm3", 1000, ["g cm-3", "g/cc", "g/ml", "kg/L", "t/m3"], { label: "g/cm³" }),
+  // Dissolved and suspended matter is given per volume; a part in a million of fresh water is the same number.
+  unit("density", "mg/L", 1e-3, ["mg l-1", "g m-3", "ppm", "milligrams per liter", "milligrams per litre"]),
   unit("density", "lb/ft3", POUND_KG / FOOT_M ** 3, ["lbm/ft3", "lb ft-3", "pcf", "pounds per cubic foot"], {
     label: "lb/ft³",
   }),
@@ -159,6 +170,11 @@ export const UNITS = [
       label: "°",
     },
   ),
+
+  unit("time", "s", 1, ["sec", "secs", "second", "seconds"]),
+  unit("time", "min", 60, ["mins", "minute", "minutes"]),
+  unit("time", "h", 3600, ["hr", "hrs", "hour", "hours"]),
+  unit("time", "day", 86400, ["d", "days"]),
 
   unit("perTimeSquared", "s-2", 1, ["1/s2", "s^-2", "rad2/s2"], { label: "s⁻²" }),
 ] as const satisfies readonly UnitShape[];

@@ -11,6 +11,7 @@ export type QuantityKind =
   | "moment"
   | "fraction"
   | "angle"
+  | "time"
   | "perTimeSquared";
 
 /** value in the base unit of the kind = (value - offset) * factor */

@@ -1,11 +1,11 @@
 /** Reads the cells of a role, and keeps account of what could not be read or had to be filled in. */
 import type { Issue } from "../../base/index.ts";
-import { convert, type UnitSymbol } from "../../units/index.ts";
+import { convert } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
-import { type MeasuredRole, ROLE_WORDS } from "./column-names.ts";
-import type { FoundTable } from "./find-header.ts";
 import { isMissing, isSentinel, parseNumber } from "./parse-number.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
+import { MEASURED, type MeasuredRole, ROLE_WORDS } from "./roles.ts";
+import type { Table } from "./table.ts";
 
 /** A cell that should have held a number or a time and holds some other text. */
 export interface BadCell {
@@ -13,28 +13,14 @@ export interface BadCell {
   readonly message: string;
 }
 
-/** The units of the program, in which columns of numbers are kept. */
-const OWN_UNIT = {
-  depth: "m",
-  seaPressure: "dbar",
-  temperature: "degC",
-  practicalSalinity: "1",
-  conductivity: "mS/cm",
-  specificConductance: "mS/cm",
-  densityAnomaly: "kg/m3",
-  latitude: "deg",
-  longitude: "deg",
-  distance: "km",
-} as const satisfies Readonly<Record<MeasuredRole, UnitSymbol>>;
-
 export class CellReader {
   /** By row of the table. */
   readonly badCells = new Map<number, BadCell[]>();
   readonly issues: Issue[] = [];
-  readonly #table: FoundTable;
+  readonly #table: Table;
   readonly #columns: RecognisedColumns;
 
-  constructor(table: FoundTable, columns: RecognisedColumns) {
+  constructor(table: Table, columns: RecognisedColumns) {
     this.#table = table;
     this.#columns = columns;
   }
@@ -75,7 +61,7 @@ export class CellReader {
     const column = this.#columns.used[role];
     const texts = this.texts(role);
     if (!column || texts === null) return null;
-    const from = column.unit ?? OWN_UNIT[role];
+    const from = column.unit ?? MEASURED[role].unit;
     const sentinels: string[] = [];
     const values = Float64Array.from(texts, (text, rowIndex) => {
       if (isSentinel(role, text)) {
@@ -83,7 +69,7 @@ export class CellReader {
         return Number.NaN;
       }
       const value = parseNumber(text, this.#columns.decimalMark);
-      if (value !== null) return convert(value, from, OWN_UNIT[role]);
+      if (value !== null) return convert(value, from, MEASURED[role].unit);
       const message = `${ROLE_WORDS[role]} "${text}" is not a number; expected a number or a blank`;
       this.#reject(rowIndex, { code: "not-a-number", message });
       return Number.NaN;

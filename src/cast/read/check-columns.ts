@@ -1,9 +1,9 @@
 /** What a table must have before casts can be made of it. */
 import type { Issue } from "../../base/index.ts";
 import { askedUnitCode } from "./choose-unit.ts";
-import type { MeasuredRole } from "./column-names.ts";
-import type { FoundTable } from "./find-header.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
+import type { MeasuredRole } from "./roles.ts";
+import type { Table } from "./table.ts";
 
 const VERTICAL_ROLES: readonly MeasuredRole[] = ["depth", "seaPressure"];
 const TEMPERATURE_ROLES: readonly MeasuredRole[] = ["temperature"];
@@ -31,7 +31,7 @@ function listed(headers: readonly string[]): string {
 }
 
 /** The errors that keep a table from being read, none when it can be. */
-export function checkColumns(table: FoundTable, columns: RecognisedColumns): readonly Issue[] {
+export function checkColumns(table: Table, columns: RecognisedColumns): readonly Issue[] {
   const headers = listed(table.header.cells);
   const error = (code: string, message: string): Issue => ({
     severity: "error",

@@ -1,14 +1,14 @@
 /** What the rows of a table must be like, taken together, before casts can be made of them. */
 import { min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
-import type { FoundTable } from "./find-header.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
+import type { Table } from "./table.ts";
 
-const overlong = (table: FoundTable) =>
+const overlong = (table: Table) =>
   table.rows.filter((row) => row.cells.slice(table.header.cells.length).some((cell) => cell !== ""));
 
 /** Rows wider than their header have their values under the wrong names, or a decimal comma among delimiting commas. */
-function widthIssue(table: FoundTable): Issue | null {
+function widthIssue(table: Table): Issue | null {
   const wide = overlong(table);
   const first = wide[0];
   if (first === undefined) return null;
@@ -54,7 +54,7 @@ function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDe
 }
 
 /** Only errors keep the rows from being used. */
-export function checkRows(table: FoundTable, rows: MeasuredRows): readonly Issue[] {
+export function checkRows(table: Table, rows: MeasuredRows): readonly Issue[] {
   const issues = [
     widthIssue(table),
     upsideDownIssue(rows),

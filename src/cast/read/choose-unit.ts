@@ -5,7 +5,7 @@
 import { max, median, min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
-import type { MeasuredRole } from "./column-names.ts";
+import type { MeasuredRole } from "./roles.ts";
 
 export interface UnitChoice {
   /** null: no unit could be told, the issue says why. */
@@ -99,8 +99,20 @@ export function chooseUnit(column: UnitlessColumn): UnitChoice {
       return distanceUnit(column);
     case "depth":
       return assumed(column, "m", "depth without a unit is taken in metres", "warning");
+    case "elevation":
+    case "surfaceElevation":
+    case "waterDepth":
+      return assumed(column, "m", "lengths without a unit are taken in metres", "warning");
     case "seaPressure":
+    case "absolutePressure":
       return assumed(column, "dbar", "pressure without a unit is taken in decibars", "warning");
+    case "absoluteSalinity":
+      return silent("g/kg", "in g/kg by definition");
+    case "dissolvedSolids":
+    case "suspendedSediment":
+      return assumed(column, "mg/L", "it is mostly given in mg/L", "warning");
+    case "elapsedTime":
+      return assumed(column, "s", "elapsed time without a unit is taken in seconds", "note");
     case "practicalSalinity":
       return silent("1", "practical salinity has no unit");
     case "densityAnomaly":

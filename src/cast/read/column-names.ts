@@ -3,7 +3,6 @@
  * what is common in the field. Compared as letters and digits only, without case. Within a role the better name stands
  * first: when two columns could both be meant, the earlier one wins. A name that is not here is never guessed at.
  */
-import type { QuantityKind } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
 
 export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
@@ -25,6 +24,24 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "profondeur",
     "profundidad",
   ],
+  elevation: ["elevation", "elev", "sampleelevation", "sensorelevation", "elevationofsample", "measurementelevation"],
+  surfaceElevation: [
+    "watersurfaceelevation",
+    "surfaceelevation",
+    "waterelevation",
+    "wse",
+    "wsel",
+    "waterlevelelevation",
+    "waterlevel",
+    "poolelevation",
+    "poollevel",
+    "lakeelevation",
+    "lakelevel",
+    "reservoirelevation",
+    "reservoirlevel",
+    "forebayelevation",
+    "watersurfaceheightabovereferencedatum",
+  ],
   seaPressure: [
     "seawaterpressure",
     "seapressure",
@@ -38,6 +55,16 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "pres",
     "prs",
     "druck",
+  ],
+  absolutePressure: [
+    "absolutepressure",
+    "abspressure",
+    "abspress",
+    "absolutewaterpressure",
+    "pressureabsolute",
+    "pressureabs",
+    "pressabs",
+    "totalpressure",
   ],
   temperature: [
     "seawatertemperature",
@@ -68,7 +95,18 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "salzgehalt",
     "salinite",
     "salinidad",
+    "salnty",
   ],
+  absoluteSalinity: [
+    "seawaterabsolutesalinity",
+    "absolutesalinity",
+    "salinityabsolute",
+    "abssalinity",
+    "abssal",
+    "referencesalinity",
+    "seawaterreferencesalinity",
+  ],
+  dissolvedSolids: ["totaldissolvedsolids", "dissolvedsolids", "tds"],
   conductivity: [
     "seawaterelectricalconductivity",
     "electricalconductivity",
@@ -100,6 +138,19 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "spc",
   ],
   densityAnomaly: ["sigmat", "seawatersigmat", "sigmatheta", "seawatersigmatheta", "sigma0", "densityanomaly", "sigma"],
+  turbidity: ["turbidity", "seawaterturbidity", "turb", "turbid", "turbidityntu", "turbidityfnu"],
+  suspendedSediment: [
+    "suspendedsedimentconcentration",
+    "suspendedsediment",
+    "massconcentrationofsuspendedmatterinseawater",
+    "suspendedsolids",
+    "totalsuspendedsolids",
+    "suspendedmatter",
+    "suspendedparticulatematter",
+    "ssc",
+    "tss",
+    "spm",
+  ],
   station: [
     "station",
     "stationid",
@@ -140,7 +191,23 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
   ],
   date: ["date", "sampledate", "samplingdate", "collectiondate", "surveydate", "castdate", "datum", "fecha"],
   clock: ["time", "sampletime", "samplingtime", "collectiontime", "clock", "clocktime", "casttime", "uhrzeit", "hora"],
-  dateTime: ["datetime", "timestamp", "dateandtime", "sampledatetime", "datetimestamp", "isotime", "isodatetime"],
+  dateTime: [
+    "datetime",
+    "timestamp",
+    "dateandtime",
+    "sampledatetime",
+    "datetimestamp",
+    "isotime",
+    "isodatetime",
+    "epoch",
+    "epochtime",
+    "unixtime",
+    "posixtime",
+  ],
+  year: ["year", "yr", "yyyy"],
+  month: ["month", "mon"],
+  day: ["day", "dayofmonth"],
+  elapsedTime: ["elapsedtime", "elapsed", "timeelapsed", "elapsedseconds", "elapsedsec"],
   latitude: ["latitude", "lat", "decimallatitude", "stationlatitude"],
   longitude: ["longitude", "lon", "long", "lng", "decimallongitude", "stationlongitude"],
   distance: [
@@ -157,40 +224,20 @@ export const COLUMN_NAMES: Readonly<Record<ColumnRole, readonly string[]>> = {
     "rivermile",
     "rivermiles",
   ],
-};
-
-/** Roles whose columns hold numbers with a unit; the others hold text or times. */
-export type MeasuredRole = Exclude<ColumnRole, "station" | "castName" | "date" | "clock" | "dateTime">;
-
-export const ROLE_KIND: Readonly<Record<MeasuredRole, QuantityKind>> = {
-  depth: "length",
-  seaPressure: "pressure",
-  temperature: "temperature",
-  practicalSalinity: "salinity",
-  conductivity: "conductivity",
-  specificConductance: "conductivity",
-  densityAnomaly: "density",
-  latitude: "angle",
-  longitude: "angle",
-  distance: "length",
-};
-
-export const isMeasured = (role: ColumnRole): role is MeasuredRole => role in ROLE_KIND;
-
-export const ROLE_WORDS: Readonly<Record<ColumnRole, string>> = {
-  depth: "depth",
-  seaPressure: "sea pressure",
-  temperature: "temperature",
-  practicalSalinity: "practical salinity",
-  conductivity: "conductivity",
-  specificConductance: "specific conductance",
-  densityAnomaly: "density anomaly",
-  station: "station",
-  castName: "cast name",
-  date: "date",
-  clock: "time of day",
-  dateTime: "date and time",
-  latitude: "latitude",
-  longitude: "longitude",
-  distance: "distance along the channel",
+  waterDepth: [
+    "waterdepth",
+    "bottomdepth",
+    "stationdepth",
+    "sitedepth",
+    "totaldepth",
+    "maxdepth",
+    "maximumdepth",
+    "beddepth",
+    "seafloordepthbelowseasurface",
+    "seafloordepth",
+    "sonardepth",
+    "bathymetry",
+    "echodepth",
+  ],
+  qualityFlag: [],
 };

@@ -1,10 +1,10 @@
 /** A column that could have a role by its name, before it is compared with others of the same role. */
 import type { ColumnRole } from "../reading.ts";
-import { isMeasured, ROLE_KIND } from "./column-names.ts";
-import type { FoundTable } from "./find-header.ts";
 import { isMissing } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseDateTime } from "./parse-time.ts";
 import { readHeaderCell, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
+import { isMeasured, MEASURED } from "./roles.ts";
+import type { Table } from "./table.ts";
 
 export interface Contender {
   readonly columnIndex: number;
@@ -32,13 +32,13 @@ function roleByContent(role: ColumnRole, filled: readonly string[]): ColumnRole 
 }
 
 /** null when the header is no name that we use. */
-export function contenderOf(table: FoundTable, columnIndex: number): Contender | null {
+export function contenderOf(table: Table, columnIndex: number): Contender | null {
   const header = table.header.cells[columnIndex]!;
   const meaning = readHeaderCell(header);
   if (meaning === null) return null;
   const filled = table.rows.map((row) => row.cells[columnIndex] ?? "").filter((cell) => !isMissing(cell));
   const role = roleByContent(meaning.role, filled);
-  const fromRow = isMeasured(role) ? writtenUnit([table.unitTexts[columnIndex]!], ROLE_KIND[role]) : null;
+  const fromRow = isMeasured(role) ? writtenUnit([table.unitTexts[columnIndex]!], MEASURED[role].kind) : null;
   const isInHeader = meaning.written !== null && (meaning.written.unit !== null || fromRow === null);
   return {
     columnIndex,

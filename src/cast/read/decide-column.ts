@@ -3,10 +3,10 @@ import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
 import type { ColumnReading } from "../reading.ts";
 import { askedUnitCode, chooseUnit } from "./choose-unit.ts";
-import { isMeasured, type MeasuredRole, ROLE_WORDS } from "./column-names.ts";
 import { type Contender, TELLING_CELLS } from "./contender.ts";
 import { type DecimalMark, isSentinel, parseNumber } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseClock, parseDateTime } from "./parse-time.ts";
+import { isMeasured, type MeasuredRole, ROLE_WORDS } from "./roles.ts";
 
 export interface Decision {
   readonly reading: ColumnReading;
@@ -16,13 +16,16 @@ export interface Decision {
 type Place = Pick<ColumnReading, "columnIndex" | "header">;
 
 const leave = ({ columnIndex, header }: Place, why: string, ...issues: readonly Issue[]): Decision => ({
-  reading: { columnIndex, header, role: null, unit: null, reason: `Not used: ${why}.` },
+  reading: { columnIndex, header, role: null, unit: null, confidence: "sure", reason: `Not used: ${why}.` },
   issues,
 });
 
 const use = (contender: Contender, unit: UnitSymbol | null, why: string, ...issues: readonly Issue[]): Decision => {
   const { columnIndex, header, role } = contender;
-  return { reading: { columnIndex, header, role, unit, reason: `Named as ${ROLE_WORDS[role]}; ${why}.` }, issues };
+  return {
+    reading: { columnIndex, header, role, unit, confidence: "sure", reason: `Named as ${ROLE_WORDS[role]}; ${why}.` },
+    issues,
+  };
 };
 
 const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [

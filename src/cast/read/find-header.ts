@@ -1,19 +1,9 @@
 /** Finds the delimiter, the header row and a row of units below it: whichever delimiter makes most sense of a header. */
 import { unitByName } from "../../units/index.ts";
-import { isMeasured, ROLE_KIND } from "./column-names.ts";
 import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withoutCommentSign } from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
-
-export interface FoundTable {
-  readonly delimiter: Delimiter;
-  readonly header: Row;
-  /** One text a column; all empty where there is no units row. */
-  readonly unitTexts: readonly string[];
-  readonly rows: readonly Row[];
-  /** Rows above the header that are no comments. */
-  readonly preface: readonly Row[];
-  readonly hasOpenQuote: boolean;
-}
+import { isMeasured, MEASURED } from "./roles.ts";
+import type { Table } from "./table.ts";
 
 /** A header further down than this is not looked for. */
 const SEARCHED_LINES = 1000;
@@ -73,7 +63,7 @@ function unitsIn(header: Row, below: Row | undefined): readonly string[] | null 
   const texts = header.cells.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
   const isUnits = header.cells.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
-    return role !== undefined && isMeasured(role) && unitByName(texts[i]!, ROLE_KIND[role]) !== null;
+    return role !== undefined && isMeasured(role) && unitByName(texts[i]!, MEASURED[role].kind) !== null;
   });
   return isUnits ? texts : null;
 }
@@ -82,7 +72,7 @@ const isSameRow = (a: Row, b: Row): boolean =>
   a.cells.length === b.cells.length && a.cells.every((cell, i) => cell === b.cells[i]);
 
 /** The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out. */
-export function findTable(text: string): FoundTable | null {
+export function findTable(text: string): Table | null {
   const plain = text.split("\n");
   const byNames = bestByNames(plain.slice(0, SEARCHED_LINES));
   const lines = byNames === null ? withHeaderUncommented(plain) : plain;

@@ -1,9 +1,9 @@
 /** The rows of a table as arrays in the program's own units, before they are split into casts. */
 import type { Issue } from "../../base/index.ts";
 import { type BadCell, CellReader } from "./cell-reader.ts";
-import type { FoundTable } from "./find-header.ts";
 import { dateOrderOf, datePart, orderInName, parseClock, parseDateTime } from "./parse-time.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
+import type { Table } from "./table.ts";
 
 export interface MeasuredRows {
   readonly n: number;
@@ -74,7 +74,7 @@ function readTimes(reader: CellReader): Times {
 }
 
 /** Needs a temperature column among the used ones; without it temperature is missing throughout. */
-export function readMeasuredRows(table: FoundTable, columns: RecognisedColumns): MeasuredRows {
+export function readMeasuredRows(table: Table, columns: RecognisedColumns): MeasuredRows {
   const reader = new CellReader(table, columns);
   const { rows } = table;
   return {

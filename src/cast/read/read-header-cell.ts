@@ -1,7 +1,8 @@
 /** What one header says by itself: which role its name has, and the unit written in it. */
 import { type QuantityKind, type Unit, unitByName } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
-import { COLUMN_NAMES, isMeasured, ROLE_KIND } from "./column-names.ts";
+import { COLUMN_NAMES } from "./column-names.ts";
+import { isMeasured, MEASURED } from "./roles.ts";
 
 /** A unit as written; `unit` is null when the text names none of the kind that is needed. */
 export interface WrittenUnit {
@@ -65,7 +66,7 @@ function meaningOf(name: string, unitTexts: readonly string[], header: string): 
   if (found === null) return null;
   if (found.role === "clock" && unitTexts.some((text) => ELAPSED.test(text.trim()))) return null;
   const role = found.role === "conductivity" && AT_25.test(header) ? "specificConductance" : found.role;
-  const written = isMeasured(role) ? writtenUnit(unitTexts, ROLE_KIND[role]) : null;
+  const written = isMeasured(role) ? writtenUnit(unitTexts, MEASURED[role].kind) : null;
   return { role, rankIndex: found.rankIndex, written };
 }
 

@@ -2,12 +2,13 @@
 import type { Issue } from "../../base/index.ts";
 import type { UnitSymbol } from "../../units/index.ts";
 import type { ColumnReading, ColumnRole } from "../reading.ts";
-import { COLUMN_NAMES, isMeasured } from "./column-names.ts";
+import { COLUMN_NAMES } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
 import { type Decision, decide, passOver, whyUnused } from "./decide-column.ts";
 import { decimalMarkOf } from "./decimal-mark.ts";
-import type { FoundTable } from "./find-header.ts";
 import type { DecimalMark } from "./parse-number.ts";
+import { isMeasured } from "./roles.ts";
+import type { Table } from "./table.ts";
 
 interface UsedColumn {
   readonly columnIndex: number;
@@ -45,7 +46,7 @@ function winnersOf(contenders: readonly Contender[]): ReadonlyMap<ColumnRole, Co
 }
 
 /** Reads every header of a table. A unit that must be asked for leaves its column unused, with an issue. */
-export function recogniseColumns(table: FoundTable): RecognisedColumns {
+export function recogniseColumns(table: Table): RecognisedColumns {
   const all = table.header.cells.map((_, columnIndex) => contenderOf(table, columnIndex));
   const contenders = all.filter((contender) => contender !== null);
   const measured = contenders.filter((contender) => isMeasured(contender.role));

@@ -46,7 +46,7 @@ test("case tells milli from mega, where only case can", () => {
   expect(unitByName("MN")?.symbol).toBe("MN");
 });
 
-test.each(["", " ", "furlong", "mg/L", "Micromolar", "NTU", "RFU"])("%j is no unit", (text) => {
+test.each(["", " ", "furlong", "mg/m2", "Micromolar", "NTU", "RFU"])("%j is no unit", (text) => {
   expect(unitByName(text)).toBeNull();
 });
 

@@ -1,0 +1,116 @@
+/** A table, found in whatever kind of file, to casts. */
+import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
+import type { Cast } from "../cast.ts";
+import type { FileReading, ReadingAnswers } from "../reading.ts";
+import { buildCast, named } from "./build-cast.ts";
+import { checkColumns } from "./check-columns.ts";
+import { checkRows } from "./check-rows.ts";
+import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
+import { nameCasts } from "./name-casts.ts";
+import { type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
+import { type RowGroup, splitCasts } from "./split-casts.ts";
+import type { Table, TableSource } from "./table.ts";
+
+/** So many rows show what a file is like. */
+const SHOWN_ROWS = 12;
+
+const NO_ANSWERS: ReadingAnswers = { columns: [] };
+
+const error = (code: string, message: string): Issue => ({ severity: "error", code, message });
+
+const warning = (code: string, message: string): Issue => ({ severity: "warning", code, message });
+
+/** One cast a group, named so that no two casts of the file share a name. */
+function castsOf(rows: MeasuredRows, groups: readonly RowGroup[], fileName: string): readonly Cast[] {
+  const unnamed = groups.map((group) => buildCast(rows, group, fileName));
+  const parts = groups.map((group, i) => ({ ...group, clock: unnamed[i]!.time?.slice(11) || null }));
+  const names = nameCasts(parts, fileName);
+  return unnamed.map((cast, i) => named(cast, names[i]!));
+}
+
+const counted = (n: number): string => (n === 1 ? "one sample" : "no samples");
+
+/** What is worth knowing about the text around the table. */
+function tableIssues(table: Table): readonly Issue[] {
+  const issues: Issue[] = [];
+  const [first, last] = [table.preface[0], table.preface.at(-1)];
+  if (first && last) {
+    const where = first === last ? `line ${first.lineIndex}` : `lines ${first.lineIndex} to ${last.lineIndex}`;
+    issues.push({
+      severity: "note",
+      code: "preface",
+      message: `${where}: text above the headers, not read`,
+      line: first.lineIndex,
+    });
+  }
+  if (table.hasOpenQuote) {
+    issues.push(
+      warning("open-quote", "a quotation mark is opened and not closed; rows behind it may be lost; close it"),
+    );
+  }
+  return issues;
+}
+
+function saltIssues({ used }: RecognisedColumns): readonly Issue[] {
+  if (used.practicalSalinity || used.conductivity || used.specificConductance) return [];
+  const message = "no salinity and no conductivity column is used; density will follow from temperature alone";
+  return [{ severity: "note", code: "temperature-only", message }];
+}
+
+interface SortedCasts {
+  readonly casts: readonly Cast[];
+  readonly issues: readonly Issue[];
+}
+
+/** A cast needs two samples: others are left out, or are an error where there is nothing else. */
+function withTwoSamples(all: readonly Cast[]): Outcome<SortedCasts> {
+  const casts = all.filter((cast) => cast.samples.n >= 2);
+  const left = all.filter((cast) => cast.samples.n < 2);
+  const reasons = left.flatMap((cast) => cast.issues);
+  if (casts.length === 0) {
+    const found = left.length === 1 ? counted(left[0]!.samples.n) : `${left.length} casts of one sample or none`;
+    return failed(error("too-few-samples", `${found} in the file; a cast needs at least two`), ...reasons);
+  }
+  const leftOut = left.map((c) =>
+    warning("cast-left-out", `${c.name}: ${counted(c.samples.n)}, a cast needs two; left out`),
+  );
+  return succeeded({ casts, issues: [...leftOut, ...reasons] });
+}
+
+/** Reads a table into casts, from whatever format it comes. Nothing is guessed without an issue that says so. */
+export function readTable(
+  source: TableSource,
+  table: Table,
+  answers: ReadingAnswers = NO_ANSWERS,
+): Outcome<FileReading> {
+  const columns = recogniseColumns(table);
+  const errors = checkColumns(table, columns);
+  if (errors.length > 0) return failed(...errors);
+  const rows = readMeasuredRows(table, columns);
+  const rowIssues = checkRows(table, rows);
+  if (rowIssues.some((issue) => issue.severity === "error")) return failed(...rowIssues);
+  const { groups, splitBy } = splitCasts(rows);
+  const sorted = withTwoSamples(castsOf(rows, groups, source.fileName));
+  if (!sorted.ok) return sorted;
+  return succeeded({
+    ...source,
+    delimiter: table.delimiter.name,
+    decimalMark: columns.decimalMark,
+    headerLineIndex: table.header.lineIndex,
+    headers: table.header.cells,
+    firstRows: table.rows.slice(0, SHOWN_ROWS).map((row) => row.cells),
+    columns: columns.readings,
+    questions: [],
+    splitBy,
+    rowCount: table.rows.length,
+    casts: sorted.value.casts,
+    issues: [
+      ...tableIssues(table),
+      ...columns.issues,
+      ...saltIssues(columns),
+      ...rows.issues,
+      ...rowIssues,
+      ...sorted.value.issues,
+    ],
+  });
+}
