@@ -1,5 +1,6 @@
 import { effect } from "@preact/signals";
 import { type AppState, initialState } from "./state/app-state.ts";
+import { takeUp } from "./state/take-up.ts";
 import { savingTrouble, state } from "./store.ts";
 
 /* The whole state, undo included, in the browser's own database under one key. Nothing of it leaves the machine. */
@@ -36,7 +37,7 @@ async function openStore(mode: IDBTransactionMode): Promise<IDBObjectStore> {
 export async function restore(): Promise<void> {
   try {
     const saved = (await settled((await openStore("readonly")).get(KEY))) as Saved | undefined;
-    if (saved?.shapeVersion === SHAPE_VERSION) state.value = saved.state;
+    if (saved?.shapeVersion === SHAPE_VERSION) state.value = takeUp(saved.state);
   } catch (cause) {
     savingTrouble.value = `Earlier work could not be read (${reasonOf(cause)}).`;
   }

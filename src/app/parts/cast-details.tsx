@@ -44,7 +44,10 @@ function HowRead({ reading }: { readonly reading: KeptReading }) {
               {column.role ? inWords(column.role) : ""}
               {column.unit && column.unit !== "1" ? `, ${column.unit}` : ""}
             </dt>
-            <dd>{column.reason}</dd>
+            <dd>
+              {column.confidence === "sure" ? "" : <b class="warn">{column.confidence} </b>}
+              {column.reason}
+            </dd>
           </div>
         ))}
       </dl>

@@ -21,9 +21,12 @@ export interface Solved {
   readonly casts: readonly SolvedCast[];
 }
 
-/** Results that still hold for another survey: those of casts it keeps, as long as basis and levels are the same. */
+/** Results that still hold for another survey: those of casts it keeps, as long as all else that tells is the same. */
 export function stillValid(solved: Solved, survey: Survey): readonly SolvedCast[] {
-  if (solved.survey.basis !== survey.basis || solved.survey.levels !== survey.levels) return [];
+  if (!sameTerms(solved.survey, survey)) return [];
   const kept = new Set(survey.casts);
   return solved.casts.filter(({ cast }) => kept.has(cast));
 }
+
+const sameTerms = (a: Survey, b: Survey): boolean =>
+  (Object.keys(b) as (keyof Survey)[]).every((key) => key === "name" || key === "casts" || a[key] === b[key]);

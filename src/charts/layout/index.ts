@@ -3,5 +3,5 @@ export { layOutLevels } from "./lay-out-levels.ts";
 export { layOutPlumb, type PlumbLayout, type PlumbValue } from "./lay-out-plumb.ts";
 export { layOutSheet } from "./lay-out-sheet.ts";
 export { powerOfTen } from "./power-of-ten.ts";
-export type { CurveInput, LevelInput, LevelLayout, PanelInput, SheetInput, SheetLayout } from "./sheet.ts";
+export type { CurveInput, LevelInput, LevelLayout, PanelInput, SheetInput, SheetLayout, Size } from "./sheet.ts";
 export { type ThumbnailRange, thumbnailPath } from "./thumbnail-path.ts";

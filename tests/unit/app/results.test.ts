@@ -1,11 +1,24 @@
 import { describe, expect, it } from "vitest";
+import { steppedDepthM } from "../../../src/app/show/plumb-steps.ts";
 import { shownPercent, shownValue } from "../../../src/app/show/shown.ts";
 import { behindDepth, buoyancyAround, strongestStratification } from "../../../src/app/show/water-at.ts";
+import { initialState } from "../../../src/app/state/app-state.ts";
 import { exportFiles } from "../../../src/app/state/export-files.ts";
 import { governingCast } from "../../../src/app/state/governing-cast.ts";
 import { nextShare, stillValid } from "../../../src/app/state/solved-share.ts";
-import { defaultBasis, type LevelId, type Survey, solve } from "../../../src/survey/index.ts";
+import { takeUp } from "../../../src/app/state/take-up.ts";
+import { readCastFile } from "../../../src/cast/index.ts";
+import {
+  defaultBasis,
+  emptySurvey,
+  type LevelId,
+  type Survey,
+  solve,
+  startHistory,
+} from "../../../src/survey/index.ts";
 import { castOf } from "../../support/cast-of.ts";
+
+const TABLE = "station,depth (m),temperature (degC),salinity\nFresh,1,15,1\nFresh,2,14,2\nSalt,1,15,30\nSalt,2,14,31\n";
 
 const castNamed = (name: string, salinity: number, deepestM = 4) =>
   castOf(
@@ -18,6 +31,7 @@ const castNamed = (name: string, salinity: number, deepestM = 4) =>
   );
 
 const surveyOf = (over: Partial<Survey> = {}): Survey => ({
+  ...emptySurvey,
   name: "Spring neaps",
   casts: [castNamed("Fresh", 1), castNamed("Salt", 30)],
   basis: defaultBasis,
@@ -59,6 +73,34 @@ describe("sharing out the work", () => {
   });
 });
 
+describe("takeUp", () => {
+  it("completes work that was saved before a part of the survey existed", () => {
+    const survey = surveyOf();
+    const { levels: _, ...older } = survey;
+    const { airPressureKPa: __, ...olderBasis } = survey.basis;
+    const saved = { ...initialState, history: startHistory({ ...older, basis: olderBasis } as Survey) };
+    expect(takeUp(saved).history.present).toEqual({ ...emptySurvey, ...survey, levels: [] });
+  });
+});
+
+describe("plumb line by keyboard", () => {
+  const at = { depthM: 2, deepestM: 20 };
+
+  it("steps a tenth of the unit shown, a twentieth of the axis, or to an end", () => {
+    expect(steppedDepthM("ArrowDown", at, "SI")).toBe(2.1);
+    expect(steppedDepthM("ArrowUp", { ...at, depthM: 0.05 }, "SI")).toBe(0);
+    expect(steppedDepthM("PageDown", at, "SI")).toBe(3);
+    expect(steppedDepthM("End", at, "SI")).toBe(20);
+    expect(steppedDepthM("Home", at, "SI")).toBe(0);
+    expect(steppedDepthM("a", at, "SI")).toBeNull();
+  });
+
+  it("steps in feet under US units", () => {
+    // 1 ft is 0.3048 m.
+    expect(steppedDepthM("ArrowDown", { depthM: 3.048, deepestM: 20 }, "US")).toBeCloseTo(3.07848, 6);
+  });
+});
+
 describe("what stands behind a depth", () => {
   it("tells samples from held water and from no water", () => {
     const { column } = solve(surveyOf({ basis: { ...defaultBasis, bedDepthM: 5 } }))[0]!.solution!;
@@ -82,22 +124,12 @@ describe("what stands behind a depth", () => {
 });
 
 describe("exportFiles", () => {
-  const survey = surveyOf();
+  const read = readCastFile("spring.csv", new TextEncoder().encode(TABLE));
+  if (!read.ok) throw new Error("unreadable");
+  const { casts: readCasts, ...reading } = read.value;
+  const survey = surveyOf({ casts: readCasts });
   const casts = solve(survey);
-  const readings = [
-    {
-      fileName: casts[0]!.cast.fileName,
-      sha256: "ab",
-      encoding: "UTF-8",
-      delimiter: "comma",
-      decimalMark: ".",
-      headerLineIndex: 1,
-      columns: [],
-      splitBy: "station",
-      rowCount: 6,
-      issues: [],
-    },
-  ] as const;
+  const readings = [{ ...reading, sha256: "ab" }];
   const source = { survey, casts, inHand: casts[1]!, readings };
 
   it("puts metadata with the checksum beside each table", () => {
