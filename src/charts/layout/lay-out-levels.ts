@@ -15,6 +15,8 @@ const ABOVE_PX = -5;
 const BELOW_PX = 13;
 const LABEL_HEIGHT_PX = 13;
 const INSET_PX = 5;
+/** Names are bold, ticks are not. */
+const BOLD_RATIO = 1.05;
 /** Beyond this many curves a panel is full wherever one looks. */
 const MOST_CURVES_COUNT = 30;
 
@@ -32,7 +34,7 @@ export function layOutLevels(sheet: SheetLayout, levels: readonly LevelInput[]):
     const yPx = depthPx(depth, level.depth);
     let best: Placing | null = null;
     let leastCost = Number.POSITIVE_INFINITY;
-    for (const placing of placings(level, yPx, panels)) {
+    for (const placing of placings(level, yPx, sheet)) {
       const { box } = placing;
       const isCut = box.leftPx < sheet.leftPx || box.rightPx > sheet.rightPx;
       const coveredCount = taken.filter((other) => overlap(other, box)).length;
@@ -49,10 +51,11 @@ export function layOutLevels(sheet: SheetLayout, levels: readonly LevelInput[]):
 }
 
 /** Best liked first: the right end of the last panel, above the line. */
-function* placings(level: LevelInput, yPx: number, panels: readonly PanelLayout[]): Generator<Placing> {
-  const width = labelWidthPx(level.label) * 1.05;
-  for (const offsetPx of yPx < 70 ? [BELOW_PX] : [ABOVE_PX, BELOW_PX])
-    for (const { axis } of [...panels].reverse())
+function* placings(level: LevelInput, yPx: number, { depth, panels }: SheetLayout): Generator<Placing> {
+  const width = labelWidthPx(level.label) * BOLD_RATIO;
+  const hasRoomAbove = yPx - LABEL_HEIGHT_PX > depth.topPx;
+  for (const offsetPx of hasRoomAbove ? [ABOVE_PX, BELOW_PX] : [BELOW_PX])
+    for (const { axis } of panels.toReversed())
       for (const anchor of ["end", "start"] as const) {
         const labelXPx = anchor === "end" ? axis.rightPx - INSET_PX : axis.leftPx + INSET_PX;
         const leftPx = anchor === "end" ? labelXPx - width : labelXPx;
