@@ -16,7 +16,7 @@ export default defineConfig(({ mode }) => ({
         extends: true,
         test: {
           name: "node",
-          include: ["tests/{unit,golden,property,arch,charts,cli}/**/*.test.ts"],
+          include: ["tests/{unit,golden,property,arch,charts,cli,corpus,formats,fuzz}/**/*.test.ts"],
           testTimeout: 60_000,
         },
       },

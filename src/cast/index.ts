@@ -1,4 +1,5 @@
 export type { Cast, CastId, Samples } from "./cast.ts";
+export { type AnyFileReading, type ReadOptions, readFile } from "./formats/read-file.ts";
 export { readCastFile } from "./read/read-cast-file.ts";
 export type {
   ColumnAnswer,

@@ -29,7 +29,7 @@ const PURE_ROOMS = ["base", "units", "gsw-ts-port", "water", "cast", "quality", 
 
 /** Packages a room may use; what is not named here is the business of one room only. */
 const PACKAGES: Readonly<Record<string, RegExp>> = {
-  cast: /^(papaparse|simple-statistics)$/,
+  cast: /^(papaparse|simple-statistics|fflate|h5wasm|netcdfjs|read-excel-file\/universal)$/,
   quality: /^simple-statistics$/,
   "charts/layout": /^d3-(array|scale|shape)$/,
   "charts/draw": /^d3-(selection|scale|shape|array)$/,
