@@ -21,6 +21,6 @@ export { type WaterChoice, waterLabel } from "../water/index.ts";
 export { addCasts } from "./add-casts.ts";
 export { addFlagEdits, removeFlagEdits, type SampleRange } from "./flag-edits.ts";
 export { type History, redo, remember, startHistory, undo } from "./history.ts";
-export { type Solution, type SolvedCast, solve, solveCast } from "./solve.ts";
+export { type Solution, type SolvedCast, solve, solveCast, solveLevels } from "./solve.ts";
 export { emptySurvey, type Survey } from "./survey.ts";
 export { type WaterPoints, type WaterProperties, waterAtPoints } from "./water-points.ts";

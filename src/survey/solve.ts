@@ -7,7 +7,7 @@ import { emptySurvey, type Survey } from "./survey.ts";
 /** What a survey says about one of its casts; plain data, so that it can be handed between threads. */
 export type SolvedCast = {
   readonly cast: Cast;
-  /** From reading and from solving, in that order. */
+  /** From reading, preparing, integrating and the levels, in that order. */
   readonly issues: readonly Issue[];
   /** The cast's samples after their tests: what each is flagged, why, and whether it is in the column. */
   readonly prepared: PreparedCast;
@@ -21,6 +21,8 @@ export interface Solution {
   readonly flag: Uint8Array;
   /** One row a level, in the survey's order. */
   readonly levels: Profile;
+  /** The last of the cast's issues: what is to be said of the levels. */
+  readonly levelIssues: readonly Issue[];
 }
 
 /** The one way from a survey to its results: the page, the command and the library all come through here. */
@@ -43,18 +45,36 @@ export function solveCast(survey: SolvingTerms, cast: Cast): SolvedCast {
   column.sampleIndex.forEach((sample, knot) => {
     flag[knot + 1] = prepared.preparedFlag[sample]!;
   });
-  const atLevels = describeAtDepths(
-    column,
-    levels.map((level) => level.depthM),
-  );
-  const issues = [...found, ...integrated.issues, ...levelIssues(survey, column)];
-  return { cast, issues, prepared, solution: { column, profile, flag, levels: atLevels } };
+  const solvedLevels = atLevels(levels, column);
+  const issues = [...found, ...integrated.issues, ...solvedLevels.levelIssues];
+  return { cast, issues, prepared, solution: { column, profile, flag, ...solvedLevels } };
 }
 
-function levelIssues(survey: Pick<Survey, "levels">, column: Column): readonly Issue[] {
+/** The same cast at other levels: its column stands, so this is quick. */
+export function solveLevels(survey: Pick<Survey, "levels">, solved: SolvedCast): SolvedCast {
+  const { solution, issues } = solved;
+  if (!solution) return solved;
+  const solvedLevels = atLevels(survey.levels, solution.column);
+  const ownIssues = issues.slice(0, issues.length - solution.levelIssues.length);
+  return {
+    ...solved,
+    issues: [...ownIssues, ...solvedLevels.levelIssues],
+    solution: { ...solution, ...solvedLevels },
+  };
+}
+
+const atLevels = (levels: Survey["levels"], column: Column): Pick<Solution, "levels" | "levelIssues"> => ({
+  levels: describeAtDepths(
+    column,
+    levels.map((level) => level.depthM),
+  ),
+  levelIssues: levelIssues(levels, column),
+});
+
+function levelIssues(levels: Survey["levels"], column: Column): readonly Issue[] {
   const firstDepthM = column.depthM[0]!;
   const lastDepthM = column.depthM[column.n - 1]!;
-  return survey.levels.flatMap((level): Issue[] => {
+  return levels.flatMap((level): Issue[] => {
     const at = `level ${level.name} at ${level.depthM} m`;
     const warn = (code: string, message: string): Issue[] => [{ severity: "warning", code, message }];
     if (column.bedDepthM !== null && level.depthM > column.bedDepthM)

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { emptySurvey, type Level, type LevelId, type Survey, solve } from "../../../src/survey/index.ts";
+import { emptySurvey, type Level, type LevelId, type Survey, solve, solveLevels } from "../../../src/survey/index.ts";
 import { castOf } from "../../support/cast-of.ts";
 
 const level = (name: string, depthM: number): Level => ({ id: name as LevelId, name, depthM });
@@ -50,6 +50,14 @@ describe("solve", () => {
   it("gives elevations where the water surface has one", () => {
     const [raised] = solve({ ...survey, basis: { ...survey.basis, waterSurfaceElevationM: 1.5 } });
     expect([...raised!.solution!.profile.elevationM]).toEqual([1.5, 0.5, -0.5, -4.5]);
+  });
+
+  it("solves other levels on the same column to the same as solving anew", () => {
+    const moved = { ...survey, levels: [level("sill", 3), level("deep", 9)] };
+    const again = solveLevels(moved, quay!);
+    expect(again).toEqual(solve(moved)[0]);
+    expect(again.solution!.column).toBe(quay!.solution!.column);
+    expect(solveLevels(moved, lost!)).toBe(lost);
   });
 
   it("is plain data that can be handed to another thread", () => {
