@@ -3,7 +3,7 @@ import { dirname, join, relative, resolve, sep } from "node:path";
 import { fileURLToPath } from "node:url";
 import ts from "typescript";
 
-export const SOURCE_ROOT = fileURLToPath(new URL("../../src", import.meta.url));
+const SOURCE_ROOT = fileURLToPath(new URL("../../src", import.meta.url));
 
 export interface SourceFile {
   /** Path below src, with forward slashes. */
