@@ -1,41 +1,118 @@
+import { signal } from "@preact/signals";
 import { failed } from "../base/index.ts";
-import type { ReadFile, SurveyStart } from "./state/reduce.ts";
-import { dispatch } from "./store.ts";
-import { thread } from "./thread.ts";
+import type { ReadingAnswers } from "../cast/index.ts";
+import { type ReadRequest, Stopped } from "../worker/index.ts";
+import { keepFile, keptFile } from "./kept-files.ts";
+import { noteSamplesKey } from "./samples-keys.ts";
+import { type KeptReading, readingsOf } from "./state/app-state.ts";
+import type { ReadFile, SurveyStart } from "./state/files.ts";
+import { dispatch, openReading, state } from "./store.ts";
+import { threads } from "./threads.ts";
+
+/** A file that is being read or waits for its turn. */
+export interface ReadingJob {
+  readonly fileName: string;
+  /** Null while nothing is known. */
+  readonly doneFrac: number | null;
+}
+
+export const readingJobs = signal<readonly ReadingJob[]>([]);
+
+/** Files whose reading cannot be changed, since their bytes are no longer at hand. */
+export const filesGone = signal<readonly string[]>([]);
 
 /** Reads files in the background, each on its own: what one has wrong does not keep the others out. */
-export async function readFiles(files: readonly File[]): Promise<void> {
-  const read: ReadFile[] = [];
-  for (const file of files) read.push(await readOne(file.name, () => file.arrayBuffer()));
-  addRead(read, { name: read.length === 1 ? withoutEnding(read[0]!.fileName) : "Survey" });
+export async function readFiles(files: readonly File[], start?: SurveyStart): Promise<void> {
+  const read: { readonly file: File; readonly answer: ReadFile }[] = [];
+  for (const { file, job } of files.map((file) => ({ file, job: startJob(file.name) }))) {
+    if (readingJobs.value.includes(job)) {
+      const answer = await readOne({ file, remembered: remembered() });
+      if (answer) read.push({ file, answer });
+    }
+    endJob(job);
+  }
+  if (read.length === 0) return;
+  const answers = read.map(({ answer }) => answer);
+  dispatch({ kind: "files-read", files: answers, start: start ?? { name: nameFor(answers) } });
+  for (const { file, answer } of read) keepFile(answer, file);
+  openQuestions(answers);
 }
 
-/** Reads a file that came with the page. */
-export async function readText(fileName: string, text: string, start: SurveyStart): Promise<void> {
-  addRead([await readOne(fileName, async () => new TextEncoder().encode(text).buffer)], start);
+/** Reads a file of the survey again, with other answers or another sheet. */
+export async function readAgain(
+  reading: KeptReading,
+  change: { readonly answers: ReadingAnswers; readonly sheet?: string },
+  memory: "keep" | "forget" | "as-it-is",
+): Promise<void> {
+  const file = await keptFile(reading);
+  if (!file) {
+    filesGone.value = [...filesGone.value, reading.fileName];
+    return;
+  }
+  const sheet = change.sheet ?? reading.sheet ?? undefined;
+  const job = startJob(reading.fileName);
+  const answer = await readOne({
+    file,
+    remembered: {},
+    answers: change.answers,
+    ...(sheet === undefined ? {} : { sheet }),
+  });
+  endJob(job);
+  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName: reading.fileName }, memory });
 }
 
-const withoutEnding = (fileName: string): string => fileName.replace(/\.[^.]*$/, "");
+/** Stops reading a file, or takes one that waits out of the queue. */
+export function stopReading(job: ReadingJob): void {
+  const isBeingRead = readingJobs.value[0] === job;
+  endJob(job);
+  if (isBeingRead) threads.stopReading();
+}
 
-const addRead = (files: readonly ReadFile[], start: SurveyStart): void => {
-  if (files.length > 0) dispatch({ kind: "files-read", files, start });
+const remembered = () => state.value.history.present.remembered;
+
+const nameFor = (read: readonly ReadFile[]): string =>
+  read.length === 1 ? read[0]!.fileName.replace(/\.[^.]*$/, "") : "Survey";
+
+function startJob(fileName: string): ReadingJob {
+  const job = { fileName, doneFrac: null };
+  readingJobs.value = [...readingJobs.value, job];
+  return job;
+}
+
+const endJob = (job: ReadingJob): void => {
+  readingJobs.value = readingJobs.value.filter((other) => other !== job);
 };
 
-async function readOne(fileName: string, bytesOf: () => Promise<ArrayBuffer>): Promise<ReadFile> {
+/** Null where the user stopped it. */
+async function readOne(request: ReadRequest): Promise<ReadFile | null> {
+  const { file, answers } = request;
   try {
-    const bytes = new Uint8Array(await bytesOf());
-    return { fileName, sha256: await sha256Of(bytes), outcome: await thread.readCastFile(fileName, bytes) };
+    const { samplesKeys, ...answer } = await threads.read(request);
+    if (answer.outcome.ok)
+      answer.outcome.value.casts.forEach(({ samples }, k) => {
+        noteSamplesKey(samples, samplesKeys[k]!);
+      });
+    return { ...answer, fileName: file.name };
   } catch (cause) {
+    if (cause instanceof Stopped) return null;
     // A folder, a file moved meanwhile, or a fault of ours: it must not take the other files with it.
     const reason = cause instanceof Error ? cause.message : String(cause);
     const message = `the file could not be read (${reason}); check that it is a file and still there`;
-    return { fileName, sha256: null, outcome: failed({ severity: "error", code: "not-readable", message }) };
+    return {
+      fileName: file.name,
+      sha256: null,
+      outcome: failed({ severity: "error", code: "not-readable", message }),
+      answers: answers ?? { columns: [] },
+      areAnswersRemembered: false,
+      headerKey: null,
+    };
   }
 }
 
-/** Hexadecimal; null where the browser withholds it, as on a page without a secure origin. */
-async function sha256Of(bytes: Uint8Array<ArrayBuffer>): Promise<string | null> {
-  if (!globalThis.crypto?.subtle) return null;
-  const digest = new Uint8Array(await crypto.subtle.digest("SHA-256", bytes));
-  return Array.from(digest, (byte) => byte.toString(16).padStart(2, "0")).join("");
+/** A file that waits for an answer shows its reading by itself. */
+function openQuestions(read: readonly ReadFile[]): void {
+  const asking = readingsOf(state.value).find(
+    ({ sha256, questions }) => questions.length > 0 && read.some((file) => file.sha256 === sha256),
+  );
+  if (asking) openReading.value = asking.fileName;
 }

@@ -1,6 +1,6 @@
 import type { Basis } from "../survey/index.ts";
-import { readText } from "./reading-files.ts";
-import type { SurveyStart } from "./state/reduce.ts";
+import { readFiles } from "./reading-files.ts";
+import type { SurveyStart } from "./state/files.ts";
 
 /** Invented files that come with the page, fetched from its own origin when asked for. */
 const FILES = import.meta.glob<string>("../../sample-data/*.csv", { query: "?raw", import: "default" });
@@ -15,6 +15,6 @@ const SAMPLES = {
 export async function loadSample(sample: keyof typeof SAMPLES): Promise<void> {
   for (const [path, load] of Object.entries(FILES)) {
     const fileName = path.slice(path.lastIndexOf("/") + 1);
-    if (fileName.includes(sample)) await readText(fileName, await load(), SAMPLES[sample]);
+    if (fileName.includes(sample)) await readFiles([new File([await load()], fileName)], SAMPLES[sample]);
   }
 }

@@ -1,43 +1,32 @@
 import { effect } from "@preact/signals";
-import { type AppState, initialState } from "./state/app-state.ts";
-import { takeUp } from "./state/take-up.ts";
+import { inStore } from "../worker/index.ts";
+import { pruneKeptFiles } from "./kept-files.ts";
+import { noteSamplesKey, samplesKeyOf } from "./samples-keys.ts";
+import { initialState, readingsOf } from "./state/app-state.ts";
+import { type SavedState, samplesKeysOf, statePacker, takeUp } from "./state/saved-state.ts";
 import { savingTrouble, state } from "./store.ts";
+import { threads } from "./threads.ts";
 
-/* The whole state, undo included, in the browser's own database under one key. Nothing of it leaves the machine. */
+/* The whole state, undo included, under one key; the samples of its casts are written by the thread that has them. */
 
-const DATABASE = "layerhead";
-const STORE = "work";
 const KEY = "current";
 /** Goes up when the shape of the state changes; older work is then not taken up. */
-const SHAPE_VERSION = 1;
+const SHAPE_VERSION = 2;
 
 interface Saved {
   readonly shapeVersion: number;
-  readonly state: AppState;
-}
-
-const settled = <T>(request: IDBRequest<T>): Promise<T> =>
-  new Promise((resolve, reject) => {
-    request.onsuccess = () => resolve(request.result);
-    request.onerror = () => reject(request.error);
-  });
-
-async function openStore(mode: IDBTransactionMode): Promise<IDBObjectStore> {
-  const opening = indexedDB.open(DATABASE, 1);
-  opening.onupgradeneeded = () => opening.result.createObjectStore(STORE);
-  const database = await settled(opening);
-  const transaction = database.transaction(STORE, mode);
-  const close = () => database.close();
-  transaction.oncomplete = close;
-  transaction.onabort = close;
-  return transaction.objectStore(STORE);
+  readonly state: SavedState;
 }
 
 /** Takes up the work where it was left, or starts anew. */
 export async function restore(): Promise<void> {
   try {
-    const saved = (await settled((await openStore("readonly")).get(KEY))) as Saved | undefined;
-    if (saved?.shapeVersion === SHAPE_VERSION) state.value = takeUp(saved.state);
+    const saved = (await inStore("work", "readonly", (store) => store.get(KEY))) as Saved | undefined;
+    if (saved?.shapeVersion !== SHAPE_VERSION) return;
+    const samplesByKey = await threads.solver.restoreSamples([...samplesKeysOf(saved.state)]);
+    for (const [key, samples] of samplesByKey) noteSamplesKey(samples, key);
+    state.value = takeUp(saved.state, samplesByKey);
+    void pruneKeptFiles(readingsOf(state.value));
   } catch (cause) {
     savingTrouble.value = `Earlier work could not be read (${reasonOf(cause)}).`;
   }
@@ -45,6 +34,7 @@ export async function restore(): Promise<void> {
 
 /** Saves every change as it is made; changes that come while one is being written are written together. */
 export function keepSaved(): void {
+  const pack = statePacker(samplesKeyOf);
   let isWriting = false;
   let written = state.peek();
   const write = async (): Promise<void> => {
@@ -53,8 +43,8 @@ export function keepSaved(): void {
     while (written !== state.peek()) {
       written = state.peek();
       try {
-        const saved: Saved = { shapeVersion: SHAPE_VERSION, state: written };
-        await settled((await openStore("readwrite")).put(saved, KEY));
+        const saved: Saved = { shapeVersion: SHAPE_VERSION, state: pack(written) };
+        await inStore("work", "readwrite", (store) => store.put(saved, KEY));
         savingTrouble.value = "";
       } catch (cause) {
         savingTrouble.value = `Changes are not being saved (${reasonOf(cause)}); export before you close the page.`;

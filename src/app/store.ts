@@ -1,5 +1,6 @@
 import { computed, signal } from "@preact/signals";
-import { emptySurvey, type SolvedCast } from "../survey/index.ts";
+import { emptySurvey } from "../survey/index.ts";
+import type { AnsweredCast } from "../worker/index.ts";
 import { initialState, surveyOf } from "./state/app-state.ts";
 import { type Action, reduce } from "./state/reduce.ts";
 import type { Solved } from "./state/solved-share.ts";
@@ -15,22 +16,25 @@ export const dispatch = (action: Action): void => {
 export const survey = computed(() => surveyOf(state.value));
 
 /** The newest finished results; they may lag behind the survey while the background thread works. */
-export const solved = signal<Solved>({ survey: emptySurvey, casts: [] });
+export const solved = signal<Solved<AnsweredCast>>({ survey: emptySurvey, casts: [] });
 
 /** How much of the work in hand is done, null when there is none. */
 export const progress = signal<{ readonly doneCount: number; readonly allCount: number } | null>(null);
 
 export const castInHand = computed(
-  (): SolvedCast | null => solved.value.casts.find(({ cast }) => cast.id === state.value.castInHandId) ?? null,
+  (): AnsweredCast | null => solved.value.casts.find(({ cast }) => cast.id === state.value.castInHandId) ?? null,
 );
 
-export const visibleCasts = computed((): readonly SolvedCast[] => {
+export const visibleCasts = computed((): readonly AnsweredCast[] => {
   const hidden = new Set(state.value.hiddenIds);
   return solved.value.casts.filter(({ cast }) => !hidden.has(cast.id));
 });
 
 /** Where the plumb line hangs, null where it is not out. */
 export const plumbDepthM = signal<number | null>(null);
+
+/** The file whose reading is shown, null where none is. */
+export const openReading = signal<string | null>(null);
 
 /** Why there are no results for the last change; empty while solving works. */
 export const solvingTrouble = signal("");

@@ -1,6 +1,6 @@
-import { type Remote, wrap } from "comlink";
-import type { Tasks } from "./tasks.ts";
-
-/** Starts the background thread; its tasks answer with promises. */
-export const startThread = (): Remote<Tasks> =>
-  wrap<Tasks>(new Worker(new URL("./thread.ts", import.meta.url), { type: "module" }));
+export { type AnsweredCast, type CastOnShelf, onShelf, unpackCast } from "./answered-cast.ts";
+export { inStore, keepOnly } from "./database.ts";
+export type { DrawnProfile } from "./drawn-profile.ts";
+export type { MarkedRun, MarkedSamples, Marks } from "./marked-samples.ts";
+export type { ReadAnswer, ReadRequest, RememberedAnswers } from "./reader-tasks.ts";
+export { Stopped, startThreads, type Threads } from "./threads.ts";

@@ -88,6 +88,6 @@ describe("files", () => {
     await page.getByRole("button", { name: "Export" }).click();
     await page.getByRole("button", { name: "Everything, JSON" }).click();
     await expect.poll(() => downloads.length).toBe(3);
-    expect(Object.keys(JSON.parse(await downloads[2]!.text))).toEqual(["version", "basis", "casts"]);
+    expect(Object.keys(JSON.parse(await downloads[2]!.text))).toEqual(["version", "basis", "preparation", "casts"]);
   });
 });

@@ -1,4 +1,4 @@
-import type { KeptReading } from "../state/app-state.ts";
+import { type KeptReading, readingsOf } from "../state/app-state.ts";
 import { castInHand, state } from "../store.ts";
 import { IssueList } from "./issue-list.tsx";
 
@@ -6,7 +6,7 @@ import { IssueList } from "./issue-list.tsx";
 export function CastDetails() {
   const inHand = castInHand.value;
   if (!inHand) return null;
-  const reading = state.value.readings.find(({ fileName }) => fileName === inHand.cast.fileName);
+  const reading = readingsOf(state.value).find(({ fileName }) => fileName === inHand.cast.fileName);
   const { issues } = inHand;
   return (
     <section aria-label="About this cast">

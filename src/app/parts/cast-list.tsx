@@ -1,6 +1,6 @@
 import { computed } from "@preact/signals";
 import { thumbnailPath } from "../../charts/layout/index.ts";
-import type { SolvedCast } from "../../survey/index.ts";
+import type { AnsweredCast } from "../../worker/index.ts";
 import { densityRange } from "../show/density-range.ts";
 import { shownValue } from "../show/shown.ts";
 import { dispatch, solved, state } from "../store.ts";
@@ -31,7 +31,7 @@ export function CastList() {
   );
 }
 
-function CastEntry({ entry }: { readonly entry: SolvedCast }) {
+function CastEntry({ entry }: { readonly entry: AnsweredCast }) {
   const { cast } = entry;
   const { castInHandId, hiddenIds, colourIndexOf } = state.value;
   const isInHand = cast.id === castInHandId;
@@ -72,14 +72,14 @@ function CastEntry({ entry }: { readonly entry: SolvedCast }) {
   );
 }
 
-function aboutCast({ cast, solution }: SolvedCast): string {
+function aboutCast({ cast, solution }: AnsweredCast): string {
   const { system } = state.value;
   const distance = cast.distanceKm === null ? [] : [shownValue(cast.distanceKm, "distance", system)];
   const depth = solution ? [shownValue(solution.column.bottomDepthM, "depth", system)] : ["no usable sample"];
   return [...distance, ...depth].join(" · ");
 }
 
-function IssueCount({ entry }: { readonly entry: SolvedCast }) {
+function IssueCount({ entry }: { readonly entry: AnsweredCast }) {
   const count = entry.issues.filter((issue) => issue.severity !== "note").length;
   return count === 0 ? null : (
     <span class="about warn">
@@ -88,8 +88,8 @@ function IssueCount({ entry }: { readonly entry: SolvedCast }) {
   );
 }
 
-function Thumbnail({ entry }: { readonly entry: SolvedCast }) {
-  const profile = entry.solution?.profile;
+function Thumbnail({ entry }: { readonly entry: AnsweredCast }) {
+  const profile = entry.drawn;
   return (
     <svg class="thumbnail" width={THUMBNAIL.widthPx} height={THUMBNAIL.heightPx} aria-hidden="true">
       {profile ? <path d={thumbnailPath(profile.depthM, profile.rhoKgM3, range.value, THUMBNAIL)} /> : null}

@@ -1,6 +1,7 @@
 import { useSignal } from "@preact/signals";
 import { useEffect, useRef } from "preact/hooks";
 import { download } from "../download.ts";
+import { readingsOf } from "../state/app-state.ts";
 import { type ExportKind, exportFiles } from "../state/export-files.ts";
 import { castInHand, solved, state } from "../store.ts";
 
@@ -35,7 +36,12 @@ export function ExportMenu() {
   const choose = (kind: ExportKind): void => {
     close();
     const { survey, casts } = solved.value;
-    for (const file of exportFiles(kind, { survey, casts, inHand: castInHand.value, readings: state.value.readings }))
+    for (const file of exportFiles(kind, {
+      survey,
+      casts,
+      inHand: castInHand.value,
+      readings: readingsOf(state.value),
+    }))
       download(file.name, file.mediaType, file.text);
   };
   const nothingYet = solved.value.casts.length === 0;

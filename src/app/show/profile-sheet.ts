@@ -1,6 +1,7 @@
 import type { CurveInput, LevelInput, PanelInput, PlumbValue, SheetInput } from "../../charts/layout/index.ts";
-import { type Basis, describeAtDepths, type Level, type Profile, type SolvedCast } from "../../survey/index.ts";
+import { type Basis, describeAtDepths, type Level } from "../../survey/index.ts";
 import { convert, convertArray, type DisplaySystem, displayUnit } from "../../units/index.ts";
+import type { AnsweredCast, DrawnProfile } from "../../worker/index.ts";
 import { ownUnit, type PageQuantity, shownValue, unitLabel } from "./shown.ts";
 import { buoyancyAround } from "./water-at.ts";
 
@@ -9,7 +10,7 @@ interface PanelKind extends Omit<PanelInput, "curves" | "unit" | "title" | "shor
   readonly title: (basis: Basis, system: DisplaySystem) => string;
   readonly shortTitle: string;
   readonly quantity: PageQuantity;
-  readonly values: (profile: Profile) => Float64Array;
+  readonly values: (profile: Omit<DrawnProfile, "firstSampleIndex" | "lastSampleIndex">) => Float64Array;
 }
 
 const PLAIN = { scale: "linear", isStepped: false, withZero: false, share: 1, isDroppable: false } as const;
@@ -85,7 +86,7 @@ const inShownUnitOne = (value: number, quantity: PageQuantity, system: DisplaySy
 
 export interface SheetSource {
   /** Those to draw; the one in hand may stand anywhere among them. */
-  readonly solved: readonly SolvedCast[];
+  readonly solved: readonly AnsweredCast[];
   readonly castInHandId: string | null;
   readonly colourIndexOf: Readonly<Record<string, number>>;
   readonly basis: Basis;
@@ -96,17 +97,17 @@ export interface SheetSource {
 /** The sheet of linked profiles in the units shown; the cast in hand comes last, so that it is drawn on top. */
 export function profileSheet(source: SheetSource): SheetInput {
   const { basis, system, levels } = source;
-  const drawn = source.solved.filter(({ solution }) => solution !== null);
+  const drawn = source.solved.filter((entry) => entry.drawn !== null);
   drawn.sort((a, b) => Number(a.cast.id === source.castInHandId) - Number(b.cast.id === source.castInHandId));
   const curvesOf = (panel: PanelKind): CurveInput[] =>
-    drawn.map(({ cast, solution }) => ({
+    drawn.map(({ cast, drawn: profile }) => ({
       castId: cast.id,
       colourIndex: source.colourIndexOf[cast.id] ?? 0,
       isInHand: cast.id === source.castInHandId,
-      depths: inShownUnit(solution!.profile.depthM, "depth", system),
-      values: inShownUnit(panel.values(solution!.profile), panel.quantity, system),
-      firstSampleIndex: 1,
-      lastSampleIndex: solution!.column.n,
+      depths: inShownUnit(profile!.depthM, "depth", system),
+      values: inShownUnit(panel.values(profile!), panel.quantity, system),
+      firstSampleIndex: profile!.firstSampleIndex,
+      lastSampleIndex: profile!.lastSampleIndex,
     }));
   const deepestM = Math.max(
     0,
@@ -138,7 +139,7 @@ export const levelInputs = (levels: readonly Level[], system: DisplaySystem): re
   }));
 
 /** Depths in m between which a cast has no samples, at the surface and at the bed. */
-function gapsOf(inHand: SolvedCast | undefined): readonly (readonly [number, number])[] {
+function gapsOf(inHand: AnsweredCast | undefined): readonly (readonly [number, number])[] {
   if (!inHand?.solution) return [];
   const { depthM, n, bottomDepthM } = inHand.solution.column;
   const gaps = [[0, depthM[0]!] as const, [depthM[n - 1]!, bottomDepthM] as const];

@@ -1,12 +1,21 @@
 import type { Issue } from "../../base/index.ts";
-import type { CastId, FileReading } from "../../cast/index.ts";
+import type { AnyFileReading, CastId, ReadingAnswers } from "../../cast/index.ts";
 import { emptySurvey, type History, type Survey, startHistory } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
+import type { RememberedAnswers } from "../../worker/index.ts";
 
 /** How a file was understood, kept beside its casts, which live in the survey. */
-export interface KeptReading extends Omit<FileReading, "casts"> {
+export interface KeptReading extends Omit<AnyFileReading, "casts"> {
   /** SHA-256 of the bytes, hexadecimal; null where the browser does not compute it. */
   readonly sha256: string | null;
+  /** What the user has said about its columns. */
+  readonly answers: ReadingAnswers;
+  /** The answers were given for an earlier file with the same headers. */
+  readonly areAnswersRemembered: boolean;
+  /** Under which answers for such a file are remembered. */
+  readonly headerKey: string;
+  /** Why there are no casts with the answers as they stand; empty where the file was read. */
+  readonly refusal: readonly Issue[];
 }
 
 /** What one file's reading had to say, whether or not casts came of it. */
@@ -16,10 +25,18 @@ export interface FileTrouble {
   readonly issues: readonly Issue[];
 }
 
+/** What can be undone: the survey, and what was said on the way from files to its casts. */
+export interface Work {
+  readonly survey: Survey;
+  readonly readings: readonly KeptReading[];
+  readonly remembered: RememberedAnswers;
+}
+
+export const emptyWork: Work = { survey: emptySurvey, readings: [], remembered: {} };
+
 /** All that the page knows and keeps; results follow from it. */
 export interface AppState {
-  readonly history: History<Survey>;
-  readonly readings: readonly KeptReading[];
+  readonly history: History<Work>;
   readonly troubles: readonly FileTrouble[];
   readonly castInHandId: CastId | null;
   readonly hiddenIds: readonly CastId[];
@@ -29,8 +46,7 @@ export interface AppState {
 }
 
 export const initialState: AppState = {
-  history: startHistory(emptySurvey),
-  readings: [],
+  history: startHistory(emptyWork),
   troubles: [],
   castInHandId: null,
   hiddenIds: [],
@@ -38,4 +54,6 @@ export const initialState: AppState = {
   system: "SI",
 };
 
-export const surveyOf = (state: AppState): Survey => state.history.present;
+export const surveyOf = (state: AppState): Survey => state.history.present.survey;
+
+export const readingsOf = (state: AppState): readonly KeptReading[] => state.history.present.readings;

@@ -16,7 +16,7 @@ export interface ExportSource {
   readonly survey: Survey;
   readonly casts: readonly SolvedCast[];
   readonly inHand: SolvedCast | null;
-  readonly readings: readonly KeptReading[];
+  readonly readings: readonly Pick<KeptReading, "fileName" | "sha256">[];
 }
 
 export interface ExportFile {

@@ -1,25 +1,25 @@
-import type { Outcome } from "../../base/index.ts";
-import type { Cast, CastId, FileReading } from "../../cast/index.ts";
-import type { LevelId } from "../../survey/index.ts";
-import { addCasts, type Basis, emptySurvey, redo, remember, type Survey, undo } from "../../survey/index.ts";
+import type { Cast, CastId } from "../../cast/index.ts";
+import {
+  addFlagEdits,
+  type Basis,
+  type FlagEdit,
+  type LevelId,
+  type Preparation,
+  redo,
+  remember,
+  removeFlagEdits,
+  type SampleRange,
+  type Survey,
+  undo,
+} from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
-import { type AppState, type FileTrouble, surveyOf } from "./app-state.ts";
+import { type AppState, emptyWork, surveyOf, type Work } from "./app-state.ts";
+import { type ReadFile, type SurveyStart, takeAgain, takeFiles, troublesOf } from "./files.ts";
 import { addLevel, changeLevel, removeLevel } from "./levels.ts";
-
-export interface ReadFile {
-  readonly fileName: string;
-  readonly sha256: string | null;
-  readonly outcome: Outcome<FileReading>;
-}
-
-/** What a survey that has no casts yet takes over with its first files. */
-export interface SurveyStart {
-  readonly name: string;
-  readonly basis?: Partial<Basis>;
-}
 
 export type Action =
   | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly start: SurveyStart }
+  | { readonly kind: "file-read-again"; readonly file: ReadFile; readonly memory: "keep" | "forget" | "as-it-is" }
   | { readonly kind: "troubles-dismissed" }
   | { readonly kind: "survey-renamed"; readonly name: string }
   | { readonly kind: "survey-cleared" }
@@ -31,6 +31,13 @@ export type Action =
   | { readonly kind: "level-renamed"; readonly levelId: LevelId; readonly name: string }
   | { readonly kind: "level-removed"; readonly levelId: LevelId }
   | { readonly kind: "basis-changed"; readonly change: Partial<Basis> }
+  | { readonly kind: "preparation-changed"; readonly change: Partial<Preparation> }
+  | {
+      readonly kind: "samples-flagged";
+      readonly ranges: readonly SampleRange[];
+      /** Null takes the user's flags back. */
+      readonly flag: FlagEdit["flag"] | null;
+    }
   | { readonly kind: "system-chosen"; readonly system: DisplaySystem }
   | { readonly kind: "undone" }
   | { readonly kind: "redone" };
@@ -38,19 +45,23 @@ export type Action =
 /** Colours told apart by eye; with more casts they come round again. */
 const COLOURS_COUNT = 6;
 
-/** The next state. What changes the survey goes through its history and can be undone; the rest is how one looks at it. */
+/** The next state. What changes the work goes through its history and can be undone; the rest is how one looks at it. */
 export function reduce(state: AppState, action: Action): AppState {
-  const survey = surveyOf(state);
-  const change = (next: Survey): AppState => settled({ ...state, history: remember(state.history, next) });
+  const work = state.history.present;
+  const { survey } = work;
+  const changeWork = (next: Work): AppState => settled({ ...state, history: remember(state.history, next) });
+  const change = (next: Survey): AppState => changeWork(next === survey ? work : { ...work, survey: next });
   switch (action.kind) {
     case "files-read":
-      return filesRead(state, action.files, action.start);
+      return { ...changeWork(takeFiles(work, action.files, action.start)), troubles: troublesOf(action.files) };
+    case "file-read-again":
+      return changeWork(remembering(takeAgain(work, action.file), action));
     case "troubles-dismissed":
       return { ...state, troubles: [] };
     case "survey-renamed":
       return change({ ...survey, name: action.name });
     case "survey-cleared":
-      return { ...change(emptySurvey), troubles: [] };
+      return { ...changeWork({ ...emptyWork, remembered: work.remembered }), troubles: [] };
     case "cast-taken":
       return { ...state, castInHandId: action.castId, hiddenIds: without(state.hiddenIds, action.castId) };
     case "cast-toggled":
@@ -67,6 +78,10 @@ export function reduce(state: AppState, action: Action): AppState {
       return change({ ...survey, levels: removeLevel(survey.levels, action.levelId) });
     case "basis-changed":
       return change({ ...survey, basis: { ...survey.basis, ...action.change } });
+    case "preparation-changed":
+      return change({ ...survey, preparation: { ...survey.preparation, ...action.change } });
+    case "samples-flagged":
+      return change(flagged(survey, action.ranges, action.flag));
     case "system-chosen":
       return { ...state, system: action.system };
     case "undone":
@@ -79,6 +94,20 @@ export function reduce(state: AppState, action: Action): AppState {
 const without = <T>(items: readonly T[], item: T): readonly T[] => items.filter((other) => other !== item);
 const toggled = <T>(items: readonly T[], item: T): readonly T[] =>
   items.includes(item) ? without(items, item) : [...items, item];
+
+const flagged = (survey: Survey, ranges: readonly SampleRange[], flag: FlagEdit["flag"] | null): Survey =>
+  ranges.reduce(
+    (next, range) => (flag === null ? removeFlagEdits(next, range) : addFlagEdits(next, range, flag)),
+    survey,
+  );
+
+/** What is remembered for files with the same headers, after one was read again. */
+function remembering(work: Work, { file, memory }: Extract<Action, { kind: "file-read-again" }>): Work {
+  const reading = work.readings.find(({ fileName }) => fileName === file.fileName);
+  if (memory === "as-it-is" || !reading) return work;
+  const { [reading.headerKey]: _, ...others } = work.remembered;
+  return { ...work, remembered: memory === "forget" ? others : { ...others, [reading.headerKey]: file.answers } };
+}
 
 /** After any change of casts: one of them is in hand, and each has a colour. */
 function settled(state: AppState): AppState {
@@ -103,27 +132,4 @@ function coloured(casts: readonly Cast[], worn: AppState["colourIndexOf"]): AppS
     wearersCount[colourIndex]!++;
   }
   return next;
-}
-
-function filesRead(state: AppState, files: readonly ReadFile[], start: SurveyStart): AppState {
-  const survey = surveyOf(state);
-  const read = files.flatMap(({ outcome, sha256 }) => (outcome.ok ? [{ ...outcome.value, sha256 }] : []));
-  const casts = read.flatMap((reading) => reading.casts);
-  const begun: Survey =
-    survey.casts.length > 0
-      ? survey
-      : { ...survey, name: survey.name || start.name, basis: { ...survey.basis, ...start.basis } };
-  const next = casts.length === 0 ? survey : addCasts(begun, casts);
-  const readings = read.map(({ casts: _, ...reading }) => reading);
-  const readAgain = new Set(readings.map((reading) => reading.fileName));
-  const troubles = files.flatMap(({ fileName, outcome }): FileTrouble[] => {
-    const issues = outcome.ok ? outcome.value.issues : outcome.issues;
-    return issues.length > 0 ? [{ fileName, wasRead: outcome.ok, issues }] : [];
-  });
-  return settled({
-    ...state,
-    history: remember(state.history, next),
-    readings: [...state.readings.filter((reading) => !readAgain.has(reading.fileName)), ...readings],
-    troubles,
-  });
 }

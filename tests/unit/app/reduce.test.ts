@@ -1,20 +1,34 @@
 import { describe, expect, it } from "vitest";
-import { type AppState, initialState, surveyOf } from "../../../src/app/state/app-state.ts";
-import { type Action, type ReadFile, reduce } from "../../../src/app/state/reduce.ts";
-import { failed, succeeded } from "../../../src/base/index.ts";
-import type { CastId } from "../../../src/cast/index.ts";
-import { readCastFile } from "../../../src/cast/index.ts";
+import { type AppState, initialState, readingsOf, surveyOf } from "../../../src/app/state/app-state.ts";
+import type { ReadFile } from "../../../src/app/state/files.ts";
+import { type Action, reduce } from "../../../src/app/state/reduce.ts";
+import { failed, type Issue, type Outcome } from "../../../src/base/index.ts";
+import { type AnyFileReading, type CastId, type ReadingAnswers, readCastFile } from "../../../src/cast/index.ts";
 
 const tableOf = (stations: readonly string[]): string =>
   `station,depth (m),temperature (degC),salinity\n${stations
     .flatMap((station) => [`${station},1,15,10`, `${station},2,14,20`])
     .join("\n")}\n`;
 
-const fileOf = (fileName: string, stations: readonly string[]): ReadFile => ({
+const NO_ANSWERS: ReadingAnswers = { columns: [] };
+
+const outcomeOf = (fileName: string, text: string, answers = NO_ANSWERS): Outcome<AnyFileReading> => {
+  const read = readCastFile(fileName, new TextEncoder().encode(text), answers);
+  return read.ok ? { ...read, value: { ...read.value, sheet: null, sheets: [] } } : read;
+};
+
+const fileOf = (fileName: string, stations: readonly string[], over: Partial<ReadFile> = {}): ReadFile => ({
   fileName,
-  sha256: "ab",
-  outcome: readCastFile(fileName, new TextEncoder().encode(tableOf(stations))),
+  sha256: stations.join(),
+  outcome: outcomeOf(fileName, tableOf(stations)),
+  answers: NO_ANSWERS,
+  areAnswersRemembered: false,
+  headerKey: "station\tdepth (m)\ttemperature (degC)\tsalinity",
+  ...over,
 });
+
+const badFile = (...issues: readonly Issue[]): ReadFile =>
+  fileOf("bad.csv", [], { sha256: null, outcome: failed(...issues), headerKey: null });
 
 const reading = (...files: readonly ReadFile[]): Action => ({ kind: "files-read", files, start: { name: "Spring" } });
 const reached = (...actions: readonly Action[]): AppState => actions.reduce(reduce, initialState);
@@ -27,7 +41,7 @@ describe("reduce", () => {
     expect(names(state)).toEqual(["Pier", "Quay"]);
     expect(surveyOf(state).name).toBe("Spring");
     expect(state.castInHandId).toBe(idOf(state, "Pier"));
-    expect(state.readings.map(({ fileName, sha256 }) => [fileName, sha256])).toEqual([["a.csv", "ab"]]);
+    expect(readingsOf(state).map(({ fileName, sha256 }) => [fileName, sha256])).toEqual([["a.csv", "Pier,Quay"]]);
     const more = reduce(state, { ...reading(fileOf("b.csv", ["Weir"])), start: { name: "Other" } } as Action);
     expect(surveyOf(more).name).toBe("Spring");
     expect(names(more).length).toBe(3);
@@ -35,16 +49,14 @@ describe("reduce", () => {
 
   it("keeps what is wrong with one file apart from the casts of another", () => {
     const issue = { severity: "error", code: "x", message: "no depth" } as const;
-    const bad: ReadFile = { fileName: "bad.csv", sha256: null, outcome: failed(issue) };
-    const state = reached(reading(bad, fileOf("a.csv", ["Pier", "Quay"])));
+    const state = reached(reading(badFile(issue), fileOf("a.csv", ["Pier", "Quay"])));
     expect(names(state)).toEqual(["Pier", "Quay"]);
     expect(state.troubles).toEqual([{ fileName: "bad.csv", wasRead: false, issues: [issue] }]);
     expect(reduce(state, { kind: "troubles-dismissed" }).troubles).toEqual([]);
   });
 
   it("starts no history entry for a file without casts", () => {
-    const bad: ReadFile = { fileName: "bad.csv", sha256: null, outcome: failed() };
-    expect(reached(reading(bad)).history.past).toEqual([]);
+    expect(reached(reading(badFile())).history.past).toEqual([]);
   });
 
   it("takes a basis only with the first files", () => {
@@ -116,12 +128,74 @@ describe("reduce", () => {
     expect(empty.castInHandId).toBeNull();
   });
 
-  it("reads a file again in place of its first reading", () => {
-    const value = readCastFile("a.csv", new TextEncoder().encode(tableOf(["A", "B"])));
-    if (!value.ok) throw new Error("unreadable");
-    const again: ReadFile = { fileName: "a.csv", sha256: "cd", outcome: succeeded(value.value) };
-    const state = reached(reading(fileOf("a.csv", ["A", "B"])), reading(again));
-    expect(state.readings.map(({ sha256 }) => sha256)).toEqual(["cd"]);
-    expect(new Set(surveyOf(state).casts.map((cast) => cast.id)).size).toBe(4);
+  it("takes a file that is there already in place of its first reading, and keeps another of the same name apart", () => {
+    const state = reached(reading(fileOf("a.csv", ["A", "B"])), reading(fileOf("a.csv", ["A", "B"])));
+    expect(names(state)).toEqual(["A", "B"]);
+    expect(readingsOf(state).length).toBe(1);
+    const other = reduce(state, reading(fileOf("a.csv", ["A", "C"])));
+    expect(names(other)).toEqual(["A", "B", "A (2)", "C"]);
+    expect(readingsOf(other).map(({ fileName }) => fileName)).toEqual(["a.csv", "a.csv (2)"]);
+    expect(surveyOf(other).casts.map((cast) => cast.fileName)).toEqual(["a.csv", "a.csv", "a.csv (2)", "a.csv (2)"]);
+  });
+});
+
+describe("reading a file again", () => {
+  const inFeet: ReadingAnswers = { columns: [{ header: "depth (m)", role: "depth", unit: "ft" }] };
+  const again = (over: Partial<ReadFile> = {}): ReadFile =>
+    fileOf("a.csv", ["A", "B"], { outcome: outcomeOf("a.csv", tableOf(["A", "B"]), inFeet), answers: inFeet, ...over });
+  const start = reached(reading(fileOf("a.csv", ["A", "B"]), fileOf("b.csv", ["C"])));
+  const readAgain = (state: AppState, file: ReadFile, memory: "keep" | "forget" | "as-it-is" = "keep"): AppState =>
+    reduce(state, { kind: "file-read-again", file, memory });
+
+  it("puts its casts where they were, remembers the answers for its headers, and can be undone", () => {
+    const state = readAgain(start, again());
+    expect(names(state)).toEqual(["A", "B", "C"]);
+    expect(readingsOf(state)[0]!.answers).toEqual(inFeet);
+    expect(state.history.present.remembered).toEqual({ [again().headerKey!]: inFeet });
+    const undone = reduce(state, { kind: "undone" });
+    expect(readingsOf(undone)[0]!.answers).toEqual(NO_ANSWERS);
+    expect(undone.history.present.remembered).toEqual({});
+  });
+
+  it("forgets answers when told to", () => {
+    const forgotten = readAgain(readAgain(start, again()), fileOf("a.csv", ["A", "B"]), "forget");
+    expect(forgotten.history.present.remembered).toEqual({});
+    expect(readingsOf(forgotten)[0]!.answers).toEqual(NO_ANSWERS);
+  });
+
+  it("takes the casts away and says why where the answers leave none", () => {
+    const issue = { severity: "error", code: "no-depth", message: "no depth" } as const;
+    const state = readAgain(start, again({ outcome: failed(issue), headerKey: null }));
+    expect(names(state)).toEqual(["C"]);
+    expect(readingsOf(state)[0]!).toMatchObject({ fileName: "a.csv", refusal: [issue], answers: inFeet });
+    expect(names(readAgain(state, again()))).toEqual(["C", "A", "B"]);
+  });
+
+  it("keeps the user's flags on casts that have the same samples", () => {
+    const castId = idOf(start, "A");
+    const ranges = [{ castId, fromIndex: 0, toIndex: 1 }];
+    const flagged = reduce(start, { kind: "samples-flagged", ranges, flag: 4 });
+    expect(surveyOf(readAgain(flagged, again())).flagEdits.length).toBe(2);
+    const fewer = again({ outcome: outcomeOf("a.csv", tableOf(["Z"])) });
+    expect(surveyOf(readAgain(flagged, fewer)).flagEdits).toEqual([]);
+  });
+});
+
+describe("flags and preparation", () => {
+  const start = reached(reading(fileOf("a.csv", ["A", "B"])));
+  const castId = idOf(start, "A");
+
+  it("flags ranges of samples, takes the flags back, and undoes both", () => {
+    const ranges = [{ castId, fromIndex: 0, toIndex: 0 }];
+    const flagged = reduce(start, { kind: "samples-flagged", ranges, flag: 4 });
+    expect(surveyOf(flagged).flagEdits).toEqual([{ castId, sampleIndex: 0, flag: 4 }]);
+    const cleared = reduce(flagged, { kind: "samples-flagged", ranges, flag: null });
+    expect(surveyOf(cleared).flagEdits).toEqual([]);
+    expect(surveyOf(reduce(cleared, { kind: "undone" })).flagEdits.length).toBe(1);
+  });
+
+  it("changes one part of the preparation", () => {
+    const state = reduce(start, { kind: "preparation-changed", change: { binM: 0.5 } });
+    expect(surveyOf(state).preparation).toEqual({ way: "auto", binM: 0.5, waterKind: "any" });
   });
 });

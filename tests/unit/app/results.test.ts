@@ -2,13 +2,14 @@ import { describe, expect, it } from "vitest";
 import { steppedDepthM } from "../../../src/app/show/plumb-steps.ts";
 import { shownPercent, shownValue } from "../../../src/app/show/shown.ts";
 import { behindDepth, buoyancyAround, strongestStratification } from "../../../src/app/show/water-at.ts";
-import { initialState } from "../../../src/app/state/app-state.ts";
+import { emptyWork, initialState } from "../../../src/app/state/app-state.ts";
 import { exportFiles } from "../../../src/app/state/export-files.ts";
 import { governingCast } from "../../../src/app/state/governing-cast.ts";
+import { samplesKeysOf, statePacker, takeUp } from "../../../src/app/state/saved-state.ts";
 import { nextShare, stillValid } from "../../../src/app/state/solved-share.ts";
-import { takeUp } from "../../../src/app/state/take-up.ts";
-import { readCastFile } from "../../../src/cast/index.ts";
+import { type CastId, readCastFile } from "../../../src/cast/index.ts";
 import {
+  addFlagEdits,
   defaultBasis,
   emptySurvey,
   type LevelId,
@@ -61,7 +62,17 @@ describe("sharing out the work", () => {
     const more = { ...survey, name: "Renamed", casts: [...survey.casts, castNamed("New", 5)] };
     expect(stillValid(solved, more).map(({ cast }) => cast.name)).toEqual(["Fresh", "Salt"]);
     expect(stillValid(solved, { ...survey, basis: { ...defaultBasis } })).toEqual([]);
-    expect(stillValid(solved, { ...survey, levels: [] })).toEqual([]);
+    expect(stillValid(solved, { ...survey, preparation: { ...survey.preparation } })).toEqual([]);
+    expect(stillValid(solved, { ...survey, levels: [] }).length).toBe(2);
+  });
+
+  it("solves again only the cast that was flagged", () => {
+    const casts = [castNamed("Fresh", 1), { ...castNamed("Salt", 30), id: "salt" as CastId }];
+    const survey = surveyOf({ casts });
+    const flagged = addFlagEdits(survey, { castId: "salt" as CastId, fromIndex: 0, toIndex: 0 }, 4);
+    const valid = stillValid({ survey, casts: solve(survey) }, flagged);
+    expect(valid.map(({ cast }) => cast.name)).toEqual(["Fresh"]);
+    expect(stillValid({ survey: flagged, casts: solve(flagged) }, { ...flagged, name: "x" }).length).toBe(2);
   });
 
   it("takes casts from the front up to a limit of samples, and at least one", () => {
@@ -73,13 +84,35 @@ describe("sharing out the work", () => {
   });
 });
 
-describe("takeUp", () => {
+describe("saved state", () => {
+  const survey = surveyOf();
+  const state = { ...initialState, history: startHistory({ ...emptyWork, survey }) };
+  const keys = new Map(survey.casts.map(({ name, samples }) => [samples, `key of ${name}`]));
+  const pack = statePacker((samples) => keys.get(samples)!);
+  const samplesByKey = new Map(survey.casts.map(({ name, samples }) => [`key of ${name}`, samples]));
+
+  it("names the samples by key, makes anew only what changed, and comes back whole", () => {
+    const saved = pack(state);
+    expect([...samplesKeysOf(saved)]).toEqual(["key of Fresh", "key of Salt"]);
+    expect(JSON.stringify(saved)).not.toContain("inSituTempC");
+    expect(pack({ ...state, system: "US" }).history.present).toBe(saved.history.present);
+    expect(takeUp(structuredClone(saved), samplesByKey)).toEqual(state);
+  });
+
+  it("leaves out casts whose samples are lost", () => {
+    const [first] = samplesByKey;
+    const { casts } = takeUp(pack(state), new Map([first!])).history.present.survey;
+    expect(casts.map(({ name }) => name)).toEqual(["Fresh"]);
+  });
+
   it("completes work that was saved before a part of the survey existed", () => {
-    const survey = surveyOf();
     const { levels: _, ...older } = survey;
     const { airPressureKPa: __, ...olderBasis } = survey.basis;
-    const saved = { ...initialState, history: startHistory({ ...older, basis: olderBasis } as Survey) };
-    expect(takeUp(saved).history.present).toEqual({ ...emptySurvey, ...survey, levels: [] });
+    const before = {
+      ...state,
+      history: startHistory({ ...emptyWork, survey: { ...older, basis: olderBasis } as Survey }),
+    };
+    expect(takeUp(pack(before), samplesByKey).history.present.survey).toEqual({ ...survey, levels: [] });
   });
 });
 

@@ -1,0 +1,4 @@
+import { expose } from "comlink";
+import { readerTasks } from "./reader-tasks.ts";
+
+expose(readerTasks);

@@ -1,4 +1,0 @@
-import { expose } from "comlink";
-import { tasks } from "./tasks.ts";
-
-expose(tasks);
