@@ -1,5 +1,6 @@
-import type { Basis } from "../survey/index.ts";
+import type { Basis, Preparation } from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
+import { preparationJson } from "./preparation-json.ts";
 import type { ColumnDescription } from "./table.ts";
 import { VERSION } from "./version.ts";
 
@@ -20,13 +21,13 @@ const schema = ({ name, description, datatype, unit }: ColumnDescription): Recor
 
 /**
  * The metadata that goes beside a table (W3C Tabular Data, CSVW): what each column is and in which unit, and, under
- * notes, the basis, the program and the checksums of the input.
+ * notes, the basis, the preparation, the program and the checksums of the input.
  * @param url name of the CSV file it stands beside
  */
 export const tableMetadata = (
   url: string,
   columns: readonly ColumnDescription[],
-  made: { readonly basis: Basis; readonly sources: readonly SourceFile[] },
+  made: { readonly basis: Basis; readonly preparation?: Preparation; readonly sources: readonly SourceFile[] },
 ): Record<string, unknown> => ({
   "@context": "http://www.w3.org/ns/csvw",
   url,
@@ -36,6 +37,7 @@ export const tableMetadata = (
     {
       program: `Layerhead ${VERSION}`,
       basis: basisJson(made.basis),
+      ...(made.preparation && { preparation: preparationJson(made.preparation) }),
       sources: made.sources.map(({ fileName, sha256 }) => ({ file: fileName, sha256 })),
     },
   ],

@@ -1,6 +1,7 @@
-import type { Profile, SolvedCast, Survey } from "../survey/index.ts";
+import type { PreparedCast, Profile, SolvedCast, Survey } from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
 import { PROFILE_COLUMNS } from "./columns.ts";
+import { preparationJson } from "./preparation-json.ts";
 import { VERSION } from "./version.ts";
 
 type Numbers = readonly (number | null)[];
@@ -14,15 +15,30 @@ const profileJson = (profile: Profile): Record<string, Numbers | readonly string
   origin: profile.origin,
 });
 
+/** The samples of a cast that are not in its column, and why; depth as the file has it. */
+const leftOutJson = (
+  { samples }: SolvedCast["cast"],
+  { use, flag, reasons }: PreparedCast,
+): readonly Record<string, unknown>[] =>
+  [...use.keys()]
+    .filter((i) => use[i] === 0)
+    .map((i) => ({
+      line: samples.lineIndex[i]!,
+      depth_m: samples.depthM && Number.isFinite(samples.depthM[i]) ? samples.depthM[i]! : null,
+      flag: flag[i]!,
+      reasons: reasons[i]!,
+    }));
+
 /**
- * A solved survey as one JSON value: every profile as arrays in order of depth, every level, every issue, and the basis
- * they stand on. A cast that could not be solved has null for profile and levels, and its issues say why.
+ * A solved survey as one JSON value: every profile as arrays in order of depth, every level, every sample
+ * left out, every issue, and the basis and preparation they stand on. A cast that could not be solved has null for profile and levels, and its issues say why.
  */
 export function surveyJson(survey: Survey, solved: readonly SolvedCast[]): Record<string, unknown> {
   return {
     version: VERSION,
     basis: basisJson(survey.basis),
-    casts: solved.map(({ cast, solution, issues }) => ({
+    preparation: preparationJson(survey.preparation),
+    casts: solved.map(({ cast, prepared, solution, issues }) => ({
       name: cast.name,
       station: cast.station,
       time: cast.time,
@@ -33,6 +49,7 @@ export function surveyJson(survey: Survey, solved: readonly SolvedCast[]): Recor
       reference_density_kg_m3: solution?.column.referenceRhoKgM3 ?? null,
       profile: solution && { ...profileJson(solution.profile), flag: numbers(solution.flag) },
       levels: solution && { level: survey.levels.map((level) => level.name), ...profileJson(solution.levels) },
+      left_out: leftOutJson(cast, prepared),
       issues: issues.map(({ severity, code, message, line }) => ({ severity, code, message, line: line ?? null })),
     })),
   };

@@ -43,8 +43,38 @@ describe("solve", () => {
     expect(bedded!.issues.map((issue) => issue.code)).toContain("level-below-bed");
   });
 
-  it("flags rows without a sample as missing and the others as not evaluated", () => {
-    expect([...quay!.solution!.flag]).toEqual([9, 2, 2, 2]);
+  it("flags rows without a sample as missing and good samples as passed", () => {
+    expect([...quay!.solution!.flag]).toEqual([9, 1, 1, 1]);
+  });
+
+  it("leaves out what fails or what the user takes out, and carries the flag of what it uses", () => {
+    const { id } = survey.casts[0]!;
+    const [without] = solve({ ...survey, flagEdits: [{ castId: id, sampleIndex: 1, flag: 4 }] });
+    expect([...without!.solution!.profile.depthM]).toEqual([0, 1, 6]);
+    expect([...without!.prepared.use]).toEqual([1, 0, 1]);
+    const [fresh] = solve({ ...survey, preparation: { ...survey.preparation, waterKind: "fresh" } });
+    expect([...fresh!.solution!.flag]).toEqual([9, 3, 3, 3]);
+    expect(fresh!.issues.map(({ code }) => code)).toContain("gross-range");
+  });
+
+  it("flags a bin as badly as its worst sample", () => {
+    const [binned] = solve({
+      ...survey,
+      casts: [
+        castOf({ depthM: [0.9, 1.1, 2, 3], inSituTempC: [15.1, 15, 14, 13], practicalSalinity: [5, 43, 44, 44.5] }),
+      ],
+      preparation: { ...survey.preparation, binM: 1 },
+    });
+    expect([...binned!.prepared.binCount!]).toEqual([2, 1, 1]);
+    expect([...binned!.solution!.profile.depthM]).toEqual([0, 1, 2, 3]);
+    expect([...binned!.solution!.flag].slice(0, 3)).toEqual([9, 3, 3]);
+  });
+
+  it("keeps what is said of the samples when none is left to integrate", () => {
+    const edits = [0, 1, 2].map((sampleIndex) => ({ castId: survey.casts[0]!.id, sampleIndex, flag: 4 as const }));
+    const [emptied] = solve({ ...survey, flagEdits: edits });
+    expect(emptied!.solution).toBeNull();
+    expect(emptied!.prepared.reasons).toEqual([["taken out by hand"], ["taken out by hand"], ["taken out by hand"]]);
   });
 
   it("gives elevations where the water surface has one", () => {
@@ -61,7 +91,7 @@ describe("solve", () => {
   });
 
   it("is plain data that can be handed to another thread", () => {
-    expect(structuredClone(quay!.solution)).toEqual(quay!.solution);
+    expect(structuredClone(quay)).toEqual(quay);
   });
 
   it("solves an empty survey to nothing", () => {
