@@ -1,5 +1,5 @@
 /** One cast from its rows: what is left out and why, and the samples that remain, in file order. */
-import { median } from "simple-statistics";
+import { median, min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
 import type { Cast, CastId, Samples } from "../cast.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
@@ -91,18 +91,32 @@ function samplesOf(rows: MeasuredRows, kept: readonly number[]): Samples {
   return {
     n: kept.length,
     lineIndex: Int32Array.from(kept, (i) => rows.lineIndex[i]!),
-    depthM: pick(rows.depthM),
+    depthM: rows.isFromHighest ? fromLeast(pick(rows.depthM)) : pick(rows.depthM),
     seaPressureDbar: pick(rows.seaPressureDbar),
     inSituTempC: Float64Array.from(kept, (i) => rows.inSituTempC[i]!),
     practicalSalinity: pick(rows.practicalSalinity),
     conductivityMsCm: pick(rows.conductivityMsCm),
     specificConductanceMsCm: pick(rows.specificConductanceMsCm),
-    absSalinityGKg: null,
-    suspendedSedimentKgM3: null,
-    timeS: null,
-    statedFlag: null,
+    absSalinityGKg: pick(rows.absSalinityGKg),
+    suspendedSedimentKgM3: pick(rows.suspendedSedimentKgM3),
+    timeS: sinceFirst(pick(rows.timeS)),
+    statedFlag: rows.statedFlag && Uint8Array.from(kept, (i) => rows.statedFlag![i]!),
     statedSigmaKgM3: pick(rows.statedSigmaKgM3),
   };
+}
+
+/** The water level moves from cast to cast: each has its own highest sample. */
+function fromLeast(depthM: Float64Array | null): Float64Array | null {
+  if (depthM === null || depthM.length === 0) return depthM;
+  const least = min([...depthM]);
+  return depthM.map((value) => value - least);
+}
+
+/** One time for a whole cast is no time of its samples. */
+function sinceFirst(timeS: Float64Array | null): Float64Array | null {
+  const first = timeS?.find((value) => !Number.isNaN(value));
+  if (!timeS || first === undefined || !timeS.some((value) => value !== first && !Number.isNaN(value))) return null;
+  return timeS.map((value) => value - first);
 }
 
 /** A boat drifts on station: the middle of what the rows say. */
@@ -124,7 +138,7 @@ export function buildCast(rows: MeasuredRows, group: RowGroup, fileName: string)
     latitudeDeg: middle(rows.latitudeDeg, kept, 90),
     longitudeDeg: middle(rows.longitudeDeg, kept, 180),
     distanceKm: middle(rows.distanceKm, kept),
-    waterDepthM: null,
+    waterDepthM: middle(rows.waterDepthM?.map((value) => (value > 0 ? value : Number.NaN)) ?? null, kept),
     fileName,
     samples: samplesOf(rows, kept),
     issues,

@@ -1,17 +1,28 @@
 /** Reads the cells of a role, and keeps account of what could not be read or had to be filled in. */
 import type { Issue } from "../../base/index.ts";
-import { convert } from "../../units/index.ts";
+import { convertArray } from "../../units/index.ts";
 import type { ColumnRole } from "../reading.ts";
-import { isMissing, isSentinel, parseNumber } from "./parse-number.ts";
-import type { RecognisedColumns } from "./recognise-columns.ts";
+import { isMissing, parseNumber } from "./parse-number.ts";
+import { parsePosition } from "./parse-position.ts";
+import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
 import { MEASURED, type MeasuredRole, ROLE_WORDS } from "./roles.ts";
+import { findSentinels } from "./sentinels.ts";
 import type { Table } from "./table.ts";
+import type { TimeForm } from "./time-form.ts";
 
 /** A cell that should have held a number or a time and holds some other text. */
 export interface BadCell {
   readonly code: "not-a-number" | "not-a-time";
   readonly message: string;
 }
+
+const isPlace = (role: MeasuredRole): boolean => role === "latitude" || role === "longitude";
+
+const MONTH_FIRST: TimeForm = { order: "month-first", count: null };
+
+const kindsOf = (texts: readonly string[]): string => [...new Set(texts)].join(", ");
+
+const rowCount = (texts: readonly string[]): string => (texts.length === 1 ? "1 row" : `${texts.length} rows`);
 
 export class CellReader {
   /** By row of the table. */
@@ -28,14 +39,15 @@ export class CellReader {
   /** null where the file has no such column. */
   texts(role: ColumnRole): readonly string[] | null {
     const column = this.#columns.used[role];
-    return column ? this.#table.rows.map((row) => row.cells[column.columnIndex] ?? "") : null;
+    return column ? this.textsAt(column.columnIndex) : null;
   }
 
-  /** The header and the unit of a column, as written; empty where there is no such column. */
-  nameOf(role: ColumnRole): string {
-    const column = this.#columns.used[role];
-    if (!column) return "";
-    return `${this.#table.header.cells[column.columnIndex]} ${this.#table.unitTexts[column.columnIndex]}`;
+  textsAt(columnIndex: number): readonly string[] {
+    return this.#table.rows.map((row) => row.cells[columnIndex] ?? "");
+  }
+
+  timeForm(role: "date" | "dateTime"): TimeForm {
+    return this.#columns.used[role]?.time ?? MONTH_FIRST;
   }
 
   /** As `texts`; a blank takes the text above it, as where a sheet writes the station once and leaves it out below. */
@@ -57,29 +69,67 @@ export class CellReader {
     return filled;
   }
 
+  /** In the unit of the program; NaN where nothing was measured. */
   numbers(role: MeasuredRole): Float64Array | null {
     const column = this.#columns.used[role];
-    const texts = this.texts(role);
-    if (!column || texts === null) return null;
-    const from = column.unit ?? MEASURED[role].unit;
-    const sentinels: string[] = [];
-    const values = Float64Array.from(texts, (text, rowIndex) => {
-      if (isSentinel(role, text)) {
-        sentinels.push(text);
-        return Number.NaN;
+    if (!column) return null;
+    const values = this.#written(role, column);
+    this.#dropSentinels(role, column.columnIndex, values);
+    const { unit } = MEASURED[role];
+    const from = column.unit ?? unit;
+    const converted = from === unit ? values : convertArray(values, from, unit);
+    // A header that says west or south means it only where the figures carry no sign of their own.
+    const isSigned = column.isNegated && isPlace(role) && values.some((value) => value < 0);
+    return column.isNegated && !isSigned ? converted.map((value) => -value) : converted;
+  }
+
+  /** The numbers as they stand in the file. */
+  #written(role: MeasuredRole, column: UsedColumn): Float64Array {
+    const { rows } = this.#table;
+    const parse = isPlace(role) ? parsePosition : parseNumber;
+    const values = new Float64Array(rows.length);
+    for (let i = 0; i < rows.length; i++) {
+      const text = rows[i]!.cells[column.columnIndex] ?? "";
+      const value = parse(text, column.style);
+      if (value === null) {
+        const expected = isPlace(role) ? "degrees" : "a number or a blank";
+        this.#reject(i, {
+          code: "not-a-number",
+          message: `${ROLE_WORDS[role]} "${text}" is not a number; expected ${expected}`,
+        });
       }
-      const value = parseNumber(text, this.#columns.decimalMark);
-      if (value !== null) return convert(value, from, MEASURED[role].unit);
-      const message = `${ROLE_WORDS[role]} "${text}" is not a number; expected a number or a blank`;
-      this.#reject(rowIndex, { code: "not-a-number", message });
-      return Number.NaN;
-    });
-    if (sentinels.length > 0) {
-      const kinds = [...new Set(sentinels)].join(", ");
-      const message = `${ROLE_WORDS[role]}: ${kinds} is read as not measured, in ${sentinels.length} rows`;
-      this.issues.push({ severity: "note", code: "sentinel", message });
+      values[i] = value ?? Number.NaN;
     }
     return values;
+  }
+
+  #dropSentinels(role: MeasuredRole, columnIndex: number, values: Float64Array): void {
+    const { found, kept } = findSentinels(values, role);
+    if (found.size + kept.size === 0) return;
+    const foundTexts: string[] = [];
+    const keptTexts: string[] = [];
+    for (let i = 0; i < values.length; i++) {
+      const isFound = found.has(values[i]!);
+      if (isFound || kept.has(values[i]!)) {
+        (isFound ? foundTexts : keptTexts).push(this.#table.rows[i]!.cells[columnIndex]!);
+      }
+      if (isFound) values[i] = Number.NaN;
+    }
+    const words = ROLE_WORDS[role];
+    if (foundTexts.length > 0) {
+      this.#note("sentinel", `${words}: ${kindsOf(foundTexts)} is read as not measured, in ${rowCount(foundTexts)}`);
+    }
+    if (keptTexts.length > 0) {
+      const why = "near the rest of its column; if it means not measured, leave it blank";
+      this.#note(
+        "sentinel-kept",
+        `${words}: ${kindsOf(keptTexts)} in ${rowCount(keptTexts)} is read as measured, ${why}`,
+      );
+    }
+  }
+
+  #note(code: string, message: string): void {
+    this.issues.push({ severity: "note", code, message });
   }
 
   /** Blank where there is none, or where `read` cannot make sense of it. */

@@ -1,8 +1,13 @@
 /** What the rows of a table must be like, taken together, before casts can be made of them. */
 import { min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
+import type { Question } from "../reading.ts";
+import { answerName } from "./answers.ts";
+import { choose, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
+import type { RecognisedColumns } from "./recognise-columns.ts";
 import type { Table } from "./table.ts";
+import { isWeightOfAir } from "./vertical.ts";
 
 const overlong = (table: Table) =>
   table.rows.filter((row) => row.cells.slice(table.header.cells.length).some((cell) => cell !== ""));
@@ -33,17 +38,24 @@ function upsideDownIssue(rows: MeasuredRows): Issue | null {
   return { severity: "error", code: "depth-upside-down", message };
 }
 
-/** One standard atmosphere is 10.13 dbar; at altitude and in any weather the air weighs between these. */
-const LIGHTEST_AIR_DBAR = 7.5;
-const HEAVIEST_AIR_DBAR = 10.9;
-
-function absolutePressureIssue(rows: MeasuredRows): Issue | null {
+/** Pressure that starts at the weight of the air, without saying whether the air is in it. */
+export function airInPressure(table: Table, columns: RecognisedColumns, rows: MeasuredRows): Question | null {
+  const column = columns.used.seaPressure;
   const pressures = [...(rows.seaPressureDbar ?? [])].filter((pressure) => !Number.isNaN(pressure));
-  if (pressures.length === 0) return null;
+  if (!column || rows.isGaugePressure || pressures.length === 0) return null;
   const least = min(pressures);
-  if (least < LIGHTEST_AIR_DBAR || least > HEAVIEST_AIR_DBAR) return null;
-  const message = `pressure starts at ${least.toFixed(2)} dbar, about the weight of the air; expected 0 at the surface; if it is absolute, take the air pressure off`;
-  return { severity: "warning", code: "pressure-may-be-absolute", message };
+  if (!isWeightOfAir(least)) return null;
+  const { columnIndex, unit } = column;
+  const name = answerName(table.header.cells, columnIndex);
+  const header = table.header.cells[columnIndex]!;
+  return questionOf(columnIndex, name, {
+    code: "pressure-may-be-absolute",
+    message: `"${header}" starts at ${least.toFixed(2)} dbar, about the weight of the air; expected 0 at the surface; say whether it is gauge or absolute`,
+    choices: [
+      choose(name, "absolutePressure", unit, `absolute: it holds the weight of the air`),
+      choose(name, "seaPressure", unit, `gauge: the first sample lies ${least.toFixed(1)} dbar deep`),
+    ],
+  });
 }
 
 function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDeg: number): Issue | null {
@@ -58,7 +70,6 @@ export function checkRows(table: Table, rows: MeasuredRows): readonly Issue[] {
   const issues = [
     widthIssue(table),
     upsideDownIssue(rows),
-    absolutePressureIssue(rows),
     offTheEarthIssue("latitude", rows.latitudeDeg, 90),
     offTheEarthIssue("longitude", rows.longitudeDeg, 180),
   ];

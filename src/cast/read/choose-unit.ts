@@ -12,6 +12,8 @@ export interface UnitChoice {
   readonly unit: UnitSymbol | null;
   readonly reason: string;
   readonly issue: Issue | null;
+  /** The units it could be, where none could be told. */
+  readonly open: readonly UnitSymbol[];
 }
 
 export interface UnitlessColumn {
@@ -30,7 +32,7 @@ const shown = (value: number): string => String(Number(value.toPrecision(4)));
 
 const span = (values: readonly number[]): string => `${shown(min([...values]))} to ${shown(max([...values]))}`;
 
-const silent = (unit: UnitSymbol, reason: string): UnitChoice => ({ unit, reason, issue: null });
+const silent = (unit: UnitSymbol, reason: string): UnitChoice => ({ unit, reason, issue: null, open: [] });
 
 function assumed(column: UnitlessColumn, unit: UnitSymbol, why: string, severity: "note" | "warning"): UnitChoice {
   const message = `"${column.header}" has no unit; ${unit} is assumed because ${why}; if that is wrong, write the unit in the header`;
@@ -38,25 +40,37 @@ function assumed(column: UnitlessColumn, unit: UnitSymbol, why: string, severity
     unit,
     reason: `no unit in the file, ${unit} assumed because ${why}`,
     issue: { severity, code: `assumed-unit-${kebab(column.role)}`, message },
+    open: [],
   };
 }
 
-function undecided(column: UnitlessColumn, why: string, unit: string): UnitChoice {
-  const message = `"${column.header}" has no unit, and ${why}; write the unit in the header, as in "${column.header} (${unit})"`;
+function undecided(column: UnitlessColumn, why: string, open: readonly UnitSymbol[]): UnitChoice {
+  const message = `"${column.header}" has no unit, and ${why}; say which, or write the unit in the header, as in "${column.header} (${open[0]})"`;
   return {
     unit: null,
     reason: `no unit in the file, and ${why}`,
     issue: { severity: "warning", code: askedUnitCode(column.role), message },
+    open,
   };
 }
 
+/** Liquid water in nature, in kelvin. */
+const COLDEST_K = 270;
+const WARMEST_K = 318;
+
 function temperatureUnit(column: UnitlessColumn): UnitChoice {
   const middle = median([...column.values]);
+  const least = min([...column.values]);
   const why = `values lie in ${span(column.values)}`;
-  if (middle < -2 || middle > 45) return undecided(column, `${why}, which is no water in degC`, "degF");
+  if (least >= COLDEST_K && max([...column.values]) <= WARMEST_K) return assumed(column, "K", why, "warning");
+  if (middle < -2 || middle > 45) return undecided(column, `${why}, which is no water in degC`, ["degF", "degC", "K"]);
+  if (least >= 32)
+    return undecided(column, `${why}, which is warm water in degC and cold water in degF`, ["degC", "degF"]);
   if (middle > 35) return assumed(column, "degC", `${why}, though degF is as likely`, "warning");
   return assumed(column, "degC", why, "note");
 }
+
+const CONDUCTIVITY_UNITS: readonly UnitSymbol[] = ["uS/cm", "mS/cm", "S/m"];
 
 /** No natural water conducts more than this, in S/m and in mS/cm. */
 const MOST_S_PER_M = 7;
@@ -79,7 +93,7 @@ function conductivityUnit(column: UnitlessColumn): UnitChoice {
   if (canBeSea && middle >= 3 && middle <= 6 && most <= MOST_S_PER_M) {
     return assumed(column, "S/m", `${why}, as of sea water in S/m`, "warning");
   }
-  return undecided(column, `${why}, which could be more than one of uS/cm, mS/cm and S/m`, "uS/cm");
+  return undecided(column, `${why}, which could be more than one of uS/cm, mS/cm and S/m`, CONDUCTIVITY_UNITS);
 }
 
 function distanceUnit(column: UnitlessColumn): UnitChoice {

@@ -1,21 +1,30 @@
-/** A column that could have a role by its name, before it is compared with others of the same role. */
+/** A column that could have a role by its name, or because the user said so, before it is compared with others. */
 import type { ColumnRole } from "../reading.ts";
+import { answerName, type ResolvedAnswer } from "./answers.ts";
+import { dayCountOf } from "./day-count.ts";
+import { type MarkEvidence, markEvidence } from "./number-style.ts";
 import { isMissing } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseDateTime } from "./parse-time.ts";
-import { readHeaderCell, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
+import { ABSOLUTE, readHeaderCell, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
 import type { Table } from "./table.ts";
 
 export interface Contender {
   readonly columnIndex: number;
   readonly header: string;
+  /** How an answer of the user names it. */
+  readonly name: string;
   readonly role: ColumnRole;
-  /** Place of the name among those of its role; the smaller the better. */
+  /** Place of the name among those of its role; the smaller the better, and what the user said is best. */
   readonly rankIndex: number;
   readonly written: WrittenUnit | null;
   readonly unitSource: "its header" | "the units row";
+  readonly countsWestOrSouth: boolean;
   /** The cells that hold something, as written. */
   readonly filled: readonly string[];
+  /** How its numbers are written; null for texts and times. */
+  readonly evidence: MarkEvidence | null;
+  readonly answer: ResolvedAnswer | null;
 }
 
 /** So many cells tell what kind of thing a column holds. */
@@ -25,28 +34,55 @@ export const TELLING_CELLS = 200;
 function roleByContent(role: ColumnRole, filled: readonly string[]): ColumnRole {
   if (role !== "date" && role !== "clock" && role !== "dateTime") return role;
   const telling = filled.slice(0, TELLING_CELLS);
+  const count = dayCountOf(telling);
+  if (count !== null)
+    return telling.every((cell) => /^\d+(\.0*)?$/.test(cell)) && count.stepMs > 1000 ? "date" : "dateTime";
   const { order } = dateOrderOf(telling.map(datePart));
   const moments = telling.map((cell) => parseDateTime(cell, order)).filter((moment) => moment !== null);
   if (moments.length === 0) return role;
   return moments.some((moment) => moment.clock !== null) ? "dateTime" : "date";
 }
 
-/** null when the header is no name that we use. */
-export function contenderOf(table: Table, columnIndex: number): Contender | null {
+/** The role and the unit that a header, the format or the user gives to a column; null when none does. */
+function namedRole(table: Table, columnIndex: number, answer: ResolvedAnswer | null) {
   const header = table.header.cells[columnIndex]!;
   const meaning = readHeaderCell(header);
-  if (meaning === null) return null;
+  if (answer !== null && answer.role !== "unused") {
+    const written = isMeasured(answer.role) && meaning?.role === answer.role ? meaning.written : null;
+    return { role: answer.role, rankIndex: -2, written };
+  }
+  const ownRole = table.ownRoles?.get(header);
+  if (ownRole !== undefined) return { role: ownRole, rankIndex: -1, written: null };
+  return meaning;
+}
+
+/** null when the header is no name that we use. */
+export function contenderOf(table: Table, columnIndex: number, answer: ResolvedAnswer | null): Contender | null {
+  const header = table.header.cells[columnIndex]!;
+  const meaning = namedRole(table, columnIndex, answer);
+  if (meaning === null || answer?.role === "unused") return null;
   const filled = table.rows.map((row) => row.cells[columnIndex] ?? "").filter((cell) => !isMissing(cell));
-  const role = roleByContent(meaning.role, filled);
-  const fromRow = isMeasured(role) ? writtenUnit([table.unitTexts[columnIndex]!], MEASURED[role].kind) : null;
+  const unitText = table.unitTexts[columnIndex] ?? "";
+  const isAbsolute = meaning.role === "seaPressure" && ABSOLUTE.test(unitText);
+  const named = isAbsolute ? "absolutePressure" : meaning.role;
+  const role = answer ? meaning.role : roleByContent(named, filled);
+  const fromRow = isMeasured(role) ? writtenUnit([unitText], MEASURED[role].kind) : null;
   const isInHeader = meaning.written !== null && (meaning.written.unit !== null || fromRow === null);
+  const isPlace = role === "latitude" || role === "longitude";
   return {
     columnIndex,
     header,
+    name: answerName(table.header.cells, columnIndex),
     role,
     rankIndex: meaning.rankIndex,
     written: isInHeader ? meaning.written : fromRow,
     unitSource: isInHeader ? "its header" : "the units row",
+    countsWestOrSouth: isPlace && WEST_OR_SOUTH.test(`${header} ${unitText}`),
     filled,
+    evidence: isMeasured(role) ? markEvidence(filled) : null,
+    answer,
   };
 }
+
+/** "Longitude (W)", "Long_W", "Longitude West", "degrees_west". */
+const WEST_OR_SOUTH = /(^|[^a-z])(w|s|west|south|degw|degs)([^a-z]|$)/i;

@@ -1,99 +1,112 @@
 /** The rows of a table as arrays in the program's own units, before they are split into casts. */
 import type { Issue } from "../../base/index.ts";
+import type { ColumnRole } from "../reading.ts";
 import { type BadCell, CellReader } from "./cell-reader.ts";
-import { dateOrderOf, datePart, orderInName, parseClock, parseDateTime } from "./parse-time.ts";
-import type { RecognisedColumns } from "./recognise-columns.ts";
+import { statedFlags } from "./quality-flags.ts";
+import { type RecognisedColumns, VERTICAL_ROLES } from "./recognise-columns.ts";
+import { type RowTimes, readRowTimes } from "./row-times.ts";
 import type { Table } from "./table.ts";
+import { readVertical, type Vertical } from "./vertical.ts";
 
-export interface MeasuredRows {
+export interface MeasuredRows extends Omit<Vertical, "issues">, RowTimes {
   readonly n: number;
   readonly lineIndex: Int32Array;
-  readonly depthM: Float64Array | null;
-  readonly seaPressureDbar: Float64Array | null;
+  /** The file or the user says that the air is not in its pressure. */
+  readonly isGaugePressure: boolean;
   readonly inSituTempC: Float64Array;
   readonly practicalSalinity: Float64Array | null;
+  readonly absSalinityGKg: Float64Array | null;
   readonly conductivityMsCm: Float64Array | null;
   readonly specificConductanceMsCm: Float64Array | null;
+  readonly suspendedSedimentKgM3: Float64Array | null;
   readonly statedSigmaKgM3: Float64Array | null;
+  /** In the meaning of the QARTOD manuals. */
+  readonly statedFlag: Uint8Array | null;
   readonly latitudeDeg: Float64Array | null;
   readonly longitudeDeg: Float64Array | null;
   readonly distanceKm: Float64Array | null;
+  readonly waterDepthM: Float64Array | null;
   readonly station: readonly string[] | null;
   readonly castName: readonly string[] | null;
-  /** YYYY-MM-DD; empty where unreadable. */
-  readonly date: readonly string[] | null;
-  /** What tells days apart: the date, or the text as written where it cannot be read. */
-  readonly dateKey: readonly string[] | null;
-  /** HH:MM or HH:MM:SS; empty where unreadable. */
-  readonly clock: readonly string[] | null;
   /** By row. */
   readonly badCells: ReadonlyMap<number, readonly BadCell[]>;
   /** About the file as a whole. */
   readonly issues: readonly Issue[];
 }
 
-const ASSUMED_ORDER: Issue = {
-  severity: "warning",
-  code: "assumed-date-order",
-  message:
-    "no date in the file tells whether day or month stands first; month is assumed; dates such as 2020-03-04 would tell",
-};
+/** Longitudes are written from -180 to 180 or from 0 to 360; ours are the former. */
+const withinHalfTurn = (degrees: Float64Array | null): Float64Array | null =>
+  degrees?.some((value) => value > 180 && value <= 360)
+    ? degrees.map((value) => (value > 180 ? value - 360 : value))
+    : degrees;
 
-/** Long tables repeat their dates and times row after row. */
-function remembered<T>(parse: (text: string) => T): (text: string) => T {
-  const known = new Map<string, T>();
-  return (text) => {
-    const value = known.has(text) ? (known.get(text) as T) : parse(text);
-    known.set(text, value);
-    return value;
-  };
+/** Solids that were dissolved in a litre stand for grams in a kilogram where nothing better is in the file. */
+function dissolvedSolidsGKg(reader: CellReader, columns: RecognisedColumns): Float64Array | null {
+  const { practicalSalinity, conductivity, specificConductance } = columns.used;
+  if (practicalSalinity || conductivity || specificConductance) return null;
+  const solids = reader.numbers("dissolvedSolids");
+  if (solids === null) return null;
+  const message =
+    "salinity is taken from dissolved solids, 1000 mg/L as 1 g/kg; probes derive them from conductance, within 20 %; name the conductance if the file has it";
+  reader.issues.push({ severity: "warning", code: "salinity-from-dissolved-solids", message });
+  // One litre of water for one kilogram: within what the figure is good for.
+  return solids;
 }
 
-type Times = Pick<MeasuredRows, "date" | "dateKey" | "clock">;
+/** Columns whose flags count for a sample. */
+const FLAGGED_ROLES: readonly ColumnRole[] = [
+  ...VERTICAL_ROLES,
+  "temperature",
+  "practicalSalinity",
+  "absoluteSalinity",
+  "conductivity",
+  "specificConductance",
+];
 
-function readTimes(reader: CellReader): Times {
-  const dateTexts = reader.textsFilledDown("date");
-  const momentTexts = reader.texts("dateTime");
-  const clockTexts = reader.texts("clock");
-  const told = orderInName(`${reader.nameOf("date")} ${reader.nameOf("dateTime")}`);
-  const found = dateOrderOf([...(dateTexts ?? []), ...(momentTexts ?? []).map(datePart)]);
-  if (found.assumed && told === null) reader.issues.push(ASSUMED_ORDER);
-  const order = found.assumed ? (told ?? found.order) : found.order;
-  const momentOf = remembered((text) => parseDateTime(text, order));
-  const dateOf = (text: string) => momentOf(text)?.date ?? null;
-  const clockOf = (text: string) => momentOf(text)?.clock ?? "";
-  const ownDate = dateTexts && reader.times("date", dateTexts, dateOf);
-  const momentDate = momentTexts && reader.times("dateTime", momentTexts, dateOf);
-  const date = ownDate ?? momentDate;
-  return {
-    date,
-    dateKey: date?.map((day, i) => day || dateTexts?.[i] || "") ?? null,
-    clock:
-      (clockTexts && reader.times("clock", clockTexts, remembered(parseClock))) ?? momentTexts?.map(clockOf) ?? null,
-  };
+function flagsOf(table: Table, { flags, used }: RecognisedColumns): Uint8Array | null {
+  const targets = FLAGGED_ROLES.map((role) => used[role]?.columnIndex);
+  return statedFlags(
+    table,
+    flags.filter(({ targetIndex }) => targets.includes(targetIndex)),
+  );
+}
+
+/** Names of pressure that leave no doubt that the air is not in it. */
+const GAUGE = /sea|gauge|gage|psig|barg|ctd/i;
+
+function isGauge(table: Table, { used }: RecognisedColumns): boolean {
+  const column = used.seaPressure;
+  if (!column) return false;
+  const words = `${table.header.cells[column.columnIndex]} ${table.unitTexts[column.columnIndex]}`;
+  return column.isAnswered || GAUGE.test(words);
 }
 
 /** Needs a temperature column among the used ones; without it temperature is missing throughout. */
 export function readMeasuredRows(table: Table, columns: RecognisedColumns): MeasuredRows {
   const reader = new CellReader(table, columns);
   const { rows } = table;
-  return {
+  const isGaugePressure = isGauge(table, columns);
+  const { issues: verticalIssues, ...vertical } = readVertical(reader, isGaugePressure);
+  const measured = {
     n: rows.length,
     lineIndex: Int32Array.from(rows, (row) => row.lineIndex),
-    depthM: reader.numbers("depth"),
-    seaPressureDbar: reader.numbers("seaPressure"),
+    ...vertical,
+    isGaugePressure,
     inSituTempC: reader.numbers("temperature") ?? new Float64Array(rows.length).fill(Number.NaN),
     practicalSalinity: reader.numbers("practicalSalinity"),
+    absSalinityGKg: reader.numbers("absoluteSalinity") ?? dissolvedSolidsGKg(reader, columns),
     conductivityMsCm: reader.numbers("conductivity"),
     specificConductanceMsCm: reader.numbers("specificConductance"),
+    suspendedSedimentKgM3: reader.numbers("suspendedSediment"),
     statedSigmaKgM3: reader.numbers("densityAnomaly"),
+    statedFlag: flagsOf(table, columns),
     latitudeDeg: reader.numbers("latitude"),
-    longitudeDeg: reader.numbers("longitude"),
+    longitudeDeg: withinHalfTurn(reader.numbers("longitude")),
     distanceKm: reader.numbers("distance"),
+    waterDepthM: reader.numbers("waterDepth"),
     station: reader.textsFilledDown("station"),
     castName: reader.textsFilledDown("castName"),
-    ...readTimes(reader),
-    badCells: reader.badCells,
-    issues: reader.issues,
+    ...readRowTimes(reader),
   };
+  return { ...measured, badCells: reader.badCells, issues: [...reader.issues, ...verticalIssues] };
 }

@@ -7,7 +7,7 @@ export type SlashOrder = "month-first" | "day-first";
 
 export interface DateOrder {
   readonly order: SlashOrder;
-  /** No cell of the column has a figure above 12 that would tell. */
+  /** No cell of the column has a figure above 12 that would tell, and the two orders give different days. */
   readonly assumed: boolean;
 }
 
@@ -34,16 +34,16 @@ export function orderInName(text: string): SlashOrder | null {
 /** Day first or month first, for a whole column; points between the figures always mean day first. */
 export function dateOrderOf(texts: Iterable<string>): DateOrder {
   let order: SlashOrder | null = null;
-  let slashed = false;
+  let matters = false;
   for (const text of texts) {
     const match = SLASHED.exec(text);
     if (match === null) continue;
     if (match[2] === ".") return { order: "day-first", assumed: false };
-    slashed = true;
+    matters ||= match[1] !== match[3];
     if (Number(match[1]) > 12) order ??= "day-first";
     else if (Number(match[3]) > 12) order ??= "month-first";
   }
-  return { order: order ?? "month-first", assumed: slashed && order === null };
+  return { order: order ?? "month-first", assumed: matters && order === null };
 }
 
 /** A date as YYYY-MM-DD, or null when the text is none. */
@@ -92,11 +92,33 @@ export interface Moment {
 export function parseDateTime(text: string, order: SlashOrder): Moment | null {
   const whole = parseDate(text, order);
   if (whole !== null) return { date: whole, clock: null };
-  const match = /^(.+?)(?:T|\s+)(\d{1,2}:\d{2}.*?|\d{4})\s*(?:Z|UTC|GMT|[-+]\d{2}:?\d{2})?$/i.exec(text);
-  if (match === null) return null;
-  const date = parseDate(match[1]!.trim(), order);
-  const clock = parseClock(match[2]!.trim());
+  const parts = splitMoment(text);
+  if (parts === null) return null;
+  const date = parseDate(parts.date, order);
+  const clock = parseClock(parts.clock);
   return date === null || clock === null ? null : { date, clock };
+}
+
+/** Longer texts are no time; so much also bounds the work on them. */
+const LONGEST_TEXT = 60;
+const ZONE = /\s*(Z|UTC|GMT|[-+]\d{2}:?\d{2})$/i;
+
+function splitMoment(text: string): { readonly date: string; readonly clock: string } | null {
+  if (text.length > LONGEST_TEXT) return null;
+  const figures = /^(\d{8})(\d{6})$/.exec(text);
+  if (figures !== null) return { date: figures[1]!, clock: figures[2]!.replace(/(\d{2})(?=\d)/g, "$1:") };
+  const plain = text.replace(ZONE, "");
+  const match = /^(.+?)(?:T|\s+)(\d{1,2}:\d{2}.*|\d{4})$/i.exec(plain);
+  return match && { date: match[1]!.trim(), clock: match[2]!.trim() };
+}
+
+/** Seconds since midnight of a clock time, or of the clock time in a date-time, with their fraction; NaN where there is none. */
+export function secondsOfDay(text: string): number {
+  const clock = parseClock(text) ?? parseClock(splitMoment(text)?.clock ?? "");
+  if (clock === null) return Number.NaN;
+  const [hours, minutes, seconds] = clock.split(":").map(Number);
+  const fraction = /:\d{2}[.,](\d{1,9})/.exec(text);
+  return hours! * 3600 + minutes! * 60 + (seconds ?? 0) + (fraction ? Number(`0.${fraction[1]}`) : 0);
 }
 
 /** The part of a date-time text that is a date, for telling the order of its figures. */

@@ -50,22 +50,34 @@ const AT_25 = /(@|\bat\b|\bref\b|\b)\s*25\s*[°º]?\s*(deg)?\s*_?c\b/i;
 /** A column of seconds or days that have gone by is no clock. */
 const ELAPSED = /^[^:]*\b(s|secs?|seconds?|mins?|minutes?|h|hrs?|hours?|days?)\b[^:]*$/i;
 
+/** "Longitude (W)", "degrees_south": degrees, and which way they count. */
+const HEMISPHERE = /^(deg(rees?)?|[°º])?[\s_.]*([nsew]|north|south|east|west)$/i;
+
 /** The first of the texts that is a unit of the kind, else the first that is no mere remark. */
 export function writtenUnit(texts: readonly string[], kind: QuantityKind): WrittenUnit | null {
-  const stripped = texts.map((text) => text.replace(/(@|\bat\b).*$/i, "").trim());
+  const stripped = texts.map((text) => text.replace(/(@|\bat\b).*$|\babs(olute)?\b|\bgauge\b/gi, "").trim());
   for (const text of stripped) {
-    const unit = unitByName(text, kind);
+    const unit = kind === "angle" && HEMISPHERE.test(text) ? unitByName("deg") : unitByName(text, kind);
     if (unit !== null) return { text, unit };
   }
   const unknown = stripped.find((text) => !REMARK.test(text));
   return unknown === undefined ? null : { text: unknown, unit: null };
 }
 
+/** A unit can say more than its size: "psia" holds the air, "uS/cm @ 25 C" is compensated. */
+function roleByUnit(role: ColumnRole, header: string, unitTexts: readonly string[]): ColumnRole {
+  if (role === "conductivity" && AT_25.test(header)) return "specificConductance";
+  return role === "seaPressure" && unitTexts.some((text) => ABSOLUTE.test(text)) ? "absolutePressure" : role;
+}
+
+/** "psia", "dbar (absolute)", "kPa abs" */
+export const ABSOLUTE = /\babs(olute)?\b|^\s*(psi|bar|dbar|kpa)\s*\(?a\)?\s*$/i;
+
 function meaningOf(name: string, unitTexts: readonly string[], header: string): HeaderMeaning | null {
   const found = roleOfName(name);
   if (found === null) return null;
   if (found.role === "clock" && unitTexts.some((text) => ELAPSED.test(text.trim()))) return null;
-  const role = found.role === "conductivity" && AT_25.test(header) ? "specificConductance" : found.role;
+  const role = roleByUnit(found.role, header, unitTexts);
   const written = isMeasured(role) ? writtenUnit(unitTexts, MEASURED[role].kind) : null;
   return { role, rankIndex: found.rankIndex, written };
 }

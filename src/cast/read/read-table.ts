@@ -1,13 +1,13 @@
 /** A table, found in whatever kind of file, to casts. */
 import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
 import type { Cast } from "../cast.ts";
-import type { FileReading, ReadingAnswers } from "../reading.ts";
+import type { ColumnReading, FileReading, Question, ReadingAnswers } from "../reading.ts";
 import { buildCast, named } from "./build-cast.ts";
 import { checkColumns } from "./check-columns.ts";
-import { checkRows } from "./check-rows.ts";
+import { airInPressure, checkRows } from "./check-rows.ts";
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
-import { type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
+import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
 import { type RowGroup, splitCasts } from "./split-casts.ts";
 import type { Table, TableSource } from "./table.ts";
 
@@ -51,8 +51,8 @@ function tableIssues(table: Table): readonly Issue[] {
   return issues;
 }
 
-function saltIssues({ used }: RecognisedColumns): readonly Issue[] {
-  if (used.practicalSalinity || used.conductivity || used.specificConductance) return [];
+function saltIssues(columns: RecognisedColumns): readonly Issue[] {
+  if (hasSalt(columns)) return [];
   const message = "no salinity and no conductivity column is used; density will follow from temperature alone";
   return [{ severity: "note", code: "temperature-only", message }];
 }
@@ -77,22 +77,18 @@ function withTwoSamples(all: readonly Cast[]): Outcome<SortedCasts> {
   return succeeded({ casts, issues: [...leftOut, ...reasons] });
 }
 
+const asIssue = ({ code, message }: Question): Issue => warning(code, message);
+
 /** Reads a table into casts, from whatever format it comes. Nothing is guessed without an issue that says so. */
 export function readTable(
   source: TableSource,
   table: Table,
   answers: ReadingAnswers = NO_ANSWERS,
 ): Outcome<FileReading> {
-  const columns = recogniseColumns(table);
-  const errors = checkColumns(table, columns);
-  if (errors.length > 0) return failed(...errors);
-  const rows = readMeasuredRows(table, columns);
-  const rowIssues = checkRows(table, rows);
-  if (rowIssues.some((issue) => issue.severity === "error")) return failed(...rowIssues);
-  const { groups, splitBy } = splitCasts(rows);
-  const sorted = withTwoSamples(castsOf(rows, groups, source.fileName));
-  if (!sorted.ok) return sorted;
-  return succeeded({
+  const columns = recogniseColumns(table, answers);
+  const check = checkColumns(table, columns);
+  if (check.errors.length > 0) return failed(...check.errors);
+  const reading: FileReading = {
     ...source,
     delimiter: table.delimiter.name,
     decimalMark: columns.decimalMark,
@@ -100,17 +96,43 @@ export function readTable(
     headers: table.header.cells,
     firstRows: table.rows.slice(0, SHOWN_ROWS).map((row) => row.cells),
     columns: columns.readings,
-    questions: [],
-    splitBy,
+    questions: [...columns.questions, ...check.questions],
+    splitBy: "nothing yet",
     rowCount: table.rows.length,
-    casts: sorted.value.casts,
-    issues: [
-      ...tableIssues(table),
-      ...columns.issues,
-      ...saltIssues(columns),
-      ...rows.issues,
-      ...rowIssues,
-      ...sorted.value.issues,
-    ],
-  });
+    casts: [],
+    issues: [...tableIssues(table), ...columns.issues, ...check.questions.map(asIssue)],
+  };
+  return check.isWaiting ? succeeded(reading) : withCasts(reading, table, columns);
+}
+
+/** The rows of a table whose columns are known. */
+function withCasts(reading: FileReading, table: Table, columns: RecognisedColumns): Outcome<FileReading> {
+  const rows = readMeasuredRows(table, columns);
+  const rowIssues = checkRows(table, rows);
+  if (rowIssues.some((issue) => issue.severity === "error")) return failed(...rowIssues);
+  const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...rowIssues];
+  const asked = rows.depthM === null ? airInPressure(table, columns, rows) : null;
+  if (asked !== null) return succeeded(waitingFor(asked, { ...reading, issues: [...issues, asIssue(asked)] }));
+  const { groups, splitBy } = splitCasts(rows);
+  const sorted = withTwoSamples(castsOf(rows, groups, reading.fileName));
+  if (!sorted.ok) return sorted;
+  const { casts, issues: castIssues } = sorted.value;
+  return succeeded({ ...reading, splitBy, casts, issues: [...issues, ...castIssues] });
+}
+
+/** A column that its values have put in doubt. */
+function waitingFor(question: Question, reading: FileReading): FileReading {
+  const columns = reading.columns.map(
+    (column): ColumnReading =>
+      column.columnIndex === question.columnIndex
+        ? {
+            ...column,
+            role: null,
+            unit: null,
+            confidence: "doubtful",
+            reason: "Not used: gauge or absolute is not told.",
+          }
+        : column,
+  );
+  return { ...reading, columns, questions: [...reading.questions, question] };
 }

@@ -1,33 +1,29 @@
-/** Which column is what, in which unit, and why: at most one column for each role. */
+/** Which column is what, in which unit, and why: at most one column for each role, but for flags about other columns. */
 import type { Issue } from "../../base/index.ts";
-import type { UnitSymbol } from "../../units/index.ts";
-import type { ColumnReading, ColumnRole } from "../reading.ts";
+import type { ColumnReading, ColumnRole, Question, ReadingAnswers } from "../reading.ts";
+import { answerName, resolveAnswers } from "./answers.ts";
+import { choose } from "./ask.ts";
 import { COLUMN_NAMES } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
-import { type Decision, decide, passOver, whyUnused } from "./decide-column.ts";
-import { decimalMarkOf } from "./decimal-mark.ts";
+import { ASSUMED_COMMA, decide, passOver } from "./decide-column.ts";
+import { type Decision, doubt, leave, type UsedColumn } from "./decision.ts";
+import { tableMark } from "./number-style.ts";
 import type { DecimalMark } from "./parse-number.ts";
-import { isMeasured } from "./roles.ts";
+import { type FlagColumn, flagColumnOf } from "./quality-flags.ts";
 import type { Table } from "./table.ts";
+import { whyUnused } from "./why-unused.ts";
 
-interface UsedColumn {
-  readonly columnIndex: number;
-  /** null for text and times. */
-  readonly unit: UnitSymbol | null;
-}
+export type { UsedColumn } from "./decision.ts";
 
 export interface RecognisedColumns {
   readonly used: Readonly<Partial<Record<ColumnRole, UsedColumn>>>;
+  /** Columns of flags about other columns. */
+  readonly flags: readonly FlagColumn[];
   readonly readings: readonly ColumnReading[];
   readonly decimalMark: DecimalMark;
+  readonly questions: readonly Question[];
   readonly issues: readonly Issue[];
 }
-
-const ASSUMED_COMMA: Issue = {
-  severity: "warning",
-  code: "assumed-decimal-comma",
-  message: "every comma stands before three digits; it is read as the decimal mark; if it parts thousands, take it out",
-};
 
 /** Better first: one with values, the better name, a stated unit, the place in the file. */
 const byMerit = (a: Contender, b: Contender): number =>
@@ -45,28 +41,101 @@ function winnersOf(contenders: readonly Contender[]): ReadonlyMap<ColumnRole, Co
   return winners;
 }
 
-/** Reads every header of a table. A unit that must be asked for leaves its column unused, with an issue. */
-export function recogniseColumns(table: Table): RecognisedColumns {
-  const all = table.header.cells.map((_, columnIndex) => contenderOf(table, columnIndex));
-  const contenders = all.filter((contender) => contender !== null);
-  const measured = contenders.filter((contender) => isMeasured(contender.role));
-  const cells = measured.flatMap((contender) => contender.filled);
-  const { mark: decimalMark, assumed } = decimalMarkOf(cells, table.delimiter.character);
-  const winners = winnersOf(contenders);
-  const decisions = all.map((contender, columnIndex): Decision => {
-    if (contender === null) return whyUnused(columnIndex, table.header.cells[columnIndex]!);
-    const winner = winners.get(contender.role)!;
-    return winner === contender ? decide(contender, decimalMark) : passOver(contender, winner);
+export const VERTICAL_ROLES: readonly ColumnRole[] = ["depth", "seaPressure", "absolutePressure", "elevation"];
+/** Best first: each of them makes those behind it unneeded. */
+const SALT_ROLES: readonly ColumnRole[] = [
+  "practicalSalinity",
+  "absoluteSalinity",
+  "conductivity",
+  "specificConductance",
+  "dissolvedSolids",
+];
+const CONDUCTING_ROLES: readonly ColumnRole[] = ["conductivity", "specificConductance", "dissolvedSolids"];
+
+const usesAny = (decisions: readonly Decision[], roles: readonly ColumnRole[]): boolean =>
+  decisions.some(({ reading }) => reading.role !== null && roles.includes(reading.role));
+
+export const hasSalt = ({ used }: Pick<RecognisedColumns, "used">): boolean =>
+  SALT_ROLES.some((role) => used[role] !== undefined);
+
+/** A question is only asked when the answer changes a result: not about a second depth, or conductance beside salinity. */
+function isWorthAsking(question: Question, decisions: readonly Decision[]): boolean {
+  const roles = question.choices.map(({ answer }) => answer.role).filter((role) => role !== "unused");
+  const areAll = (of: readonly ColumnRole[]): boolean => roles.every((role) => of.includes(role));
+  if (areAll(VERTICAL_ROLES)) return !usesAny(decisions, VERTICAL_ROLES);
+  return !areAll(CONDUCTING_ROLES) || !usesAny(decisions, SALT_ROLES);
+}
+
+/** Heights above a datum are depths only against the height of the water surface. */
+function settleElevation(decision: Decision, decisions: readonly Decision[], headers: readonly string[]): Decision {
+  const { reading } = decision;
+  if (reading.role !== "elevation" || decision.used?.isAnswered || usesAny(decisions, ["surfaceElevation"]))
+    return decision;
+  if (usesAny(decisions, ["depth", "seaPressure", "absolutePressure"])) return decision;
+  const name = answerName(headers, reading.columnIndex);
+  const why = "the file does not give the elevation of the water surface, from which depth counts";
+  const message = `"${reading.header}": ${why}; say that the highest sample of a cast is at the surface, or add a column of water-surface elevation`;
+  return doubt(reading, why, {
+    code: "no-surface-elevation",
+    message,
+    choices: [
+      choose(name, "elevation", decision.used!.unit, "the highest sample of each cast is at the water surface"),
+    ],
   });
+}
+
+/** Year, month and day make a date together or not at all. */
+function settleDateParts(decision: Decision, decisions: readonly Decision[]): Decision {
+  const role = decision.reading.role;
+  const parts: readonly ColumnRole[] = ["year", "month", "day"];
+  const isPart = role !== null && parts.includes(role);
+  if (!isPart || parts.every((part) => usesAny(decisions, [part]))) return decision;
+  return leave(decision.reading, "year, month and day make a date only together");
+}
+
+function settled(decisions: readonly Decision[], headers: readonly string[]): readonly Decision[] {
+  return decisions.map((decision) => settleDateParts(settleElevation(decision, decisions, headers), decisions));
+}
+
+/** One note of each kind is enough where it is about the way a whole table is written. */
+function once(issues: readonly Issue[]): readonly Issue[] {
+  return issues.filter((issue, i) => issue !== ASSUMED_COMMA || issues.indexOf(issue) === i);
+}
+
+/** Reads every header of a table. What must be asked leaves its column unused, with an issue and a question. */
+export function recogniseColumns(table: Table, answers: ReadingAnswers): RecognisedColumns {
+  const headers = table.header.cells;
+  const said = resolveAnswers(headers, answers);
+  const all = headers.map((_, i) => contenderOf(table, i, said.byColumn.get(i) ?? null));
+  const contenders = all.filter((contender) => contender !== null);
+  const markOfTable = tableMark(contenders.flatMap((contender) => contender.evidence ?? []));
+  const winners = winnersOf(contenders);
+  const flags: FlagColumn[] = [];
+  const first = all.map((contender, columnIndex): Decision => {
+    const place = { columnIndex, header: headers[columnIndex]! };
+    if (said.byColumn.get(columnIndex)?.role === "unused") return leave(place, "as you said");
+    const flag = flagColumnOf(table, columnIndex, contender);
+    if (flag !== null) {
+      if (flag.column) flags.push(flag.column);
+      return flag.decision;
+    }
+    if (contender === null) return whyUnused(place, answerName(headers, columnIndex));
+    const winner = winners.get(contender.role)!;
+    return winner === contender ? decide(contender, markOfTable) : passOver(contender, winner);
+  });
+  const decisions = settled(first, headers);
   const used: Partial<Record<ColumnRole, UsedColumn>> = {};
-  for (const { reading } of decisions) {
-    if (reading.role !== null)
-      used[reading.role] = { columnIndex: reading.columnIndex, unit: reading.unit as UnitSymbol };
+  for (const [i, decision] of decisions.entries()) {
+    const role = decision.reading.role ?? all[i]?.role;
+    if (decision.used !== null && role !== undefined && role !== "qualityFlag") used[role] = decision.used;
   }
+  const questions = decisions.flatMap(({ question }) => question ?? []);
   return {
     used,
+    flags,
     readings: decisions.map((decision) => decision.reading),
-    decimalMark,
-    issues: [...(assumed ? [ASSUMED_COMMA] : []), ...decisions.flatMap((decision) => decision.issues)],
+    decimalMark: used.depth?.style.decimalMark ?? used.temperature?.style.decimalMark ?? markOfTable ?? ".",
+    questions: questions.filter((question) => isWorthAsking(question, decisions)),
+    issues: [...said.issues, ...once(decisions.flatMap((decision) => decision.issues))],
   };
 }

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { expectConverted } from "./converted.ts";
-import { codesOf, errorsOf, issueOf, onlyCast, readText, rolesOf } from "./reading.ts";
+import { issueOf, onlyCast, questionOf, readText, rolesOf, unitsIn } from "./reading.ts";
 
 /** Rows below the given headers; unless they are given, two of 1 in every column but for the first, which goes on to 2. */
 const table = (headers: readonly string[], ...rows: readonly (readonly (string | number)[])[]): string =>
@@ -69,7 +69,6 @@ describe("names and units in headers", () => {
     "Discrete Oxygen (mg/L)",
     "do_raw",
     "DO_temp",
-    "flag_wtemp",
     "Air temperature (C)",
     "Potential temperature (C)",
     "Secchi depth (m)",
@@ -151,15 +150,22 @@ describe("units that the file does not give", () => {
     expect(issue.message).toContain("values lie in 1.6 to 29.6");
   });
 
-  test("temperature around 40 is taken in degC with a warning", () => {
-    expect(issueOf(readText(withTemps(38, 40, 42)).issues, "assumed-unit-temperature").severity).toBe("warning");
+  test.each([
+    [[38, 40, 42], "degC", ["degC", "degF"]],
+    [[58, 61, 66], "degF", ["degF", "degC", "K"]],
+  ])("temperature of %j is asked about, and nothing is computed until it is answered", (temps, likeliest, units) => {
+    const reading = readText(withTemps(...temps));
+    const question = questionOf(reading, "no-unit-temperature");
+    expect(question.message).toContain(`as in "temp (${likeliest})"`);
+    expect(unitsIn(question)).toEqual(units);
+    expect(reading.columns[1]).toMatchObject({ role: null, confidence: "doubtful" });
+    expect(reading.casts).toEqual([]);
   });
 
-  test("temperature that is no water in degC is asked about", () => {
-    const errors = errorsOf(withTemps(58, 61, 66));
-    expect(codesOf(errors)).toEqual(["no-unit-temperature"]);
-    expect(errors[0]!.severity).toBe("error");
-    expect(errors[0]!.message).toContain('as in "temp (degF)"');
+  test("temperature between 270 and 318 is in kelvin, with a warning", () => {
+    const reading = readText(withTemps(285.15, 283.15));
+    expectConverted(onlyCast(reading).samples.inSituTempC[0], 12);
+    expect(issueOf(reading.issues, "assumed-unit-temperature").severity).toBe("warning");
   });
 
   test("depth is taken in metres with a warning that says so", () => {
@@ -179,39 +185,48 @@ describe("units that the file does not give", () => {
     expect(issueOf(reading.issues, "assumed-unit-conductivity").severity).toBe("warning");
   });
 
-  test.each([0.05, 0.9, 2.5, 15, 80])("conductivity around %d could be several units: an error asks", (value) => {
-    const errors = errorsOf(withCond(value, value, value));
-    expect(codesOf(errors)).toEqual(["no-unit-conductivity"]);
-    expect(errors[0]!.severity).toBe("error");
+  test.each([0.05, 0.9, 2.5, 15, 80])("conductivity around %d could be several units: a question", (value) => {
+    const reading = readText(withCond(value, value, value));
+    expect(unitsIn(questionOf(reading, "no-unit-conductivity"))).toEqual(["uS/cm", "mS/cm", "S/m"]);
+    expect(onlyCast(reading).samples.conductivityMsCm).toBeNull();
   });
 
-  test.each([45, 4.4])("specific conductance around %d could be a soft lake's as well: an error asks", (value) => {
+  test.each([45, 4.4])("specific conductance around %d could be a soft lake's as well: a question", (value) => {
     const text = table(["Depth (m)", "Temp (C)", "SpCond"], [1, 10, value], [2, 10, value]);
-    expect(codesOf(errorsOf(text))).toEqual(["no-unit-specific-conductance"]);
+    questionOf(readText(text), "no-unit-specific-conductance");
   });
 
   test("a brackish column in mS/cm is not taken for sea water in S/m because of its median", () => {
-    expect(codesOf(errorsOf(withCond(1, 4, 38)))).toEqual(["no-unit-conductivity"]);
+    questionOf(readText(withCond(1, 4, 38)), "no-unit-conductivity");
   });
 
-  test("beside a salinity column the same conductivity is left unused with a warning", () => {
+  test("beside a salinity column the same conductivity is left unused with a warning and no question", () => {
     const reading = readText(table(["Depth (m)", "Temp (C)", "Sal", "Cond"], [1, 10, 1, 2], [2, 10, 1, 2]));
     expect(rolesOf(reading).conductivity).toBeUndefined();
     expect(issueOf(reading.issues, "no-unit-conductivity").severity).toBe("warning");
+    expect(reading.questions).toEqual([]);
   });
 
   test.each([
-    ["Depth (cubits)", "cubits"],
-    ["Depth (dbar)", "dbar"],
-  ])("a unit that is no length is not overruled: %s", (header, text) => {
-    const errors = errorsOf(table([header, "Temp (C)", "Sal"]));
-    expect(codesOf(errors)).toEqual(["no-unit-depth"]);
-    expect(errors[0]!.message).toContain(`"${text}" is no unit of depth known here`);
+    ["Depth (cubits)", "cubits", "depth in m"],
+    ["Depth (dbar)", "dbar", "sea pressure in dbar"],
+    ["Depth (psi)", "psi", "sea pressure in psi"],
+  ])("a unit that is no length is not overruled: %s", (header, text, likeliest) => {
+    const reading = readText(table([header, "Temp (C)", "Sal"]));
+    const question = questionOf(reading, "no-unit-depth");
+    expect(question.message).toContain(`"${text}" is no unit of depth known here`);
+    expect(question.choices[0]!.label).toBe(likeliest);
+    expect(reading.casts).toEqual([]);
+  });
+
+  test("pressure in metres may be depth, or the height of a column of water", () => {
+    const question = questionOf(readText(table(["Pressure (m)", "Temp (C)", "Sal"])), "no-unit-sea-pressure");
+    expect(question.choices.slice(0, 2).map((choice) => choice.label)).toEqual(["depth in m", "sea pressure in mH2O"]);
   });
 
   test("a column that holds texts alone is not used, with a warning", () => {
-    const reading = readText(table(["Depth (m)", "Temp (C)", "Lat"], [1, 9, "38 02.5 N"], [2, 9, "38 02.5 N"]));
-    expect(issueOf(reading.issues, "no-numbers").message).toContain('"38 02.5 N"');
+    const reading = readText(table(["Depth (m)", "Temp (C)", "Lat"], [1, 9, "up north"], [2, 9, "up north"]));
+    expect(issueOf(reading.issues, "no-numbers").message).toContain('"up north"');
   });
 
   test("a remark in brackets is no unit", () => {
@@ -221,13 +236,21 @@ describe("units that the file does not give", () => {
     });
   });
 
-  test("salinity in g/kg is used with a warning", () => {
+  test("salinity in g/kg may be absolute or practical: a question", () => {
     const reading = readText(table(["Depth (m)", "Temp (C)", "Salinity (g/kg)"]));
-    expect(codesOf(reading.issues)).toEqual(["salinity-in-g-kg"]);
+    const question = questionOf(reading, "practical-or-absolute");
+    expect(question.choices.map(({ answer }) => answer.role)).toEqual([
+      "absoluteSalinity",
+      "practicalSalinity",
+      "unused",
+    ]);
+    expect(onlyCast(reading).samples).toMatchObject({ practicalSalinity: null, absSalinityGKg: null });
   });
 
-  test("pressure that starts at one atmosphere is suspected to be absolute", () => {
+  test("pressure that starts at one atmosphere is suspected to be absolute, and no cast is made of it", () => {
     const reading = readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], [10.2, 9, 30], [15, 9, 30]));
+    expect(reading.casts).toEqual([]);
+    expect(questionOf(reading, "pressure-may-be-absolute").choices.length).toBe(3);
     expect(issueOf(reading.issues, "pressure-may-be-absolute").message).toContain("10.20 dbar");
   });
 });

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { expectConverted } from "./converted.ts";
-import { onlyCast, readBytes, readText } from "./reading.ts";
+import { issueOf, onlyCast, questionOf, readBytes, readText } from "./reading.ts";
 
 const LINES = ["Depth (m),Temperature (°C),Salinity", "0.5,12.25,3.5", "1,12,4", "1.5,11.75,20.5"];
 const CSV = LINES.join("\n");
@@ -101,12 +101,33 @@ describe("delimiters and decimal marks", () => {
     expectTheCast(readText("Depth, m;Temp, C;Sal\n0,5;12,25;3,5\n1;12;4\n1,5;11,75;20,5"));
   });
 
-  test("a quoted comma before three digits between commas is named, never read as a decimal", () => {
-    const { samples, issues } = onlyCast(readText('Depth (m),Temp (C),SpCond (uS/cm)\n1,12,"1,234"\n2,12,"1,240"\n'));
-    expect([...samples.specificConductanceMsCm!]).toEqual([Number.NaN, Number.NaN]);
-    expect(issues[0]!.message).toBe(
-      'line 2: specific conductance "1,234" is not a number; expected a number or a blank',
-    );
+  test("a quoted comma before three digits between commas parts thousands where no water is so pure", () => {
+    const reading = readText('Depth (m),Temp (C),SpCond (uS/cm)\n1,12,"1,234"\n2,12,"1,240"\n');
+    expect([...onlyCast(reading).samples.specificConductanceMsCm!]).toEqual([1.234, 1.24]);
+    expect(issueOf(reading.issues, "assumed-thousands").message).toContain("read as parting thousands");
+  });
+
+  test("where both can be water, the user is asked", () => {
+    const reading = readText('Depth (m),Temp (C),Sal\n"1,234",12,3\n"1,240",12,3\n');
+    expect(questionOf(reading, "decimal-or-thousands").choices.map((choice) => choice.label)).toEqual([
+      "1,234 is 1.234",
+      "1,234 is 1234",
+      "not used",
+    ]);
+    expect(reading.casts).toEqual([]);
+  });
+
+  test.each([
+    ["1,234.5", "1,300.5", ",", 1234.5],
+    ["1.234,5", "1.300,5", ";", 1234.5],
+    ["1 234.5", "1 300.5", ";", 1234.5],
+    ["1'234.5", "1'300.5", ",", 1234.5],
+    ["1,234,567.5", "1,234,568.5", ",", 1234567.5],
+  ])("thousands parted as in %s", (first, second, delimiter, value) => {
+    const rows = [first, second].map((depth) => [`"${depth}"`, "12", "3"].join(delimiter));
+    const reading = readText([["Depth (m)", "Temp (C)", "Sal"].join(delimiter), ...rows].join("\n"));
+    expect(onlyCast(reading).samples.depthM![0]).toBe(value);
+    expect(reading.questions).toEqual([]);
   });
 
   test("nothing but commas before three digits between semicolons is a decimal comma, with a warning", () => {

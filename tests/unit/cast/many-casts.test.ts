@@ -42,7 +42,7 @@ describe("what tells casts apart", () => {
   });
 
   test("dates that cannot be read still tell days apart, and are named", () => {
-    const text = `Date,Depth (m),Temp (C),Sal\n${lowering("43843,")}\n${lowering("43844,")}`;
+    const text = `Date,Depth (m),Temp (C),Sal\n${lowering("day one,")}\n${lowering("day two,")}`;
     const { casts } = readText(text);
     expect(casts.map((cast) => [cast.name, cast.time])).toEqual([
       ["cast (1)", null],

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { dateOrderOf, parseClock, parseDate, parseDateTime } from "../../../src/cast/read/parse-time.ts";
-import { issueOf, readText } from "./reading.ts";
+import { questionOf, readText } from "./reading.ts";
 
 describe("dates", () => {
   test.each([
@@ -35,12 +35,16 @@ describe("dates", () => {
     expect(dateOrderOf([]).assumed).toBe(false);
   });
 
-  test("in a file the order that nothing tells is assumed with a warning", () => {
+  test("in a file the order that nothing tells is asked about; the days still tell casts apart", () => {
     const rows = (date: string) => `${date},1,10,30\n${date},2,10,30\n`;
     const HEADER = "Date,Depth (m),Temp (C),Sal\n";
     const untold = readText(HEADER + rows("2/8/17"));
-    expect(issueOf(untold.issues, "assumed-date-order").severity).toBe("warning");
-    expect(untold.casts[0]!.time).toBe("2017-02-08");
+    expect(questionOf(untold, "date-order").choices.map((choice) => choice.label)).toEqual([
+      "month first: 2/8/17 is 2017-02-08",
+      "day first: 2/8/17 is 2017-08-02",
+      "not used",
+    ]);
+    expect(readText(HEADER + rows("2/8/17") + rows("3/8/17")).casts.map((cast) => cast.time)).toEqual([null, null]);
     const told = readText(HEADER + rows("2/8/17") + rows("21/3/17"));
     expect(told.issues).toEqual([]);
     expect(told.casts.map((cast) => cast.time)).toEqual(["2017-08-02", "2017-03-21"]);

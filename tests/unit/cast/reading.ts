@@ -1,13 +1,20 @@
 import { readFileSync } from "node:fs";
 import type { Issue } from "../../../src/base/index.ts";
-import { type Cast, type ColumnRole, type FileReading, readCastFile } from "../../../src/cast/index.ts";
+import {
+  type Cast,
+  type ColumnRole,
+  type FileReading,
+  type Question,
+  type ReadingAnswers,
+  readCastFile,
+} from "../../../src/cast/index.ts";
 
 const pathOf = (folder: string, fileName: string): URL => new URL(`../../../${folder}/${fileName}`, import.meta.url);
 
 export const bytesOfFile = (folder: string, fileName: string): Uint8Array => readFileSync(pathOf(folder, fileName));
 
-const expectRead = (fileName: string, bytes: Uint8Array): FileReading => {
-  const outcome = readCastFile(fileName, bytes);
+const expectRead = (fileName: string, bytes: Uint8Array, answers?: ReadingAnswers): FileReading => {
+  const outcome = readCastFile(fileName, bytes, answers);
   if (!outcome.ok) throw new Error(outcome.issues.map((issue) => issue.message).join("\n"));
   return outcome.value;
 };
@@ -19,7 +26,8 @@ export const readSample = (fileName: string): FileReading => expectRead(fileName
 
 const encoded = (text: string): Uint8Array => new TextEncoder().encode(text);
 
-export const readText = (text: string): FileReading => expectRead("cast.csv", encoded(text));
+export const readText = (text: string, answers?: ReadingAnswers): FileReading =>
+  expectRead("cast.csv", encoded(text), answers);
 
 export const readBytes = (bytes: Uint8Array): FileReading => expectRead("cast.csv", bytes);
 
@@ -46,3 +54,14 @@ export const issueOf = (issues: readonly Issue[], code: string): Issue => {
   if (!found) throw new Error(`no issue ${code} among ${codesOf(issues).join(", ")}`);
   return found;
 };
+
+export const questionOf = (reading: FileReading, code: string): Question => {
+  const found = reading.questions.find((question) => question.code === code);
+  if (!found)
+    throw new Error(`no question ${code} among ${reading.questions.map((question) => question.code).join(", ")}`);
+  return found;
+};
+
+/** The units that a question offers. */
+export const unitsIn = (question: Question): readonly string[] =>
+  question.choices.flatMap(({ answer }) => answer.unit ?? []);

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { codesOf, errorsOf } from "./reading.ts";
+import { codesOf, errorsOf, questionOf, readText } from "./reading.ts";
 
 const messageOf = (content: string | Uint8Array, code: string): string => {
   const errors = errorsOf(content);
@@ -43,18 +43,21 @@ describe("one clear line for each", () => {
     expect(messageOf(text, "no-table")).toContain("expected a row of headers");
   });
 
-  test("no depth: the headers found and what is expected", () => {
-    const message = messageOf("Level,Temp (C),Sal\n1,10,30\n2,10,30\n", "no-depth-column");
-    expect(message).toContain('among "Level", "Temp (C)", "Sal"');
-    expect(message).toContain('"Depth (m)"');
+  test("no depth: the headers found and what is expected, and which column of numbers could be meant", () => {
+    const question = questionOf(readText("Level,Temp (C),Sal\n1,10,30\n2,10,30\n"), "no-depth-column");
+    expect(question.message).toContain('among "Level", "Temp (C)", "Sal"');
+    expect(question.message).toContain('"Depth (m)"');
+    expect(question.choices[0]!.label).toBe('"Level" is depth in m');
   });
 
   test("no temperature", () => {
     expect(messageOf("Depth (m),Sal\n1,30\n2,30\n", "no-temperature-column")).toContain('"Temperature (degC)"');
   });
 
-  test("no known name at all gives both errors", () => {
-    expect(codesOf(errorsOf("a,b,c\n1,10,30\n2,10,30\n"))).toEqual(["no-depth-column", "no-temperature-column"]);
+  test("no known name at all gives both questions, and no cast", () => {
+    const reading = readText("a,b,c\n1,10,30\n2,10,30\n");
+    expect(reading.questions.map((question) => question.code)).toEqual(["no-depth-column", "no-temperature-column"]);
+    expect(reading.casts).toEqual([]);
   });
 
   test("headers and nothing below", () => {

@@ -1,0 +1,103 @@
+/** What the user has said about columns, taken to the columns of one table. */
+import type { Issue } from "../../base/index.ts";
+import { type UnitSymbol, unitByName } from "../../units/index.ts";
+import type { ColumnAnswer, ColumnRole, ReadingAnswers } from "../reading.ts";
+import { dayCountByName } from "./day-count.ts";
+import type { NumberStyle } from "./parse-number.ts";
+import { isMeasured, MEASURED, ROLE_WORDS } from "./roles.ts";
+import type { TimeForm } from "./time-form.ts";
+
+/** How the cells of a column are to be read, as far as the user has said it. */
+export interface AnsweredForm {
+  readonly unit: UnitSymbol | null;
+  readonly style: NumberStyle | null;
+  /** Counted upwards from the water surface, so that below it the figures are negative. */
+  readonly isNegated: boolean;
+  readonly time: TimeForm | null;
+}
+
+export interface ResolvedAnswer extends AnsweredForm {
+  readonly role: ColumnRole | "unused";
+  /** As the user wrote it. */
+  readonly unitText: string | null;
+}
+
+const STYLES: Readonly<Record<string, NumberStyle>> = {
+  "decimal-comma": { decimalMark: ",", groupMark: "." },
+  "decimal-point": { decimalMark: ".", groupMark: "," },
+};
+
+const UPWARD = "upward";
+
+const NO_FORM: AnsweredForm = { unit: null, style: null, isNegated: false, time: null };
+
+function timeForm(text: string): TimeForm | null {
+  if (text === "day-first" || text === "month-first") return { order: text, count: null };
+  const count = dayCountByName(text);
+  return count && { order: null, count };
+}
+
+/** What a unit text says for a role: "ft", "mS/cm decimal-comma", "m upward", "day-first"; null when it says nothing known. */
+export function formByText(role: ColumnRole, text: string): AnsweredForm | null {
+  if (role === "date" || role === "dateTime") {
+    const time = timeForm(text.trim());
+    return time && { ...NO_FORM, time };
+  }
+  if (!isMeasured(role)) return null;
+  const words = text.trim().split(/\s+/);
+  const style = words.map((word) => STYLES[word]).find((found) => found !== undefined) ?? null;
+  const isNegated = role === "depth" && words.includes(UPWARD);
+  const unitText = words.filter((word) => STYLES[word] === undefined && !(isNegated && word === UPWARD)).join(" ");
+  if (unitText === "") return { ...NO_FORM, style, isNegated };
+  const unit = unitByName(unitText, MEASURED[role].kind);
+  return unit && { ...NO_FORM, unit: unit.symbol, style, isNegated };
+}
+
+/** How an answer names a column: its header where no other column has the same, "Temp#2" where one has, "#3" where it has none. */
+export function answerName(headers: readonly string[], columnIndex: number): string {
+  const header = headers[columnIndex] ?? "";
+  if (header === "") return `#${columnIndex + 1}`;
+  const before = headers.slice(0, columnIndex).filter((other) => other === header).length;
+  const isRepeated = headers.filter((other) => other === header).length > 1;
+  return isRepeated ? `${header}#${before + 1}` : header;
+}
+
+/** The column that a name means, or -1. */
+function columnOf(headers: readonly string[], name: string): number {
+  const wanted = name.trim();
+  const names = headers.map((_, i) => answerName(headers, i));
+  const exact = [names.indexOf(wanted), headers.indexOf(wanted)].find((i) => i >= 0);
+  if (exact !== undefined) return exact;
+  const position = /^#(\d+)$/.exec(wanted);
+  if (position !== null) return Number(position[1]) <= headers.length ? Number(position[1]) - 1 : -1;
+  return names.findIndex((other) => other.toLowerCase() === wanted.toLowerCase());
+}
+
+export interface ResolvedAnswers {
+  readonly byColumn: ReadonlyMap<number, ResolvedAnswer>;
+  readonly issues: readonly Issue[];
+}
+
+const refused = (message: string): Issue => ({ severity: "warning", code: "answer-not-used", message });
+
+function resolve({ role, unit }: ColumnAnswer): ResolvedAnswer | string {
+  if (role === "unused" || unit === null) return { ...NO_FORM, role, unitText: unit };
+  const form = formByText(role, unit);
+  return form ? { ...form, role, unitText: unit } : `"${unit}" is no unit of ${ROLE_WORDS[role]} known here`;
+}
+
+/** Where two answers name one column, the later one stands. */
+export function resolveAnswers(headers: readonly string[], answers: ReadingAnswers): ResolvedAnswers {
+  const byColumn = new Map<number, ResolvedAnswer>();
+  const issues: Issue[] = [];
+  for (const answer of answers.columns) {
+    const columnIndex = columnOf(headers, answer.header);
+    const resolved = resolve(answer);
+    if (columnIndex < 0)
+      issues.push(refused(`no column is named "${answer.header}"; what was said about it is not used`));
+    else if (typeof resolved === "string")
+      issues.push(refused(`"${answer.header}": ${resolved}; what was said is not used`));
+    else byColumn.set(columnIndex, resolved);
+  }
+  return { byColumn, issues };
+}

@@ -1,0 +1,36 @@
+/** Why a column is not used whose name has no role. */
+import type { ColumnReading } from "../reading.ts";
+import { choose } from "./ask.ts";
+import { type Decision, doubt, leave } from "./decision.ts";
+
+const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
+  [/^$/, "it has no name"],
+  [/discrete|bottle/i, "single water samples, not the probe"],
+  [/baro|(air|atmos\w*)[\W_]*press/i, "pressure of the air"],
+  [/potential|conservative|theta/i, "temperature in situ is needed"],
+  [/secchi/i, "a depth of the place, not of the sample"],
+];
+
+const EC = /^e\.?c\.?([\W_]|$)/i;
+
+/** EC is written for conductivity as measured and for what an instrument has compensated to 25 degC. */
+function compensatedOrNot(place: Pick<ColumnReading, "columnIndex" | "header">, name: string): Decision {
+  const unit = /u|µ|μ/i.test(place.header) ? "uS/cm" : /ms/i.test(place.header) ? "mS/cm" : null;
+  const message = `"${place.header}" does not say whether it is compensated to 25 degC; name it conductivity or specific conductance`;
+  return doubt(
+    place,
+    "EC does not say whether it is compensated to 25 degC; name it conductivity or specific conductance",
+    {
+      code: "compensated-or-not",
+      message,
+      choices: [choose(name, "specificConductance", unit), choose(name, "conductivity", unit)],
+    },
+  );
+}
+
+/** @param name how an answer names the column */
+export function whyUnused(place: Pick<ColumnReading, "columnIndex" | "header">, name: string): Decision {
+  const known = UNUSED_NAMES.find(([pattern]) => pattern.test(place.header));
+  if (known) return leave(place, known[1]);
+  return EC.test(place.header) ? compensatedOrNot(place, name) : leave(place, "its name is none known here", "likely");
+}
