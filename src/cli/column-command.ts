@@ -9,13 +9,14 @@ import {
   surveyJson,
   tableMetadata,
 } from "../export/index.ts";
-import { addCasts, emptySurvey, type SolvedCast, type Survey, solve } from "../survey/index.ts";
+import { type SolvedCast, type Survey, solve } from "../survey/index.ts";
 import { columnOptions } from "./column-options.ts";
 import { columnText } from "./column-text.ts";
 import { castFileNames } from "./file-names.ts";
+import { gatherSurvey } from "./gather-survey.ts";
 import { EXIT, type ExitCode, type Host } from "./host.ts";
-import { castIssueLines, issueLine } from "./issue-lines.ts";
-import { readCastFiles } from "./read-files.ts";
+import { castIssueLines } from "./issue-lines.ts";
+import type { ReadFile } from "./read-files.ts";
 import { COLUMN_USAGE } from "./usage.ts";
 
 /** `layerhead column`: reads every file, integrates every cast, writes what was asked for. */
@@ -25,12 +26,7 @@ export async function columnCommand(host: Host, args: readonly string[]): Promis
     host.out(COLUMN_USAGE);
     return EXIT.done;
   }
-  const files = await readCastFiles(host, options.files);
-  let survey: Survey = { ...emptySurvey, basis: options.basis, levels: options.levels };
-  for (const { path, reading } of files) {
-    for (const issue of reading.issues) host.err(issueLine(path, issue));
-    if (reading.ok) survey = addCasts(survey, reading.value.casts);
-  }
+  const { survey, files, allRead } = await gatherSurvey(host, options.files, options.reading, options);
   const solved = solve(survey);
   for (const path of new Set(options.files)) {
     const own = solved.filter(({ cast }) => cast.fileName === path);
@@ -46,11 +42,10 @@ export async function columnCommand(host: Host, args: readonly string[]): Promis
   if (options.out !== null) await writeTables(host, options.out, survey, solved, sourcesOf(files));
   if (!options.json && options.out === null) host.out(solved.map((cast) => columnText(survey, cast)).join("\n"));
 
-  const allDone = files.every((file) => file.reading.ok) && solved.every((cast) => cast.solution !== null);
-  return allDone ? EXIT.done : EXIT.badInput;
+  return allRead && solved.every((cast) => cast.solution !== null) ? EXIT.done : EXIT.badInput;
 }
 
-const sourcesOf = (files: Awaited<ReturnType<typeof readCastFiles>>): readonly SourceFile[] =>
+const sourcesOf = (files: readonly ReadFile[]): readonly SourceFile[] =>
   files.filter((file) => file.reading.ok).map((file) => file.source);
 
 const SUMMARY = "summary";

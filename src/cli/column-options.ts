@@ -9,6 +9,7 @@ import {
   type WaterChoice,
 } from "../survey/index.ts";
 import { UsageError } from "./host.ts";
+import { READING_OPTIONS, type ReadingOptions, readingOptions } from "./reading-options.ts";
 
 /** What `layerhead column` was asked to do. */
 export interface ColumnOptions {
@@ -18,6 +19,7 @@ export interface ColumnOptions {
   readonly levels: readonly Level[];
   readonly json: boolean;
   readonly out: string | null;
+  readonly reading: ReadingOptions;
 }
 
 interface Range {
@@ -84,6 +86,7 @@ const OPTIONS = {
   levels: { type: "string" },
   json: { type: "boolean" },
   out: { type: "string" },
+  ...READING_OPTIONS,
 } as const;
 
 /** Reads the arguments behind `column`; throws UsageError with one line that says what was wrong. */
@@ -126,6 +129,7 @@ export function columnOptions(args: readonly string[]): ColumnOptions {
     levels: given(values.levels, levelsOf, []),
     json: values.json === true,
     out: values.out ?? null,
+    reading: readingOptions(values),
   };
 }
 

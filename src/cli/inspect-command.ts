@@ -1,16 +1,19 @@
 import { parseArgs } from "node:util";
-import type { Cast, FileReading } from "../cast/index.ts";
+import type { AnyFileReading } from "../cast/index.ts";
+import { type SolvedCast, solve } from "../survey/index.ts";
+import { gatherSurvey } from "./gather-survey.ts";
 import { EXIT, type ExitCode, type Host, UsageError } from "./host.ts";
-import { castIssueLines, issueLine } from "./issue-lines.ts";
-import { readCastFiles } from "./read-files.ts";
+import { inspectionJson } from "./inspection-json.ts";
+import { castIssueLines } from "./issue-lines.ts";
+import { READING_OPTIONS, readingOptions } from "./reading-options.ts";
 import { textTable } from "./text-table.ts";
 import { INSPECT_USAGE } from "./usage.ts";
 
-/** `layerhead inspect`: how every file was read, decision by decision. */
+/** `layerhead inspect`: how every file was read, decision by decision, and what the quality tests say. */
 export async function inspectCommand(host: Host, args: readonly string[]): Promise<ExitCode> {
   const { values, positionals } = parseArgs({
     args: [...args],
-    options: { help: { type: "boolean", short: "h" } },
+    options: { help: { type: "boolean", short: "h" }, json: { type: "boolean" }, ...READING_OPTIONS },
     allowPositionals: true,
   });
   if (values.help) {
@@ -18,56 +21,84 @@ export async function inspectCommand(host: Host, args: readonly string[]): Promi
     return EXIT.done;
   }
   if (positionals.length === 0) throw new UsageError("inspect needs at least one file");
-  const files = await readCastFiles(host, positionals);
-  for (const { path, reading } of files) {
-    if (reading.ok) host.out(`${readingText(reading.value)}\n`);
-    for (const issue of reading.issues) (reading.ok ? host.out : host.err)(issueLine(path, issue));
-    if (reading.ok)
+  const options = readingOptions(values);
+  const { survey, files, matches, allRead } = await gatherSurvey(host, positionals, options);
+  const solved = solve(survey);
+  if (values.json)
+    host.out(`${JSON.stringify(inspectionJson({ files, solved, matches, preparation: options.preparation }))}\n`);
+  else
+    for (const { path, reading } of files) {
+      if (!reading.ok) continue;
+      const own = solved.filter(({ cast }) => cast.fileName === path);
+      host.out(`${readingText(reading.value)}\n${castsText(own)}\n`);
       host.out(
         castIssueLines(
           path,
-          reading.value.casts.map(({ name, issues }) => ({ castName: name, issues })),
+          own.map(({ cast, issues }) => ({ castName: cast.name, issues })),
         ),
       );
-  }
-  return files.every((file) => file.reading.ok) ? EXIT.done : EXIT.badInput;
+      host.out(own.map((cast) => remarkLines(path, cast)).join(""));
+    }
+  return allRead ? EXIT.done : EXIT.badInput;
 }
 
-function readingText(reading: FileReading): string {
-  const { casts } = reading;
+function readingText(reading: AnyFileReading): string {
+  const { sheet, sheets } = reading;
   const decimal = reading.decimalMark === "," ? "decimal comma" : "decimal point";
   const columns = textTable(
     [
-      ["line head", ""],
+      ["header", ""],
       ["read as", ""],
       ["unit", ""],
+      ["how sure", ""],
       ["because", ""],
     ],
-    reading.columns.map((column) => [column.header, column.role ?? "-", column.unit ?? "-", column.reason]),
+    reading.columns.map((column) => [
+      column.header,
+      column.role ?? "-",
+      column.unit ?? "-",
+      column.confidence,
+      column.reason,
+    ]),
   );
   return [
     reading.fileName,
     `  ${reading.encoding}, ${reading.delimiter}, ${decimal}, header in line ${reading.headerLineIndex}, ${reading.rowCount} rows`,
+    ...(sheet === null ? [] : [`  sheet ${sheet}, of ${sheets.join(", ")}`]),
     columns,
-    `  ${casts.length} cast${casts.length === 1 ? "" : "s"}, told apart by ${reading.splitBy}`,
-    textTable(
-      [
-        ["cast", ""],
-        ["samples", ""],
-        ["time", ""],
-        ["km", ""],
-        ["", ""],
-      ],
-      casts.map((cast) => [
-        cast.name,
-        String(cast.samples.n),
-        cast.time ?? "-",
-        cast.distanceKm?.toString() ?? "-",
-        position(cast),
-      ]),
-    ),
   ].join("\n");
 }
 
-const position = ({ latitudeDeg, longitudeDeg }: Cast): string =>
-  latitudeDeg === null ? "" : `${latitudeDeg} N${longitudeDeg === null ? "" : `, ${longitudeDeg} E`}`;
+function castsText(solved: readonly SolvedCast[]): string {
+  const rows = solved.map(({ cast, prepared }) => [
+    cast.name,
+    String(cast.samples.n),
+    String(prepared.use.reduce((sum, used) => sum + used, 0)),
+    cast.time ?? "-",
+    cast.distanceKm?.toString() ?? "-",
+    cast.latitudeDeg === null
+      ? ""
+      : `${cast.latitudeDeg} N${cast.longitudeDeg === null ? "" : `, ${cast.longitudeDeg} E`}`,
+  ]);
+  return textTable(
+    [
+      ["cast", ""],
+      ["samples", ""],
+      ["used", ""],
+      ["time", ""],
+      ["km", ""],
+      ["", ""],
+    ],
+    rows,
+  );
+}
+
+/** A line for every sample that is flagged or left out. */
+const remarkLines = (path: string, { cast, prepared }: SolvedCast): string =>
+  prepared.reasons
+    .map((reasons, i) => {
+      if (reasons.length === 0) return "";
+      const word = prepared.use[i] === 1 ? `flag ${prepared.flag[i]}` : `flag ${prepared.flag[i]}, left out`;
+      return `${path}:${cast.samples.lineIndex[i]}: ${cast.name}: ${word}: ${reasons.join("; ")}\n`;
+    })
+    .join("");

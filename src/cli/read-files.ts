@@ -1,8 +1,9 @@
 import { createHash } from "node:crypto";
 import { failed, type Outcome } from "../base/index.ts";
-import { type FileReading, readCastFile } from "../cast/index.ts";
+import { type AnyFileReading, type ReadOptions, readFile, readStationList, type StationList } from "../cast/index.ts";
 import type { SourceFile } from "../export/index.ts";
 import type { Host } from "./host.ts";
+import type { ReadingOptions } from "./reading-options.ts";
 
 const WHY_UNREADABLE: Readonly<Record<string, string>> = {
   ENOENT: "no such file",
@@ -14,29 +15,40 @@ const WHY_UNREADABLE: Readonly<Record<string, string>> = {
 export interface ReadFile {
   readonly path: string;
   readonly source: SourceFile;
-  readonly reading: Outcome<FileReading>;
+  readonly reading: Outcome<AnyFileReading>;
 }
 
-export async function readCastFiles(host: Host, paths: readonly string[]): Promise<readonly ReadFile[]> {
-  const files: ReadFile[] = [];
-  for (const path of paths) files.push(await readOne(host, path));
-  return files;
-}
-
-async function readOne(host: Host, path: string): Promise<ReadFile> {
-  const unreadable = (message: string): ReadFile => ({
-    path,
-    source: { fileName: path, sha256: "" },
-    reading: failed({ severity: "error", code: "unreadable-file", message }),
-  });
-  if (path.trim() === "") return { ...unreadable("the name is empty, expected a file"), path: '""' };
-  let bytes: Uint8Array;
+/** The bytes of a file, or in one line why there are none. */
+export async function bytesOf(host: Host, path: string): Promise<Outcome<Uint8Array>> {
+  const unreadable = (message: string) => failed({ severity: "error", code: "unreadable-file", message });
+  if (path.trim() === "") return unreadable("the name is empty, expected a file");
   try {
-    bytes = await host.readFile(path);
+    return { ok: true, value: await host.readFile(path), issues: [] };
   } catch (error) {
     const code = (error as NodeJS.ErrnoException).code ?? "";
     return unreadable(WHY_UNREADABLE[code] ?? `cannot be read (${code || String(error)})`);
   }
-  const sha256 = createHash("sha256").update(bytes).digest("hex");
-  return { path, source: { fileName: path, sha256 }, reading: readCastFile(path, bytes) };
+}
+
+export async function readCastFiles(
+  host: Host,
+  paths: readonly string[],
+  { answers, sheet }: ReadingOptions,
+): Promise<readonly ReadFile[]> {
+  const files: ReadFile[] = [];
+  for (const path of paths) files.push(await readOne(host, path, { answers, ...(sheet !== null && { sheet }) }));
+  return files;
+}
+
+async function readOne(host: Host, path: string, options: ReadOptions): Promise<ReadFile> {
+  const bytes = await bytesOf(host, path);
+  if (!bytes.ok)
+    return { path: path.trim() === "" ? '""' : path, source: { fileName: path, sha256: "" }, reading: bytes };
+  const sha256 = createHash("sha256").update(bytes.value).digest("hex");
+  return { path, source: { fileName: path, sha256 }, reading: await readFile(path, bytes.value, options) };
+}
+
+export async function readStationFile(host: Host, path: string): Promise<Outcome<StationList>> {
+  const bytes = await bytesOf(host, path);
+  return bytes.ok ? readStationList(path, bytes.value) : bytes;
 }

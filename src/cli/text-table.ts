@@ -6,5 +6,7 @@ export function textTable(heads: readonly (readonly [string, string])[], rows: r
   );
   const line = (cells: readonly string[]): string =>
     `  ${cells.map((cell, c) => (c === last ? cell : cell.padStart(widths[c]!))).join("  ")}`.trimEnd();
-  return [line(heads.map(([title]) => title)), line(heads.map(([, unit]) => unit)), ...rows.map(line)].join("\n");
+  const hasUnits = heads.some(([, unit]) => unit !== "");
+  const head = [line(heads.map(([title]) => title)), ...(hasUnits ? [line(heads.map(([, unit]) => unit))] : [])];
+  return [...head, ...rows.map(line)].join("\n");
 }

@@ -15,7 +15,7 @@ Exit status: 0 done, 1 fault in the program, 2 bad input, 64 bad usage.
 
 export const COLUMN_USAGE = `usage: layerhead column FILE... [OPTIONS]
 
-Reads cast files (delimited text with a header), integrates each cast from the water
+Reads cast files (delimited text, workbooks, netCDF), integrates each cast from the water
 surface down and prints a table per cast.
 
 what is assumed beyond the samples
@@ -30,6 +30,17 @@ what is assumed beyond the samples
   --depth-made HOW         how the depth column came to be: measured (default),
                            standard-ocean, or constant:RHO with RHO in kg/m3
   --bed M                  depth of the bed below the surface
+
+how files are read
+  --read ROLE=HEADER:UNIT,...
+                           what a column is, where the file leaves it open or is
+                           wrong; unit may be left out, role may be unused
+  --sheet NAME             sheet of a workbook (default: the first with casts)
+  --stations FILE          list of stations (station, latitude, longitude, distance,
+                           water depth) to join to the casts by name
+  --way WAY                part of a raw record: auto (default), down, up, all
+  --bins M                 means of 0.1, 0.25, 0.5 or 1 m, or none (default)
+  --water-kind KIND        what is plausible: any (default), fresh, estuary, sea
 
 what comes out
   --levels M,M,...         depths to report besides the samples
@@ -51,8 +62,13 @@ added, at full precision. Columns it needs, by these names:
 Other columns are passed through. - reads standard input.
 `;
 
-export const INSPECT_USAGE = `usage: layerhead inspect FILE...
+export const INSPECT_USAGE = `usage: layerhead inspect FILE... [OPTIONS]
 
-Tells how each file is read: which column became what, in which unit and why, the casts
-found in it, and the rows that were left out and why. Nothing is computed.
+Tells how each file is read: which column became what, in which unit, how sure that is
+and why, the questions left open, the casts found, how stations were joined, and every
+sample that is flagged or left out, with the reason. No pressure is computed.
+
+  --read, --sheet, --stations, --way, --bins, --water-kind
+                           as for layerhead column
+  --json                   the same as one JSON object
 `;
