@@ -79,9 +79,9 @@ export interface FileReading {
   /** In words: "comma", "semicolon", "tab" ... */
   readonly delimiter: string;
   readonly decimalMark: "." | ",";
-  /** 1-based line of the header row. */
+  /** 1-based line of the header row, the last where it has two; 0 where there is none. */
   readonly headerLineIndex: number;
-  /** As written in the file. */
+  /** As written in the file; "#1", "#2" ... where it has none. */
   readonly headers: readonly string[];
   /** The first rows below the headers, cells as written. */
   readonly firstRows: readonly (readonly string[])[];

@@ -133,10 +133,14 @@ export class CellReader {
   }
 
   /** Blank where there is none, or where `read` cannot make sense of it. */
-  times(role: ColumnRole, texts: readonly string[], read: (text: string) => string | null): readonly string[] {
+  times(
+    role: ColumnRole,
+    texts: readonly string[],
+    read: (text: string, rowIndex: number) => string | null,
+  ): readonly string[] {
     return texts.map((text, rowIndex) => {
       if (isMissing(text)) return "";
-      const time = read(text);
+      const time = read(text, rowIndex);
       if (time !== null) return time;
       const message = `${ROLE_WORDS[role]} "${text}" is not understood; expected a form such as 2020-01-13 or 13:46`;
       this.#reject(rowIndex, { code: "not-a-time", message });

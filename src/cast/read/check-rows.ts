@@ -5,6 +5,7 @@ import type { Question } from "../reading.ts";
 import { answerName } from "./answers.ts";
 import { choose, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
+import type { Row } from "./parse-table.ts";
 import type { RecognisedColumns } from "./recognise-columns.ts";
 import type { Table } from "./table.ts";
 import { isWeightOfAir } from "./vertical.ts";
@@ -30,11 +31,37 @@ function widthIssue(table: Table): Issue | null {
     : { severity: "warning", code: "rows-too-wide", line, message: `${found}; check them, surplus cells are not read` };
 }
 
+const isShort = (table: Table, row: Row): boolean => row.cells.length < table.header.cells.length;
+
+/** Rows that end early: what is missing is blank, unless blanks part the cells, where nobody can say which is missing. */
+function shortIssue(table: Table): Issue | null {
+  const short = table.rows.filter((row) => isShort(table, row));
+  const first = short[0];
+  if (first === undefined) return null;
+  const found = `${short.length} of ${table.rows.length} rows are shorter than the header (line ${first.lineIndex}: ${first.cells.length} cells, expected ${table.header.cells.length})`;
+  const isLeftOut = table.delimiter.blanks !== undefined;
+  const what = isLeftOut
+    ? "left out, as blanks do not tell which cell is missing"
+    : "their last cells are read as blank";
+  return {
+    severity: isLeftOut ? "warning" : "note",
+    code: "rows-too-short",
+    line: first.lineIndex,
+    message: `${found}; ${what}`,
+  };
+}
+
+/** Without the rows whose cells may stand under the wrong names. */
+export function withoutShiftedRows(table: Table): Table {
+  if (table.delimiter.blanks === undefined) return table;
+  return { ...table, rows: table.rows.filter((row) => !isShort(table, row)) };
+}
+
 function upsideDownIssue(rows: MeasuredRows): Issue | null {
   const depths = [...(rows.depthM ?? [])].filter((depth) => !Number.isNaN(depth));
   const negativeCount = depths.filter((depth) => depth < 0).length;
   if (negativeCount <= depths.length / 2) return null;
-  const message = `depth is negative in ${negativeCount} of ${depths.length} rows, down to ${min(depths)} m; depth counts positive down: change the sign`;
+  const message = `depth is negative in ${negativeCount} of ${depths.length} rows, down to ${min(depths)} m; depth counts positive down: change the sign, or say that the column counts upward`;
   return { severity: "error", code: "depth-upside-down", message };
 }
 
@@ -65,10 +92,13 @@ function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDe
   return { severity: "warning", code: "off-the-earth", message };
 }
 
-/** Only errors keep the rows from being used. */
-export function checkRows(table: Table, rows: MeasuredRows): readonly Issue[] {
+/** What the lengths of the rows say; only an error keeps them from being used. */
+export const rowLengthIssues = (table: Table): readonly Issue[] =>
+  [widthIssue(table), shortIssue(table)].filter((issue) => issue !== null);
+
+/** What the values say, taken together; only an error keeps them from being used. */
+export function checkRows(rows: MeasuredRows): readonly Issue[] {
   const issues = [
-    widthIssue(table),
     upsideDownIssue(rows),
     offTheEarthIssue("latitude", rows.latitudeDeg, 90),
     offTheEarthIssue("longitude", rows.longitudeDeg, 180),

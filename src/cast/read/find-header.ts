@@ -5,30 +5,58 @@ import { readHeaderCell } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
 import type { Table } from "./table.ts";
 
-/** A header further down than this is not looked for. */
+/** So many lines are searched at a time; text above a table may be longer. */
 const SEARCHED_LINES = 1000;
+/** Between headers and the first numbers may stand units and a second line of names. */
+const ROWS_TO_NUMBERS = 4;
 
+/** A row that could be the header, in one reading of the lines. */
 interface Candidate {
   readonly delimiter: Delimiter;
   readonly headerLineIndex: number;
-  readonly roleCount: number;
+  /** Names that we know, numbers below, as many of them as names: the more the better. */
+  readonly score: number;
 }
+
+/** A row of numbers of the same width below weighs more than any number of names. */
+const HAS_NUMBERS = 100;
+const HAS_WIDTH = 50;
+const HAS_TEMPERATURE = 10;
 
 const looksNumeric = (cell: string): boolean => /^[-+−]?[\d.,]+(e[-+]?\d+)?$/i.test(cell);
 
-/** How many names a row holds that we know; none if it has only been torn apart at the blanks within its names. */
-function roleCountOf(row: Row, delimiter: Delimiter): number {
-  const isTorn = delimiter.character === " " && row.cells.some((cell) => /[,;|\t]/.test(cell));
-  if (isTorn || row.cells.length < 2) return 0;
-  return new Set(row.cells.flatMap((cell) => readHeaderCell(cell)?.role ?? [])).size;
+/** The roles that the names of a row have; none if it has only been torn apart at the blanks within its names. */
+function rolesIn(cells: readonly string[], delimiter: Delimiter): ReadonlySet<string> {
+  const isTorn = delimiter.blanks !== undefined && cells.some((cell) => /[,;|\t]/.test(cell));
+  if (isTorn || cells.length < 2) return new Set();
+  return new Set(cells.flatMap((cell) => readHeaderCell(cell)?.role ?? []));
 }
 
-/** The first of the rows with most known names. */
-function headerByNames(lines: readonly string[], delimiter: Delimiter): Candidate {
-  let best: Candidate = { delimiter, headerLineIndex: 0, roleCount: 0 };
-  for (const row of parseTable(lines, delimiter).rows) {
-    const roleCount = roleCountOf(row, delimiter);
-    if (roleCount > best.roleCount) best = { delimiter, headerLineIndex: row.lineIndex, roleCount };
+/** Cells up to the last that holds something: a delimiter at the end of a line opens no column. */
+const widthOf = (cells: readonly string[]): number => cells.findLastIndex((cell) => cell !== "") + 1;
+
+function scoreOf(rows: readonly Row[], at: number, delimiter: Delimiter): number {
+  const header = rows[at]!.cells;
+  const roles = rolesIn(header, delimiter);
+  if (roles.size === 0) return 0;
+  const below = rows.slice(at + 1, at + 1 + ROWS_TO_NUMBERS);
+  const numbers = below.find((row) => row.cells.filter(looksNumeric).length >= Math.min(2, header.length));
+  const isOfWidth = numbers && widthOf(numbers.cells) <= header.length && numbers.cells.length >= widthOf(header);
+  return (
+    roles.size +
+    (numbers ? HAS_NUMBERS : 0) +
+    (isOfWidth ? HAS_WIDTH : 0) +
+    (roles.has("temperature") ? HAS_TEMPERATURE : 0)
+  );
+}
+
+/** The first of the rows with the best score. */
+function bestRow(lines: readonly string[], firstLine: number, delimiter: Delimiter): Candidate {
+  let best: Candidate = { delimiter, headerLineIndex: 0, score: 0 };
+  const { rows } = parseTable(lines, delimiter);
+  for (const [at, row] of rows.entries()) {
+    const score = scoreOf(rows, at, delimiter);
+    if (score > best.score) best = { delimiter, headerLineIndex: firstLine + row.lineIndex, score };
   }
   return best;
 }
@@ -41,13 +69,21 @@ function headerByShape(lines: readonly string[], delimiter: Delimiter): Candidat
     const isHeading = row.cells.length >= 2 && !row.cells.some(looksNumeric);
     return isHeading && next?.cells.length === row.cells.length && next.cells.filter(looksNumeric).length >= 2;
   });
-  return header ? { delimiter, headerLineIndex: header.lineIndex, roleCount: 0 } : null;
+  return header ? { delimiter, headerLineIndex: header.lineIndex, score: 0 } : null;
 }
 
+/** The best header among all lines; the search ends with the first stretch of lines that has one above numbers. */
 function bestByNames(lines: readonly string[]): Candidate | null {
-  const candidates = DELIMITERS.map((delimiter) => headerByNames(lines, delimiter));
-  const best = candidates.reduce((a, b) => (b.roleCount > a.roleCount ? b : a));
-  return best.roleCount > 0 ? best : null;
+  let best: Candidate | null = null;
+  for (let start = 0; start < lines.length; start += SEARCHED_LINES) {
+    const searched = lines.slice(start, start + SEARCHED_LINES + ROWS_TO_NUMBERS);
+    for (const delimiter of DELIMITERS) {
+      const found = bestRow(searched, start, delimiter);
+      if (found.score > (best?.score ?? 0)) best = found;
+    }
+    if (best !== null && best.score > HAS_NUMBERS) return best;
+  }
+  return best;
 }
 
 /** Some files put a comment sign before the header itself, as the last line of the comments at the top. */
@@ -58,38 +94,88 @@ function withHeaderUncommented(lines: readonly string[]): readonly string[] {
 }
 
 /** One text a column when the row below the header is a row of units, else null. */
-function unitsIn(header: Row, below: Row | undefined): readonly string[] | null {
+function unitsIn(header: readonly string[], below: Row | undefined): readonly string[] | null {
   if (below === undefined || below.cells.some(looksNumeric)) return null;
-  const texts = header.cells.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
-  const isUnits = header.cells.some((cell, i) => {
+  const texts = header.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
+  const isUnits = header.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
     return role !== undefined && isMeasured(role) && unitByName(texts[i]!, MEASURED[role].kind) !== null;
   });
   return isUnits ? texts : null;
 }
 
-const isSameRow = (a: Row, b: Row): boolean =>
-  a.cells.length === b.cells.length && a.cells.every((cell, i) => cell === b.cells[i]);
+/** The names in a table, on one line or two, and the rows that they stand in. */
+interface Names {
+  readonly cells: readonly string[];
+  readonly firstAt: number;
+  readonly lastAt: number;
+}
+
+/** Names of two lines, "Specific" over "cond", where together they say at least as much as the one line alone. */
+function namesAt(rows: readonly Row[], at: number, delimiter: Delimiter): Names {
+  const alone: Names = { cells: rows[at]!.cells, firstAt: at, lastAt: at };
+  for (const firstAt of [at - 1, at]) {
+    const [upper, lower] = [rows[firstAt], rows[firstAt + 1]];
+    if (!upper || !lower || upper.cells.length !== lower.cells.length) continue;
+    if (lower.lineIndex !== upper.lineIndex + 1 || [...upper.cells, ...lower.cells].some(looksNumeric)) continue;
+    if (unitsIn(upper.cells, lower) !== null) continue;
+    const cells = upper.cells.map((cell, i) => `${cell} ${lower.cells[i]}`.trim());
+    const losesName = alone.cells.some(
+      (cell, i) => readHeaderCell(cell) !== null && readHeaderCell(cells[i]!) === null,
+    );
+    if (!losesName && rolesIn(cells, delimiter).size >= rolesIn(alone.cells, delimiter).size) {
+      return { cells, firstAt, lastAt: firstAt + 1 };
+    }
+  }
+  return alone;
+}
+
+const isSameRow = (row: Row, cells: readonly string[]): boolean =>
+  row.cells.length === cells.length && row.cells.every((cell, i) => cell === cells[i]);
+
+/** Rows of numbers and nothing above them: the columns are called by their place, #1 and on. */
+function withoutHeader(lines: readonly string[]): Table | null {
+  for (const delimiter of DELIMITERS) {
+    const { rows, hasOpenQuote } = parseTable(lines, delimiter);
+    const width = rows[0]?.cells.length ?? 0;
+    const isTable = rows.every((row) => row.cells.length === width && row.cells.filter(looksNumeric).length >= 2);
+    if (!isTable || rows.length < 2) continue;
+    const cells = rows[0]!.cells.map((_, i) => `#${i + 1}`);
+    return {
+      delimiter,
+      header: { lineIndex: 0, cells },
+      unitTexts: cells.map(() => ""),
+      rows,
+      preface: [],
+      hasOpenQuote,
+    };
+  }
+  return null;
+}
 
 /** The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out. */
 export function findTable(text: string): Table | null {
   const plain = text.split("\n");
-  const byNames = bestByNames(plain.slice(0, SEARCHED_LINES));
+  const byNames = bestByNames(plain);
   const lines = byNames === null ? withHeaderUncommented(plain) : plain;
   const searched = lines.slice(0, SEARCHED_LINES);
   const candidate =
-    byNames ?? bestByNames(searched) ?? DELIMITERS.map((d) => headerByShape(searched, d)).find((c) => c !== null);
-  if (!candidate) return null;
+    byNames ?? bestByNames(lines) ?? DELIMITERS.map((d) => headerByShape(searched, d)).find((c) => c !== null);
+  if (!candidate) return withoutHeader(lines);
   const { rows, hasOpenQuote } = parseTable(lines, candidate.delimiter);
-  const headerAt = rows.findIndex((row) => row.lineIndex === candidate.headerLineIndex);
-  const header = rows[headerAt]!;
-  const units = unitsIn(header, rows[headerAt + 1]);
+  const at = rows.findIndex((row) => row.lineIndex === candidate.headerLineIndex);
+  const names = namesAt(rows, at, candidate.delimiter);
+  const units = unitsIn(names.cells, rows[names.lastAt + 1]);
+  const header = {
+    lineIndex: rows[names.lastAt]!.lineIndex,
+    cells: names.cells.slice(0, Math.max(2, widthOf(names.cells))),
+  };
   return {
     delimiter: candidate.delimiter,
     header,
-    unitTexts: units ?? header.cells.map(() => ""),
-    rows: rows.slice(headerAt + (units === null ? 1 : 2)).filter((row) => !isSameRow(row, header)),
-    preface: rows.slice(0, headerAt),
+    unitTexts: header.cells.map((_, i) => units?.[i] ?? ""),
+    rows: rows.slice(names.lastAt + (units === null ? 1 : 2)).filter((row) => !isSameRow(row, rows[at]!.cells)),
+    preface: rows.slice(0, names.firstAt),
     hasOpenQuote,
   };
 }

@@ -16,6 +16,8 @@ export interface ParsedRows {
 
 export interface Delimiter {
   readonly character: string;
+  /** Runs of these part the cells, and are made into one `character` before parsing. */
+  readonly blanks?: RegExp;
   /** In words, for the user. */
   readonly name: string;
 }
@@ -26,7 +28,8 @@ export const DELIMITERS: readonly Delimiter[] = [
   { character: ";", name: "semicolon" },
   { character: "\t", name: "tab" },
   { character: "|", name: "vertical bar" },
-  { character: " ", name: "blanks" },
+  { character: " ", name: "blanks", blanks: /[ \t]+/g },
+  { character: "\t", name: "runs of blanks", blanks: / {2,}|\t/g },
 ];
 
 const COMMENT_SIGN = /^(\s*"?)(#|%|\/\/)+\s*/;
@@ -35,22 +38,33 @@ export const isCommentLine = (line: string): boolean => COMMENT_SIGN.test(line);
 
 export const withoutCommentSign = (line: string): string => line.replace(COMMENT_SIGN, "$1");
 
-const squeezed = (line: string): string => line.trim().replace(/ +/g, " ");
+/** A line as it goes to the parser: comments emptied, runs of blanks made into one delimiter. */
+export function keptText(line: string, { character, blanks }: Delimiter): string {
+  if (isCommentLine(line)) return "";
+  return blanks === undefined ? line : line.trim().replace(blanks, character);
+}
 
 /**
  * Comment lines are emptied and not taken out, so that lines keep their numbers; a quoted cell that spans lines counts
  * each of them.
  */
 export function parseTable(lines: readonly string[], delimiter: Delimiter): ParsedRows {
-  const kept = lines.map((line) => (isCommentLine(line) ? "" : delimiter.character === " " ? squeezed(line) : line));
-  const parsed = Papa.parse<string[]>(kept.join("\n"), { delimiter: delimiter.character, newline: "\n" });
+  const text = lines.map((line) => keptText(line, delimiter)).join("\n");
+  const parsed = Papa.parse<string[]>(text, { delimiter: delimiter.character, newline: "\n" });
   const rows: Row[] = [];
   let lineIndex = 1;
-  for (const raw of parsed.data) {
-    const cells = raw.map((cell) => cell.trim());
-    if (cells.some((cell) => cell !== "")) rows.push({ lineIndex, cells });
+  for (const cells of parsed.data) {
+    const firstLine = lineIndex;
+    let isBlank = true;
     lineIndex += 1;
-    for (const cell of raw) if (cell.includes("\n")) lineIndex += cell.split("\n").length - 1;
+    for (let i = 0; i < cells.length; i++) {
+      const raw = cells[i]!;
+      if (raw.includes("\n")) lineIndex += raw.split("\n").length - 1;
+      const cell = raw.trim();
+      cells[i] = cell;
+      isBlank &&= cell === "";
+    }
+    if (!isBlank) rows.push({ lineIndex: firstLine, cells });
   }
   return { rows, hasOpenQuote: parsed.errors.some((error) => error.code === "MissingQuotes") };
 }

@@ -82,43 +82,56 @@ export function parseClock(text: string): string | null {
   return `${two(hour)}:${match[2]}${seconds === undefined ? "" : `:${seconds}`}`;
 }
 
+/** Seconds since midnight of a clock time, with their fraction; NaN where the text is none. */
+export function secondsOfDay(text: string): number {
+  const clock = parseClock(text);
+  if (clock === null) return Number.NaN;
+  const fraction = /:\d{2}[.,](\d{1,9})/.exec(text);
+  const wholeS = Number(clock.slice(0, 2)) * 3600 + Number(clock.slice(3, 5)) * 60 + Number(clock.slice(6));
+  return fraction === null ? wholeS : wholeS + Number(`0.${fraction[1]}`);
+}
+
+/** Longer texts are no time; so much also bounds the work on them. */
+const LONGEST_TEXT = 60;
+const ZONE = /\s*(Z|UTC|GMT|[-+]\d{2}:?\d{2})$/i;
+const DATE_AND_CLOCK = /^(.+?)(?:T|\s+)(\d{1,2}:\d{2}.*|\d{4})$/i;
+
+/** A date and a clock time with a blank or a T between, or fourteen figures in a row. */
+function splitMoment(text: string): { readonly date: string; readonly clock: string } | null {
+  if (text.length > LONGEST_TEXT) return null;
+  const match = DATE_AND_CLOCK.exec(text.replace(ZONE, ""));
+  if (match !== null) return { date: match[1]!.trim(), clock: match[2]!.trim() };
+  const figures = /^(\d{8})(\d{2})(\d{2})(\d{2})$/.exec(text);
+  return figures && { date: figures[1]!, clock: `${figures[2]}:${figures[3]}:${figures[4]}` };
+}
+
+export interface TimedMoment {
+  readonly date: string;
+  /** HH:MM or HH:MM:SS; empty where the text is a date alone. */
+  readonly clock: string;
+  readonly inDayS: number;
+}
+
+/** A date, alone or with a time of day behind it; a zone at the end is not converted. */
+export function parseMoment(text: string, dateOf: (text: string) => string | null): TimedMoment | null {
+  const whole = text.includes(":") ? null : dateOf(text);
+  if (whole !== null) return { date: whole, clock: "", inDayS: 0 };
+  const parts = splitMoment(text);
+  const date = parts && dateOf(parts.date);
+  const clock = parts && parseClock(parts.clock);
+  return date && clock ? { date, clock, inDayS: secondsOfDay(parts.clock) } : null;
+}
+
 export interface Moment {
   readonly date: string;
   /** HH:MM or HH:MM:SS */
   readonly clock: string | null;
 }
 
-/** A date with a time of day behind it, with a blank or a T between; a zone at the end is not converted. */
+/** As `parseMoment`, for telling what a column holds. */
 export function parseDateTime(text: string, order: SlashOrder): Moment | null {
-  const whole = parseDate(text, order);
-  if (whole !== null) return { date: whole, clock: null };
-  const parts = splitMoment(text);
-  if (parts === null) return null;
-  const date = parseDate(parts.date, order);
-  const clock = parseClock(parts.clock);
-  return date === null || clock === null ? null : { date, clock };
-}
-
-/** Longer texts are no time; so much also bounds the work on them. */
-const LONGEST_TEXT = 60;
-const ZONE = /\s*(Z|UTC|GMT|[-+]\d{2}:?\d{2})$/i;
-
-function splitMoment(text: string): { readonly date: string; readonly clock: string } | null {
-  if (text.length > LONGEST_TEXT) return null;
-  const figures = /^(\d{8})(\d{6})$/.exec(text);
-  if (figures !== null) return { date: figures[1]!, clock: figures[2]!.replace(/(\d{2})(?=\d)/g, "$1:") };
-  const plain = text.replace(ZONE, "");
-  const match = /^(.+?)(?:T|\s+)(\d{1,2}:\d{2}.*|\d{4})$/i.exec(plain);
-  return match && { date: match[1]!.trim(), clock: match[2]!.trim() };
-}
-
-/** Seconds since midnight of a clock time, or of the clock time in a date-time, with their fraction; NaN where there is none. */
-export function secondsOfDay(text: string): number {
-  const clock = parseClock(text) ?? parseClock(splitMoment(text)?.clock ?? "");
-  if (clock === null) return Number.NaN;
-  const [hours, minutes, seconds] = clock.split(":").map(Number);
-  const fraction = /:\d{2}[.,](\d{1,9})/.exec(text);
-  return hours! * 3600 + minutes! * 60 + (seconds ?? 0) + (fraction ? Number(`0.${fraction[1]}`) : 0);
+  const found = parseMoment(text, (date) => parseDate(date, order));
+  return found && { date: found.date, clock: found.clock || null };
 }
 
 /** The part of a date-time text that is a date, for telling the order of its figures. */

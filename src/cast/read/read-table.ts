@@ -4,7 +4,7 @@ import type { Cast } from "../cast.ts";
 import type { ColumnReading, FileReading, Question, ReadingAnswers } from "../reading.ts";
 import { buildCast, named } from "./build-cast.ts";
 import { checkColumns } from "./check-columns.ts";
-import { airInPressure, checkRows } from "./check-rows.ts";
+import { airInPressure, checkRows, rowLengthIssues, withoutShiftedRows } from "./check-rows.ts";
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
@@ -33,6 +33,11 @@ const counted = (n: number): string => (n === 1 ? "one sample" : "no samples");
 /** What is worth knowing about the text around the table. */
 function tableIssues(table: Table): readonly Issue[] {
   const issues: Issue[] = [];
+  if (table.header.lineIndex === 0) {
+    const names = `#1 to #${table.header.cells.length}`;
+    const message = `no row of headers in the file; its columns go by their places, ${names}; say what they are, as in depth=#1:m`;
+    issues.push(warning("no-header", message));
+  }
   const [first, last] = [table.preface[0], table.preface.at(-1)];
   if (first && last) {
     const where = first === last ? `line ${first.lineIndex}` : `lines ${first.lineIndex} to ${last.lineIndex}`;
@@ -82,9 +87,12 @@ const asIssue = ({ code, message }: Question): Issue => warning(code, message);
 /** Reads a table into casts, from whatever format it comes. Nothing is guessed without an issue that says so. */
 export function readTable(
   source: TableSource,
-  table: Table,
+  found: Table,
   answers: ReadingAnswers = NO_ANSWERS,
 ): Outcome<FileReading> {
+  const lengths = rowLengthIssues(found);
+  if (lengths.some((issue) => issue.severity === "error")) return failed(...lengths);
+  const table = withoutShiftedRows(found);
   const columns = recogniseColumns(table, answers);
   const check = checkColumns(table, columns);
   if (check.errors.length > 0) return failed(...check.errors);
@@ -98,9 +106,9 @@ export function readTable(
     columns: columns.readings,
     questions: [...columns.questions, ...check.questions],
     splitBy: "nothing yet",
-    rowCount: table.rows.length,
+    rowCount: found.rows.length,
     casts: [],
-    issues: [...tableIssues(table), ...columns.issues, ...check.questions.map(asIssue)],
+    issues: [...tableIssues(found), ...lengths, ...columns.issues, ...check.questions.map(asIssue)],
   };
   return check.isWaiting ? succeeded(reading) : withCasts(reading, table, columns);
 }
@@ -108,7 +116,7 @@ export function readTable(
 /** The rows of a table whose columns are known. */
 function withCasts(reading: FileReading, table: Table, columns: RecognisedColumns): Outcome<FileReading> {
   const rows = readMeasuredRows(table, columns);
-  const rowIssues = checkRows(table, rows);
+  const rowIssues = checkRows(rows);
   if (rowIssues.some((issue) => issue.severity === "error")) return failed(...rowIssues);
   const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...rowIssues];
   const asked = rows.depthM === null ? airInPressure(table, columns, rows) : null;

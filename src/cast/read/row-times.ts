@@ -1,7 +1,7 @@
 /** When each row was measured, from whatever columns say so: date, clock, both in one, year-month-day, or a count. */
 import type { CellReader } from "./cell-reader.ts";
 import { countedMs, type DayCount } from "./day-count.ts";
-import { parseClock, parseDateTime, type SlashOrder, secondsOfDay } from "./parse-time.ts";
+import { parseClock, parseDate, parseMoment, secondsOfDay } from "./parse-time.ts";
 import type { TimeForm } from "./time-form.ts";
 
 export interface RowTimes {
@@ -22,11 +22,12 @@ interface Moment {
   readonly timeS: number;
 }
 
-/** A column that has dates in it, alone or with times. */
-interface Source {
+/** What a column that has dates in it says, row by row. */
+interface Moments {
   readonly texts: readonly string[];
   readonly dates: readonly string[];
-  readonly moment: (text: string) => Moment | null;
+  readonly clocks: readonly string[];
+  readonly timeS: Float64Array;
 }
 
 const REMEMBERED = 20_000;
@@ -43,6 +44,7 @@ function remembered<T>(parse: (text: string) => T): (text: string) => T {
   };
 }
 
+/** Seconds from 1970 to the midnight that a day begins with. */
 const dayS = (date: string): number => (date === "" ? Number.NaN : Date.parse(date) / 1000);
 
 /** Beyond this no date is written, in milliseconds from 1970. */
@@ -56,16 +58,15 @@ function countedMoment(text: string, count: DayCount): Moment | null {
   return { date: iso.slice(0, 10), clock: iso.slice(11, 19), timeS: ms / 1000 };
 }
 
-function writtenMoment(text: string, order: SlashOrder): Moment | null {
-  const found = parseDateTime(text, order);
-  if (found === null) return null;
-  const inDayS = found.clock === null ? 0 : secondsOfDay(text);
-  return { date: found.date, clock: found.clock ?? "", timeS: dayS(found.date) + inDayS };
-}
-
 function momentIn({ order, count }: TimeForm): (text: string) => Moment | null {
-  if (count !== null) return remembered((text) => countedMoment(text, count));
-  return remembered((text) => (order === null ? null : writtenMoment(text, order)));
+  if (count !== null) return (text) => countedMoment(text, count);
+  if (order === null) return () => null;
+  const dateOf = remembered((text) => parseDate(text, order));
+  const startS = remembered(dayS);
+  return (text) => {
+    const found = parseMoment(text, dateOf);
+    return found && { ...found, timeS: startS(found.date) + (found.clock === "" ? 0 : found.inDayS) };
+  };
 }
 
 /** One date text a row from three columns; null unless the file has all of them. */
@@ -80,28 +81,35 @@ function yearMonthDay(reader: CellReader): readonly string[] | null {
   });
 }
 
-function dateSource(reader: CellReader): Source | null {
+function dateMoments(reader: CellReader): Moments | null {
   const parts = yearMonthDay(reader);
   const form: TimeForm = parts === null ? reader.timeForm("date") : { order: "month-first", count: null };
   const texts = parts ?? reader.textsFilledDown("date");
-  return texts && sourceOf(reader, parts === null ? "date" : "day", texts, form);
+  return texts && momentsOf(reader, parts === null ? "date" : "day", texts, form);
 }
 
-function momentSource(reader: CellReader): Source | null {
+function dateTimeMoments(reader: CellReader): Moments | null {
   const texts = reader.texts("dateTime");
-  return texts && sourceOf(reader, "dateTime", texts, reader.timeForm("dateTime"));
+  return texts && momentsOf(reader, "dateTime", texts, reader.timeForm("dateTime"));
 }
 
-function sourceOf(
+function momentsOf(
   reader: CellReader,
   role: "date" | "day" | "dateTime",
   texts: readonly string[],
   form: TimeForm,
-): Source {
-  const moment = momentIn(form);
+): Moments {
+  const momentOf = remembered(momentIn(form));
+  const clocks: string[] = [];
+  const timeS = new Float64Array(texts.length).fill(Number.NaN);
   const isOpen = form.order === null && form.count === null;
-  const dates = isOpen ? texts.map(() => "") : reader.times(role, texts, (text) => moment(text)?.date ?? null);
-  return { texts, dates, moment };
+  const dates = reader.times(role, isOpen ? texts.map(() => "") : texts, (text, i) => {
+    const moment = momentOf(text);
+    clocks[i] = moment?.clock ?? "";
+    timeS[i] = moment?.timeS ?? Number.NaN;
+    return moment?.date ?? null;
+  });
+  return { texts, dates, clocks: texts.map((_, i) => clocks[i] ?? ""), timeS };
 }
 
 /** Clock times of a lowering that runs past midnight go on counting. */
@@ -115,24 +123,20 @@ function unwrapped(inDayS: Float64Array): Float64Array {
 
 function clockTimes(clockTexts: readonly string[], date: readonly string[] | null): Float64Array {
   const inDayS = Float64Array.from(clockTexts, remembered(secondsOfDay));
-  const dateS = remembered(dayS);
-  return date === null ? unwrapped(inDayS) : inDayS.map((value, i) => value + dateS(date[i]!));
+  const startS = remembered(dayS);
+  return date === null ? unwrapped(inDayS) : inDayS.map((value, i) => value + startS(date[i]!));
 }
 
 export function readRowTimes(reader: CellReader): RowTimes {
-  const days = dateSource(reader);
-  const moments = momentSource(reader);
+  const days = dateMoments(reader);
+  const moments = dateTimeMoments(reader);
   const clockTexts = reader.texts("clock");
   const main = days ?? moments;
   const date = main?.dates ?? null;
-  const clockOf = (text: string): string => moments?.moment(text)?.clock ?? "";
-  const timeOf = (text: string): number => moments?.moment(text)?.timeS ?? Number.NaN;
-  const momentTimeS = moments && Float64Array.from(moments.texts, timeOf);
   return {
     date,
     dateKey: date?.map((day, i) => day || main?.texts[i] || "") ?? null,
-    clock:
-      (clockTexts && reader.times("clock", clockTexts, remembered(parseClock))) ?? moments?.texts.map(clockOf) ?? null,
-    timeS: reader.numbers("elapsedTime") ?? momentTimeS ?? (clockTexts && clockTimes(clockTexts, date)),
+    clock: (clockTexts && reader.times("clock", clockTexts, remembered(parseClock))) ?? moments?.clocks ?? null,
+    timeS: reader.numbers("elapsedTime") ?? moments?.timeS ?? (clockTexts && clockTimes(clockTexts, date)),
   };
 }

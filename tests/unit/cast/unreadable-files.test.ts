@@ -37,10 +37,18 @@ describe("one clear line for each", () => {
 
   test.each([
     ["prose", "It was a calm day, the sea was flat.\nWe lowered the probe, twice, and went home.\n"],
-    ["numbers without headers", "1,10,30\n2,10,30\n3,10,30\n"],
+    ["numbers in prose", "We went out on 3 May.\nAt 10, 20 and 30 m it was cold.\n"],
     ["one word", "depth"],
   ])("%s", (_, text) => {
     expect(messageOf(text, "no-table")).toContain("expected a row of headers");
+  });
+
+  test("numbers without headers: the columns go by their places", () => {
+    const reading = readText("1,10,30\n2,10,30\n3,10,30\n");
+    expect(reading.headers).toEqual(["#1", "#2", "#3"]);
+    expect(reading.headerLineIndex).toBe(0);
+    expect(reading.issues[0]!.message).toContain("say what they are, as in depth=#1:m");
+    expect(reading.questions.map((question) => question.code)).toEqual(["no-depth-column", "no-temperature-column"]);
   });
 
   test("no depth: the headers found and what is expected, and which column of numbers could be meant", () => {
