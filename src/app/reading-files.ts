@@ -1,12 +1,12 @@
 import { signal } from "@preact/signals";
 import { failed } from "../base/index.ts";
-import type { ReadingAnswers } from "../cast/index.ts";
+import type { ReadingAnswers, StationList } from "../cast/index.ts";
 import { type ReadRequest, Stopped } from "../worker/index.ts";
 import { keepFile, keptFile } from "./kept-files.ts";
 import { noteSamplesKey } from "./samples-keys.ts";
 import { type KeptReading, readingsOf } from "./state/app-state.ts";
 import type { ReadFile, SurveyStart } from "./state/files.ts";
-import { dispatch, openReading, state } from "./store.ts";
+import { dispatch, isStationPanelOpen, openReading, state } from "./store.ts";
 import { threads } from "./threads.ts";
 
 /** A file that is being read or waits for its turn. */
@@ -32,10 +32,11 @@ export async function readFiles(files: readonly File[], start?: SurveyStart): Pr
     endJob(job);
   }
   if (read.length === 0) return;
-  const answers = read.map(({ answer }) => answer);
-  dispatch({ kind: "files-read", files: answers, start: start ?? { name: nameFor(answers) } });
-  for (const { file, answer } of read) keepFile(answer, file);
+  const answers = read.map(({ answer }) => answer).filter(({ stations }) => !stations);
+  if (answers.length > 0) dispatch({ kind: "files-read", files: answers, start: start ?? { name: nameFor(answers) } });
+  for (const { file, answer } of read) if (answer.outcome.ok) keepFile(answer, file);
   openQuestions(answers);
+  for (const { answer } of read) if (answer.stations) takeStations(answer.stations);
 }
 
 /** Reads a file of the survey again, with other answers or another sheet. */
@@ -66,6 +67,11 @@ export function stopReading(job: ReadingJob): void {
   const isBeingRead = readingJobs.value[0] === job;
   endJob(job);
   if (isBeingRead) threads.stopReading();
+}
+
+function takeStations(list: StationList): void {
+  dispatch({ kind: "stations-listed", list });
+  isStationPanelOpen.value = true;
 }
 
 const remembered = () => state.value.history.present.remembered;
@@ -105,6 +111,7 @@ async function readOne(request: ReadRequest): Promise<ReadFile | null> {
       answers: answers ?? { columns: [] },
       areAnswersRemembered: false,
       headerKey: null,
+      stations: null,
     };
   }
 }

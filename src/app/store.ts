@@ -36,6 +36,9 @@ export const plumbDepthM = signal<number | null>(null);
 /** The file whose reading is shown, null where none is. */
 export const openReading = signal<string | null>(null);
 
+/** Whether the stations of the list are shown against those of the casts. */
+export const isStationPanelOpen = signal(false);
+
 /** Why there are no results for the last change; empty while solving works. */
 export const solvingTrouble = signal("");
 

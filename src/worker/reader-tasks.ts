@@ -1,8 +1,14 @@
 import { type Remote, transfer, wrap } from "comlink";
 import type { Outcome } from "../base/index.ts";
-import { type AnyFileReading, type ReadingAnswers, readFile } from "../cast/index.ts";
+import {
+  type AnyFileReading,
+  headerKey,
+  type ReadingAnswers,
+  readFile,
+  readStationList,
+  type StationList,
+} from "../cast/index.ts";
 import { buffersOf } from "./buffers.ts";
-import { headerKey } from "./header-key.ts";
 import type { SolverTasks } from "./solver-tasks.ts";
 
 /** Answers by the header of the files they are for. */
@@ -23,6 +29,8 @@ export interface ReadAnswer {
   readonly answers: ReadingAnswers;
   readonly areAnswersRemembered: boolean;
   readonly headerKey: string | null;
+  /** Set where the file is no file of casts but a list of stations. */
+  readonly stations: StationList | null;
   /** Under which the solving thread has the samples of each cast. */
   readonly samplesKeys: readonly string[];
 }
@@ -47,12 +55,13 @@ export const readerTasks = {
 
     let answers = request.answers ?? NO_ANSWERS;
     let outcome = await attempt(answers);
-    const key = outcome.ok ? headerKey(outcome.value.headers) : null;
+    const key = outcome.ok ? headerKey(outcome.value) : null;
     const earlier = key === null || request.answers ? undefined : remembered[key];
     if (earlier) {
       answers = earlier;
       outcome = await attempt(answers);
     }
+    const list = outcome.ok ? null : readStationList(file.name, bytes);
     const samplesKeys = outcome.ok ? await handToSolver(outcome.value) : [];
     const answer = {
       outcome,
@@ -60,6 +69,7 @@ export const readerTasks = {
       answers,
       areAnswersRemembered: earlier !== undefined,
       headerKey: key,
+      stations: list?.ok ? list.value : null,
       samplesKeys,
     };
     return transfer(answer, [...buffersOf(outcome.ok ? outcome.value.casts.map((cast) => cast.samples) : [])]);

@@ -1,5 +1,6 @@
 import { useSignal } from "@preact/signals";
-import { dispatch, progress, savingTrouble, solved, solvingTrouble, survey } from "../store.ts";
+import { readingsOf } from "../state/app-state.ts";
+import { dispatch, progress, savingTrouble, solved, solvingTrouble, state, survey } from "../store.ts";
 import { useFileDrop } from "../use-file-drop.ts";
 import { useUndoKeys } from "../use-undo-keys.ts";
 import { BasisPanel } from "./basis-panel.tsx";
@@ -11,8 +12,12 @@ import { FileTroubles } from "./file-troubles.tsx";
 import { Header } from "./header.tsx";
 import { LevelsTable } from "./levels-table.tsx";
 import { NumbersTable } from "./numbers-table.tsx";
+import { PreparationRows } from "./preparation-rows.tsx";
 import { ProfileCharts } from "./profile-charts.tsx";
+import { ReadingJobs } from "./reading-jobs.tsx";
+import { ReadingPanel } from "./reading-panel.tsx";
 import { Readout } from "./readout.tsx";
+import { StationPanel } from "./station-panel.tsx";
 
 export function App() {
   const isBasisOpen = useSignal(false);
@@ -23,19 +28,25 @@ export function App() {
       <Header isBasisOpen={isBasisOpen} />
       <CastList />
       <main>
+        <ReadingJobs />
         <FileTroubles />
+        <ReadingPanel />
+        <StationPanel />
         <Notes />
         <Progress />
-        {survey.value.casts.length === 0 ? <EmptyState /> : <ColumnPlace />}
+        {isEmpty() ? <EmptyState /> : <ColumnPlace />}
       </main>
       <aside id="basis" class={isBasisOpen.value ? "open" : ""} aria-label="Basis and summary">
         <BasisPanel />
+        <PreparationRows />
         <CastSummary />
         <CastDetails />
       </aside>
     </div>
   );
 }
+
+const isEmpty = (): boolean => survey.value.casts.length === 0 && readingsOf(state.value).length === 0;
 
 function ColumnPlace() {
   if (solved.value.casts.length === 0) return null;

@@ -1,6 +1,7 @@
 import { type KeptReading, readingsOf } from "../state/app-state.ts";
-import { castInHand, state } from "../store.ts";
+import { castInHand, openReading, state } from "../store.ts";
 import { IssueList } from "./issue-list.tsx";
+import { MarkedList } from "./marked-list.tsx";
 
 /** What was met on the way to the cast in hand, and how its file was understood: every decision can be checked. */
 export function CastDetails() {
@@ -18,42 +19,25 @@ export function CastDetails() {
           <IssueList issues={issues} />
         </details>
       ) : null}
-      {reading ? (
-        <details>
-          <summary>How the file was read</summary>
-          <HowRead reading={reading} />
-        </details>
-      ) : null}
+      <MarkedList marked={inHand.marked} />
+      {reading ? <HowReadButton reading={reading} /> : null}
     </section>
   );
 }
 
-function HowRead({ reading }: { readonly reading: KeptReading }) {
-  const mark = reading.decimalMark === "." ? "period" : "comma";
+function HowReadButton({ reading: { fileName } }: { readonly reading: KeptReading }) {
+  const isOpen = openReading.value === fileName;
   return (
-    <div class="how-read">
-      <p>
-        <b>{reading.fileName}</b>: {reading.encoding}, columns separated by {reading.delimiter}, decimal {mark}, names
-        in line {reading.headerLineIndex}, {reading.rowCount} rows. Casts told apart by {reading.splitBy}.
-      </p>
-      <dl>
-        {reading.columns.map((column) => (
-          <div key={column.columnIndex}>
-            <dt>
-              <b>{column.header || `column ${column.columnIndex + 1}`}</b> {column.role ? "→ " : ""}
-              {column.role ? inWords(column.role) : ""}
-              {column.unit && column.unit !== "1" ? `, ${column.unit}` : ""}
-            </dt>
-            <dd>
-              {column.confidence === "sure" ? "" : <b class="warn">{column.confidence} </b>}
-              {column.reason}
-            </dd>
-          </div>
-        ))}
-      </dl>
-    </div>
+    <p class="how-read">
+      <button
+        type="button"
+        aria-expanded={isOpen}
+        onClick={() => {
+          openReading.value = isOpen ? null : fileName;
+        }}
+      >
+        How the file was read
+      </button>
+    </p>
   );
 }
-
-/** @example inWords("specificConductance") // "specific conductance" */
-const inWords = (role: string): string => role.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);

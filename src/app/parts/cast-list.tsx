@@ -3,7 +3,8 @@ import { thumbnailPath } from "../../charts/layout/index.ts";
 import type { AnsweredCast } from "../../worker/index.ts";
 import { densityRange } from "../show/density-range.ts";
 import { shownValue } from "../show/shown.ts";
-import { dispatch, solved, state } from "../store.ts";
+import { readingsOf } from "../state/app-state.ts";
+import { dispatch, isStationPanelOpen, openReading, solved, state } from "../store.ts";
 
 const range = computed(() => densityRange(solved.value.casts));
 
@@ -21,6 +22,8 @@ export function CastList() {
           </button>
         ) : null}
       </div>
+      <StationsButton />
+      <WaitingFiles />
       <ul>
         {casts.map((entry) => (
           <CastEntry key={entry.cast.id} entry={entry} />
@@ -56,7 +59,9 @@ function CastEntry({ entry }: { readonly entry: AnsweredCast }) {
       >
         <span class="name">{cast.name}</span>
         <span class="about">{aboutCast(entry)}</span>
+        <MarkedCounts marked={entry.marked} />
         <IssueCount entry={entry} />
+        {isWaiting(cast.fileName) ? <span class="about warn">needs your answer</span> : null}
       </button>
       <Thumbnail entry={entry} />
       <button
@@ -70,6 +75,53 @@ function CastEntry({ entry }: { readonly entry: AnsweredCast }) {
       </button>
     </li>
   );
+}
+
+/** Files that cannot be used as they stand: a question is open, or the answers leave no casts. */
+function WaitingFiles() {
+  const waiting = readingsOf(state.value).filter(({ questions, refusal }) => questions.length + refusal.length > 0);
+  return waiting.map(({ fileName, refusal }) => (
+    <button
+      key={fileName}
+      type="button"
+      class="waiting"
+      onClick={() => {
+        openReading.value = fileName;
+      }}
+    >
+      <b>{fileName}</b> <span class="warn">{refusal.length > 0 ? "gives no casts" : "needs your answer"}</span>
+    </button>
+  ));
+}
+
+function StationsButton() {
+  const { stations } = state.value.history.present;
+  if (!stations) return null;
+  const missingCount = stations.matches.filter(({ listStation }) => listStation === null).length;
+  return (
+    <button
+      type="button"
+      class="waiting"
+      aria-expanded={isStationPanelOpen.value}
+      onClick={() => {
+        isStationPanelOpen.value = !isStationPanelOpen.value;
+      }}
+    >
+      Stations of {stations.list.fileName}
+      {missingCount > 0 ? <span class="warn"> {missingCount} without match</span> : null}
+    </button>
+  );
+}
+
+const isWaiting = (fileName: string): boolean =>
+  readingsOf(state.value).some((reading) => reading.fileName === fileName && reading.questions.length > 0);
+
+function MarkedCounts({ marked: { flaggedCount, leftOutCount } }: Pick<AnsweredCast, "marked">) {
+  const said = [
+    ...(flaggedCount > 0 ? [`${flaggedCount} flagged`] : []),
+    ...(leftOutCount > 0 ? [`${leftOutCount} left out`] : []),
+  ];
+  return said.length > 0 ? <span class="about warn">{said.join(", ")}</span> : null;
 }
 
 function aboutCast({ cast, solution }: AnsweredCast): string {

@@ -1,5 +1,5 @@
 import type { Issue } from "../../base/index.ts";
-import type { AnyFileReading, CastId, ReadingAnswers } from "../../cast/index.ts";
+import type { AnyFileReading, Cast, CastId, ReadingAnswers, StationList, StationMatch } from "../../cast/index.ts";
 import { emptySurvey, type History, type Survey, startHistory } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
 import type { RememberedAnswers } from "../../worker/index.ts";
@@ -25,14 +25,28 @@ export interface FileTrouble {
   readonly issues: readonly Issue[];
 }
 
+export type Place = Pick<Cast, "latitudeDeg" | "longitudeDeg" | "distanceKm" | "waterDepthM">;
+
+/** A list of stations that the casts take their places from. */
+export interface KeptStations {
+  readonly list: StationList;
+  /** What the user has said: by station of the casts, the station of the list, or null for none. */
+  readonly corrections: Readonly<Record<string, string | null>>;
+  /** One a station of the casts. */
+  readonly matches: readonly StationMatch[];
+  /** The places that casts had before, by cast, where the list has given them others. */
+  readonly placesAsRead: Readonly<Record<string, Place>>;
+}
+
 /** What can be undone: the survey, and what was said on the way from files to its casts. */
 export interface Work {
   readonly survey: Survey;
   readonly readings: readonly KeptReading[];
   readonly remembered: RememberedAnswers;
+  readonly stations: KeptStations | null;
 }
 
-export const emptyWork: Work = { survey: emptySurvey, readings: [], remembered: {} };
+export const emptyWork: Work = { survey: emptySurvey, readings: [], remembered: {}, stations: null };
 
 /** All that the page knows and keeps; results follow from it. */
 export interface AppState {

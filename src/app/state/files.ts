@@ -1,5 +1,5 @@
 import type { Outcome } from "../../base/index.ts";
-import type { AnyFileReading, Cast, ColumnAnswer, ReadingAnswers } from "../../cast/index.ts";
+import type { AnyFileReading, Cast, ColumnAnswer, ReadingAnswers, StationList } from "../../cast/index.ts";
 import { addCasts, type Basis, type Survey } from "../../survey/index.ts";
 import type { FileTrouble, KeptReading, Work } from "./app-state.ts";
 
@@ -11,6 +11,8 @@ export interface ReadFile {
   readonly answers: ReadingAnswers;
   readonly areAnswersRemembered: boolean;
   readonly headerKey: string | null;
+  /** Set where the file is no file of casts but a list of stations. */
+  readonly stations: StationList | null;
 }
 
 /** What a survey that has no casts yet takes over with its first files. */

@@ -1,4 +1,4 @@
-import type { Cast, CastId } from "../../cast/index.ts";
+import type { Cast, CastId, StationList } from "../../cast/index.ts";
 import {
   addFlagEdits,
   type Basis,
@@ -16,6 +16,7 @@ import type { DisplaySystem } from "../../units/index.ts";
 import { type AppState, emptyWork, surveyOf, type Work } from "./app-state.ts";
 import { type ReadFile, type SurveyStart, takeAgain, takeFiles, troublesOf } from "./files.ts";
 import { addLevel, changeLevel, removeLevel } from "./levels.ts";
+import { correctStation, dropStations, joinList, withStations } from "./stations.ts";
 
 export type Action =
   | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly start: SurveyStart }
@@ -38,6 +39,9 @@ export type Action =
       /** Null takes the user's flags back. */
       readonly flag: FlagEdit["flag"] | null;
     }
+  | { readonly kind: "stations-listed"; readonly list: StationList }
+  | { readonly kind: "station-corrected"; readonly castStation: string; readonly listStation: string | null }
+  | { readonly kind: "stations-dropped" }
   | { readonly kind: "system-chosen"; readonly system: DisplaySystem }
   | { readonly kind: "undone" }
   | { readonly kind: "redone" };
@@ -53,9 +57,12 @@ export function reduce(state: AppState, action: Action): AppState {
   const change = (next: Survey): AppState => changeWork(next === survey ? work : { ...work, survey: next });
   switch (action.kind) {
     case "files-read":
-      return { ...changeWork(takeFiles(work, action.files, action.start)), troubles: troublesOf(action.files) };
+      return {
+        ...changeWork(withStations(work, (plain) => takeFiles(plain, action.files, action.start))),
+        troubles: troublesOf(action.files),
+      };
     case "file-read-again":
-      return changeWork(remembering(takeAgain(work, action.file), action));
+      return changeWork(withStations(work, (plain) => remembering(takeAgain(plain, action.file), action)));
     case "troubles-dismissed":
       return { ...state, troubles: [] };
     case "survey-renamed":
@@ -82,6 +89,12 @@ export function reduce(state: AppState, action: Action): AppState {
       return change({ ...survey, preparation: { ...survey.preparation, ...action.change } });
     case "samples-flagged":
       return change(flagged(survey, action.ranges, action.flag));
+    case "stations-listed":
+      return changeWork(joinList(work, action.list));
+    case "station-corrected":
+      return changeWork(correctStation(work, action.castStation, action.listStation));
+    case "stations-dropped":
+      return changeWork(dropStations(work));
     case "system-chosen":
       return { ...state, system: action.system };
     case "undone":
