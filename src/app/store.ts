@@ -1,6 +1,7 @@
 import { computed, signal } from "@preact/signals";
 import { emptySurvey } from "../survey/index.ts";
 import type { AnsweredCast } from "../worker/index.ts";
+import type { DepthRange } from "./show/flag-selection.ts";
 import { initialState, surveyOf } from "./state/app-state.ts";
 import { type Action, reduce } from "./state/reduce.ts";
 import type { Solved } from "./state/solved-share.ts";
@@ -32,6 +33,12 @@ export const visibleCasts = computed((): readonly AnsweredCast[] => {
 
 /** Where the plumb line hangs, null where it is not out. */
 export const plumbDepthM = signal<number | null>(null);
+
+/** Whether dragging in the charts selects samples to be flagged. */
+export const isFlagging = signal(false);
+
+/** The range of depth that is selected, null where none is. */
+export const flagRange = signal<DepthRange | null>(null);
 
 /** The file whose reading is shown, null where none is. */
 export const openReading = signal<string | null>(null);

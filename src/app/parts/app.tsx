@@ -2,6 +2,7 @@ import { useSignal } from "@preact/signals";
 import { readingsOf } from "../state/app-state.ts";
 import { dispatch, progress, savingTrouble, solved, solvingTrouble, state, survey } from "../store.ts";
 import { useFileDrop } from "../use-file-drop.ts";
+import { useFlagKey } from "../use-flag-key.ts";
 import { useUndoKeys } from "../use-undo-keys.ts";
 import { BasisPanel } from "./basis-panel.tsx";
 import { CastDetails } from "./cast-details.tsx";
@@ -9,6 +10,7 @@ import { CastList } from "./cast-list.tsx";
 import { CastSummary } from "./cast-summary.tsx";
 import { EmptyState } from "./empty-state.tsx";
 import { FileTroubles } from "./file-troubles.tsx";
+import { FlagBar } from "./flag-bar.tsx";
 import { Header } from "./header.tsx";
 import { LevelsTable } from "./levels-table.tsx";
 import { NumbersTable } from "./numbers-table.tsx";
@@ -23,6 +25,7 @@ export function App() {
   const isBasisOpen = useSignal(false);
   const isDropping = useFileDrop();
   useUndoKeys();
+  useFlagKey();
   return (
     <div class={`page${isDropping.value ? " dropping" : ""}`}>
       <Header isBasisOpen={isBasisOpen} />
@@ -52,9 +55,10 @@ function ColumnPlace() {
   if (solved.value.casts.length === 0) return null;
   return (
     <>
-      <h2 class="place">
-        <span>Column</span>
-      </h2>
+      <div class="place">
+        <h2>Column</h2>
+        <FlagBar />
+      </div>
       <ProfileCharts />
       <Readout />
       <LevelsTable />

@@ -1,12 +1,31 @@
 import { type ReadonlySignal, useComputed, useSignalEffect } from "@preact/signals";
 import type { RefObject } from "preact";
 import { useRef } from "preact/hooks";
-import { drawLevels, drawPlumb, drawSheet } from "../../charts/draw/index.ts";
-import { depthAtPx, layOutLevels, layOutPlumb, layOutSheet, type SheetLayout } from "../../charts/layout/index.ts";
+import { drawLevels, drawMarks, drawPlumb, drawSelection, drawSheet } from "../../charts/draw/index.ts";
+import {
+  depthAtPx,
+  depthPx,
+  layOutLevels,
+  layOutMarks,
+  layOutPlumb,
+  layOutSheet,
+  type SheetLayout,
+} from "../../charts/layout/index.ts";
 import { inMetres, inShownDepth, steppedDepthM, tidyDepthM } from "../show/plumb-steps.ts";
 import { levelInputs, plumbValues, profileSheet, type SheetSource } from "../show/profile-sheet.ts";
+import { sampleMarks } from "../show/sample-marks.ts";
 import { shownValue } from "../show/shown.ts";
-import { castInHand, dispatch, plumbDepthM, solved, state, survey, visibleCasts } from "../store.ts";
+import {
+  castInHand,
+  dispatch,
+  flagRange,
+  isFlagging,
+  plumbDepthM,
+  solved,
+  state,
+  survey,
+  visibleCasts,
+} from "../store.ts";
 import { type Drag, useChartPointer } from "../use-chart-pointer.ts";
 import { useElementSize } from "../use-element-size.ts";
 
@@ -27,6 +46,8 @@ export function ProfileCharts() {
   useSignalEffect(() => {
     if (sheet.value) drawSheet(curves.current!, sheet.value);
   });
+  useMarks(curves, sheet);
+  useSelection(curves, sheet);
   useLevels(overlay, sheet, drag);
   usePlumb(overlay, sheet, source);
 
@@ -34,7 +55,10 @@ export function ProfileCharts() {
   const deepestM = sheet.value ? inMetres(sheet.value.depth.bottom, system) : 0;
   const onKeyDown = (event: KeyboardEvent): void => {
     const next = steppedDepthM(event.key, { depthM, deepestM }, system);
-    if (next !== null) plumbDepthM.value = next;
+    if (next !== null) {
+      if (event.shiftKey) extendFlagRange(depthM, next);
+      plumbDepthM.value = next;
+    } else if (event.key === "Escape" && flagRange.value) flagRange.value = null;
     else if (event.key === "Escape") plumbDepthM.value = null;
     else if (event.key === "Enter" && plumbDepthM.value !== null) dispatch({ kind: "level-added", depthM });
     else return;
@@ -43,10 +67,10 @@ export function ProfileCharts() {
   return (
     <div
       ref={frame}
-      class={`charts${drag.value ? " dragging" : ""}`}
+      class={`charts${drag.value ? " dragging" : ""}${isFlagging.value ? " flagging" : ""}`}
       role="slider"
       tabIndex={0}
-      aria-label={`Plumb line through the profiles of ${castInHand.value?.cast.name ?? "no cast"}; Enter drops a level`}
+      aria-label={`Plumb line through the profiles of ${castInHand.value?.cast.name ?? "no cast"}; Enter drops a level, Shift with arrows selects samples to flag`}
       aria-orientation="vertical"
       aria-valuemin={0}
       aria-valuemax={Number(deepestM.toFixed(2))}
@@ -67,7 +91,44 @@ function sheetSource(): SheetSource {
   return { solved: visibleCasts.value, castInHandId, colourIndexOf, basis, levels, system };
 }
 
+/** From where the plumb line hung when Shift was first held. */
+function extendFlagRange(fromM: number, toM: number): void {
+  isFlagging.value = true;
+  flagRange.value = { fromM: flagRange.value?.fromM ?? fromM, toM };
+}
+
 type SheetSignal = ReadonlySignal<SheetLayout | null>;
+
+/** Draws the flagged samples of the cast in hand, where it is shown. */
+function useMarks(curves: RefObject<SVGSVGElement>, sheet: SheetSignal): void {
+  const marks = useComputed(() => {
+    const inHand = visibleCasts.value.find(({ cast }) => cast.id === state.value.castInHandId);
+    return inHand ? sampleMarks(inHand, state.value.system) : [];
+  });
+  useSignalEffect(() => {
+    if (!sheet.value) return;
+    const { castInHandId, colourIndexOf } = state.value;
+    drawMarks(
+      curves.current!,
+      sheet.value,
+      layOutMarks(sheet.value, marks.value),
+      colourIndexOf[castInHandId ?? ""] ?? 0,
+    );
+  });
+}
+
+/** Shades the range of depth that is selected for flagging. */
+function useSelection(curves: RefObject<SVGSVGElement>, sheet: SheetSignal): void {
+  useSignalEffect(() => {
+    if (!sheet.value) return;
+    const { depth } = sheet.value;
+    const { fromM, toM } = flagRange.value ?? { fromM: Number.NaN, toM: Number.NaN };
+    const [topPx, bottomPx] = [Math.min(fromM, toM), Math.max(fromM, toM)].map((depthM) =>
+      depthPx(depth, inShownDepth(depthM, state.value.system)),
+    ) as [number, number];
+    drawSelection(curves.current!, sheet.value, flagRange.value ? { topPx, bottomPx } : null);
+  });
+}
 
 /** Draws the levels, the dragged one where the pointer has it. */
 function useLevels(overlay: RefObject<SVGSVGElement>, sheet: SheetSignal, drag: ReadonlySignal<Drag | null>): void {

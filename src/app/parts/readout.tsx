@@ -1,7 +1,8 @@
 import { useEffect, useState } from "preact/hooks";
-import type { SolvedCast } from "../../survey/index.ts";
 import { describeAtDepths } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
+import type { AnsweredCast } from "../../worker/index.ts";
+import { reasonsNear } from "../show/sample-marks.ts";
 import { scientific, shownPercent, shownValue } from "../show/shown.ts";
 import { BEHIND_NOTE, behindDepth, buoyancyAround } from "../show/water-at.ts";
 import { castInHand, plumbDepthM, state } from "../store.ts";
@@ -9,10 +10,15 @@ import { castInHand, plumbDepthM, state } from "../store.ts";
 /** A screen reader hears the values once the plumb line rests, not at every step. */
 const QUIET_MS = 700;
 
+/** So near to a flagged sample, against the depth of the water, the plumb line tells why it is flagged. */
+const REACH_FRAC = 0.006;
+
 interface Reading {
   readonly name: string;
   readonly depth: string;
   readonly note: string;
+  /** Why the sample here is flagged. */
+  readonly flagged: string;
   readonly values: readonly (readonly [quantity: string, value: string])[];
 }
 
@@ -31,12 +37,15 @@ export function Readout() {
         <b>{reading.name}</b> at <b>{reading.depth}</b>
         {reading.note ? <span class="warn"> {reading.note}</span> : null}
       </span>
+      {reading.flagged ? <span class="warn flagged">{reading.flagged}</span> : null}
       {reading.values.map(([quantity, value]) => (
         <span key={quantity}>
           {quantity} <b>{value}</b>
         </span>
       ))}
-      <Spoken text={`${reading.depth} ${reading.note}: ${reading.values.map((pair) => pair.join(" ")).join(", ")}`} />
+      <Spoken
+        text={`${reading.depth} ${reading.note} ${reading.flagged}: ${reading.values.map((pair) => pair.join(" ")).join(", ")}`}
+      />
     </div>
   );
 }
@@ -54,7 +63,7 @@ function Spoken({ text }: { readonly text: string }) {
   );
 }
 
-function readingAt(inHand: SolvedCast | null, depthM: number | null, system: DisplaySystem): Reading | null {
+function readingAt(inHand: AnsweredCast | null, depthM: number | null, system: DisplaySystem): Reading | null {
   if (!inHand?.solution || depthM === null) return null;
   const { column, profile } = inHand.solution;
   const at = describeAtDepths(column, [depthM]);
@@ -63,6 +72,7 @@ function readingAt(inHand: SolvedCast | null, depthM: number | null, system: Dis
     name: inHand.cast.name,
     depth: shownValue(depthM, "depth", system),
     note: BEHIND_NOTE[behindDepth(column, depthM)],
+    flagged: reasonsNear(inHand, depthM, column.bottomDepthM * REACH_FRAC),
     values: [
       ["temperature", shownValue(at.inSituTempC[0]!, "temperature", system)],
       ["salinity", shownValue(at.practicalSalinity[0]!, "practicalSalinity", system)],

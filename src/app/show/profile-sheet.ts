@@ -1,5 +1,5 @@
 import type { CurveInput, LevelInput, PanelInput, PlumbValue, SheetInput } from "../../charts/layout/index.ts";
-import { type Basis, describeAtDepths, type Level } from "../../survey/index.ts";
+import { type Basis, describeAtDepths, type Level, type Solution } from "../../survey/index.ts";
 import { convert, convertArray, type DisplaySystem, displayUnit } from "../../units/index.ts";
 import type { AnsweredCast, DrawnProfile } from "../../worker/index.ts";
 import { ownUnit, type PageQuantity, shownValue, unitLabel } from "./shown.ts";
@@ -81,7 +81,7 @@ function referenceName({ referenceDensity }: Basis, system: DisplaySystem): stri
 const inShownUnit = (values: Float64Array, quantity: PageQuantity, system: DisplaySystem): Float64Array =>
   convertArray(values, ownUnit(quantity), displayUnit(quantity, system).unit);
 
-const inShownUnitOne = (value: number, quantity: PageQuantity, system: DisplaySystem): number =>
+export const inShownUnitOne = (value: number, quantity: PageQuantity, system: DisplaySystem): number =>
   convert(value, ownUnit(quantity), displayUnit(quantity, system).unit);
 
 export interface SheetSource {
@@ -146,19 +146,33 @@ function gapsOf(inHand: AnsweredCast | undefined): readonly (readonly [number, n
   return gaps.filter(([from, to]) => to > from);
 }
 
+/** What the panels show of a column at some depths, by the index of a depth. */
+export function columnValuesAt(
+  { column, profile }: Solution,
+  depthsM: readonly number[],
+  system: DisplaySystem,
+): (index: number) => Readonly<Record<string, number>> {
+  const at = describeAtDepths(column, depthsM);
+  return (index) =>
+    Object.fromEntries(
+      PANELS.map((panel) => [
+        panel.id,
+        panel.id === "buoyancy"
+          ? buoyancyAround(profile, depthsM[index]!)
+          : inShownUnitOne(panel.values(at)[index]!, panel.quantity, system),
+      ]),
+    );
+}
+
 /** Every drawn cast at one depth, for the dots on the plumb line; casts that end above it have none. */
 export function plumbValues(source: SheetSource, depthM: number): readonly PlumbValue[] {
   return source.solved.flatMap(({ cast, solution }): PlumbValue[] => {
     if (!solution || depthM > solution.column.bottomDepthM) return [];
-    const at = describeAtDepths(solution.column, [depthM]);
-    const buoyancy = buoyancyAround(solution.profile, depthM);
-    const shownIn = (panel: PanelKind): number =>
-      panel.id === "buoyancy" ? buoyancy : inShownUnitOne(panel.values(at)[0]!, panel.quantity, source.system);
     return [
       {
         colourIndex: source.colourIndexOf[cast.id] ?? 0,
         isInHand: cast.id === source.castInHandId,
-        values: Object.fromEntries(PANELS.map((panel) => [panel.id, shownIn(panel)])),
+        values: columnValuesAt(solution, [depthM], source.system)(0),
       },
     ];
   });

@@ -1,5 +1,6 @@
-export { depthAtPx } from "./depth-axis.ts";
+export { depthAtPx, depthPx } from "./depth-axis.ts";
 export { layOutLevels } from "./lay-out-levels.ts";
+export { layOutMarks, type MarkInput, type MarksLayout } from "./lay-out-marks.ts";
 export { layOutPlumb, type PlumbLayout, type PlumbValue } from "./lay-out-plumb.ts";
 export { layOutSheet } from "./lay-out-sheet.ts";
 export { powerOfTen } from "./power-of-ten.ts";
