@@ -119,8 +119,8 @@ export class CellReader {
     if (foundTexts.length > 0) {
       this.#note("sentinel", `${words}: ${kindsOf(foundTexts)} is read as not measured, in ${rowCount(foundTexts)}`);
     }
-    if (keptTexts.length > 0) {
-      const why = "near the rest of its column; if it means not measured, leave it blank";
+    if (keptTexts.length > 0 && !isPlace(role)) {
+      const why = "as it fits the rest of its column; if it means not measured, leave it blank";
       this.#note(
         "sentinel-kept",
         `${words}: ${kindsOf(keptTexts)} in ${rowCount(keptTexts)} is read as measured, ${why}`,

@@ -3,10 +3,10 @@ import { min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
 import type { Question } from "../reading.ts";
 import { answerName } from "./answers.ts";
-import { choose, questionOf } from "./ask.ts";
+import { choose, chooseForm, type Doubt, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
 import type { Row } from "./parse-table.ts";
-import type { RecognisedColumns } from "./recognise-columns.ts";
+import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
 import type { Table } from "./table.ts";
 import { isWeightOfAir } from "./vertical.ts";
 
@@ -57,33 +57,47 @@ export function withoutShiftedRows(table: Table): Table {
   return { ...table, rows: table.rows.filter((row) => !isShort(table, row)) };
 }
 
-function upsideDownIssue(rows: MeasuredRows): Issue | null {
+/** A column in use, as a question names it. */
+function asked(table: Table, { columnIndex }: UsedColumn, doubtOf: (name: string) => Doubt): Question {
+  const name = answerName(table.header.cells, columnIndex);
+  return questionOf(columnIndex, name, doubtOf(name));
+}
+
+/** Depths that are mostly negative count upwards, or have a wrong sign. */
+function upsideDown(table: Table, columns: RecognisedColumns, rows: MeasuredRows): Question | null {
+  const column = columns.used.depth;
   const depths = [...(rows.depthM ?? [])].filter((depth) => !Number.isNaN(depth));
   const negativeCount = depths.filter((depth) => depth < 0).length;
-  if (negativeCount <= depths.length / 2) return null;
-  const message = `depth is negative in ${negativeCount} of ${depths.length} rows, down to ${min(depths)} m; depth counts positive down: change the sign, or say that the column counts upward`;
-  return { severity: "error", code: "depth-upside-down", message };
+  if (!column || negativeCount <= depths.length / 2) return null;
+  const unit = column.unit ?? "m";
+  return asked(table, column, (name) => ({
+    code: "depth-upside-down",
+    message: `depth is negative in ${negativeCount} of ${depths.length} rows, down to ${min(depths)} m; depth counts positive down: change the sign, or say that the column counts upward`,
+    choices: [chooseForm(name, "depth", `${unit} upward`, `depth in ${unit}, counted upward: its sign is changed`)],
+  }));
 }
 
 /** Pressure that starts at the weight of the air, without saying whether the air is in it. */
-export function airInPressure(table: Table, columns: RecognisedColumns, rows: MeasuredRows): Question | null {
+function airInPressure(table: Table, columns: RecognisedColumns, rows: MeasuredRows): Question | null {
   const column = columns.used.seaPressure;
   const pressures = [...(rows.seaPressureDbar ?? [])].filter((pressure) => !Number.isNaN(pressure));
-  if (!column || rows.isGaugePressure || pressures.length === 0) return null;
+  if (!column || rows.depthM !== null || rows.isGaugePressure || pressures.length === 0) return null;
   const least = min(pressures);
   if (!isWeightOfAir(least)) return null;
-  const { columnIndex, unit } = column;
-  const name = answerName(table.header.cells, columnIndex);
-  const header = table.header.cells[columnIndex]!;
-  return questionOf(columnIndex, name, {
+  const header = table.header.cells[column.columnIndex]!;
+  return asked(table, column, (name) => ({
     code: "pressure-may-be-absolute",
     message: `"${header}" starts at ${least.toFixed(2)} dbar, about the weight of the air; expected 0 at the surface; say whether it is gauge or absolute`,
     choices: [
-      choose(name, "absolutePressure", unit, `absolute: it holds the weight of the air`),
-      choose(name, "seaPressure", unit, `gauge: the first sample lies ${least.toFixed(1)} dbar deep`),
+      choose(name, "absolutePressure", column.unit, "absolute: it holds the weight of the air"),
+      choose(name, "seaPressure", column.unit, `gauge: the first sample lies ${least.toFixed(1)} dbar deep`),
     ],
-  });
+  }));
 }
+
+/** What the values of the vertical put in doubt, so that no cast can be made of them yet. */
+export const askAboutVertical = (table: Table, columns: RecognisedColumns, rows: MeasuredRows): Question | null =>
+  upsideDown(table, columns, rows) ?? airInPressure(table, columns, rows);
 
 function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDeg: number): Issue | null {
   const found = degrees?.find((value) => Math.abs(value) > largestDeg);
@@ -96,10 +110,9 @@ function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDe
 export const rowLengthIssues = (table: Table): readonly Issue[] =>
   [widthIssue(table), shortIssue(table)].filter((issue) => issue !== null);
 
-/** What the values say, taken together; only an error keeps them from being used. */
+/** What the values say, taken together. */
 export function checkRows(rows: MeasuredRows): readonly Issue[] {
   const issues = [
-    upsideDownIssue(rows),
     offTheEarthIssue("latitude", rows.latitudeDeg, 90),
     offTheEarthIssue("longitude", rows.longitudeDeg, 180),
   ];

@@ -93,13 +93,17 @@ function withHeaderUncommented(lines: readonly string[]): readonly string[] {
   return lines.map((line, i) => (i === last ? withoutCommentSign(line) : line));
 }
 
+/** A pure number as a unit: practical salinity has it in the CF conventions. */
+const PURE_NUMBER = /^(1|1e-0?3|0\.001)$/i;
+
 /** One text a column when the row below the header is a row of units, else null. */
 function unitsIn(header: readonly string[], below: Row | undefined): readonly string[] | null {
-  if (below === undefined || below.cells.some(looksNumeric)) return null;
+  if (below === undefined || below.cells.some((cell) => looksNumeric(cell) && !PURE_NUMBER.test(cell))) return null;
   const texts = header.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
   const isUnits = header.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
-    return role !== undefined && isMeasured(role) && unitByName(texts[i]!, MEASURED[role].kind) !== null;
+    const isWord = role !== undefined && !PURE_NUMBER.test(texts[i]!);
+    return isWord && isMeasured(role) && unitByName(texts[i]!, MEASURED[role].kind) !== null;
   });
   return isUnits ? texts : null;
 }

@@ -2,6 +2,7 @@
 import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
 import type { FileReading, ReadingAnswers } from "../reading.ts";
 import { type DecodedText, decodeText } from "./decode-text.ts";
+import { exchangeTable } from "./exchange-csv.ts";
 import { unreadFormat } from "./file-format.ts";
 import { findTable } from "./find-header.ts";
 import { readTable } from "./read-table.ts";
@@ -28,7 +29,7 @@ function readText(bytes: Uint8Array): Outcome<DecodedText> {
 export function readCastFile(fileName: string, bytes: Uint8Array, answers?: ReadingAnswers): Outcome<FileReading> {
   const decoded = readText(bytes);
   if (!decoded.ok) return decoded;
-  const table = findTable(decoded.value.text);
+  const table = exchangeTable(decoded.value.text) ?? findTable(decoded.value.text);
   if (table === null) {
     const message = 'no table in the file; expected a row of headers such as "Depth (m)" above rows of numbers';
     return failed(error("no-table", message));

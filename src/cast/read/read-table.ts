@@ -4,7 +4,7 @@ import type { Cast } from "../cast.ts";
 import type { ColumnReading, FileReading, Question, ReadingAnswers } from "../reading.ts";
 import { buildCast, named } from "./build-cast.ts";
 import { checkColumns } from "./check-columns.ts";
-import { airInPressure, checkRows, rowLengthIssues, withoutShiftedRows } from "./check-rows.ts";
+import { askAboutVertical, checkRows, rowLengthIssues, withoutShiftedRows } from "./check-rows.ts";
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
@@ -116,30 +116,34 @@ export function readTable(
 /** The rows of a table whose columns are known. */
 function withCasts(reading: FileReading, table: Table, columns: RecognisedColumns): Outcome<FileReading> {
   const rows = readMeasuredRows(table, columns);
-  const rowIssues = checkRows(rows);
-  if (rowIssues.some((issue) => issue.severity === "error")) return failed(...rowIssues);
-  const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...rowIssues];
-  const asked = rows.depthM === null ? airInPressure(table, columns, rows) : null;
+  const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...checkRows(rows)];
+  const asked = askAboutVertical(table, columns, rows);
   if (asked !== null) return succeeded(waitingFor(asked, { ...reading, issues: [...issues, asIssue(asked)] }));
   const { groups, splitBy } = splitCasts(rows);
   const sorted = withTwoSamples(castsOf(rows, groups, reading.fileName));
   if (!sorted.ok) return sorted;
   const { casts, issues: castIssues } = sorted.value;
-  return succeeded({ ...reading, splitBy, casts, issues: [...issues, ...castIssues] });
+  const seen = rows.isAbsolute ? reading.columns.map(knownAbsolute) : reading.columns;
+  return succeeded({ ...reading, columns: seen, splitBy, casts, issues: [...issues, ...castIssues] });
 }
+
+/** A column of pressure whose values have shown that the air is in it. */
+const knownAbsolute = (column: ColumnReading): ColumnReading =>
+  column.role === "seaPressure"
+    ? {
+        ...column,
+        role: "absolutePressure",
+        confidence: "likely",
+        reason: "Named as pressure; its first readings show the air.",
+      }
+    : column;
 
 /** A column that its values have put in doubt. */
 function waitingFor(question: Question, reading: FileReading): FileReading {
   const columns = reading.columns.map(
     (column): ColumnReading =>
       column.columnIndex === question.columnIndex
-        ? {
-            ...column,
-            role: null,
-            unit: null,
-            confidence: "doubtful",
-            reason: "Not used: gauge or absolute is not told.",
-          }
+        ? { ...column, role: null, unit: null, confidence: "doubtful", reason: `Not used: ${question.message}.` }
         : column,
   );
   return { ...reading, columns, questions: [...reading.questions, question] };

@@ -10,6 +10,7 @@ import { type Decision, doubt, leave, type UsedColumn } from "./decision.ts";
 import { tableMark } from "./number-style.ts";
 import type { DecimalMark } from "./parse-number.ts";
 import { type FlagColumn, flagColumnOf } from "./quality-flags.ts";
+import { ROLE_WORDS } from "./roles.ts";
 import type { Table } from "./table.ts";
 import { whyUnused } from "./why-unused.ts";
 
@@ -64,6 +65,25 @@ function isWorthAsking(question: Question, decisions: readonly Decision[]): bool
   const areAll = (of: readonly ColumnRole[]): boolean => roles.every((role) => of.includes(role));
   if (areAll(VERTICAL_ROLES)) return !usesAny(decisions, VERTICAL_ROLES);
   return !areAll(CONDUCTING_ROLES) || !usesAny(decisions, SALT_ROLES);
+}
+
+/** Two columns of one name that hold different values: only the user can say which it is. */
+function whichTwin(winner: Contender, contenders: readonly Contender[]): Decision | null {
+  const isTwin = ({ role, header, filled }: Contender): boolean =>
+    role === winner.role && header === winner.header && filled.length > 0;
+  const twins = winner.answer === null ? contenders.filter(isTwin) : [];
+  const isSame = ({ filled }: Contender): boolean => filled.join("\n") === winner.filled.join("\n");
+  if (twins.length < 2 || twins.every(isSame)) return null;
+  const words = ROLE_WORDS[winner.role];
+  const why = `${twins.length} columns of this name hold different values`;
+  const unit = winner.written?.unit?.symbol ?? null;
+  return doubt(winner, why, {
+    code: "same-name-twice",
+    message: `"${winner.header}": ${why}; say which is ${words}`,
+    choices: twins.map(({ name, columnIndex }) =>
+      choose(name, winner.role, unit, `column ${columnIndex + 1} is ${words}`),
+    ),
+  });
 }
 
 /** Heights above a datum are depths only against the height of the water surface. */
@@ -121,7 +141,8 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
     }
     if (contender === null) return whyUnused(place, answerName(headers, columnIndex));
     const winner = winners.get(contender.role)!;
-    return winner === contender ? decide(contender, markOfTable) : passOver(contender, winner);
+    if (winner !== contender) return passOver(contender, winner);
+    return whichTwin(winner, contenders) ?? decide(contender, markOfTable);
   });
   const decisions = settled(first, headers);
   const used: Partial<Record<ColumnRole, UsedColumn>> = {};

@@ -50,11 +50,13 @@ const dayS = (date: string): number => (date === "" ? Number.NaN : Date.parse(da
 /** Beyond this no date is written, in milliseconds from 1970. */
 const LONGEST_MS = 6e13;
 
+/** Day numbers are cut to a few decimals: a time that is 13:46:00 must not come out as 13:45:59. */
+const ROUNDED_MS = 100;
+
 function countedMoment(text: string, count: DayCount): Moment | null {
   const ms = countedMs(text, count);
   if (!(Math.abs(ms) < LONGEST_MS)) return null;
-  // Day numbers resolve some ten microseconds: a time that is 13:46:00 must not come out as 13:45:59.
-  const iso = new Date(Math.round(ms)).toISOString();
+  const iso = new Date(Math.floor((ms + ROUNDED_MS) / 1000) * 1000).toISOString();
   return { date: iso.slice(0, 10), clock: iso.slice(11, 19), timeS: ms / 1000 };
 }
 

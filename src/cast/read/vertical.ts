@@ -9,6 +9,8 @@ export interface Vertical {
   readonly seaPressureDbar: Float64Array | null;
   /** Depth counts from the highest sample of each cast, wherever the rows of all casts begin. */
   readonly isFromHighest: boolean;
+  /** The weight of the air was in the pressure and has been taken off. */
+  readonly isAbsolute: boolean;
   readonly issues: readonly Issue[];
 }
 
@@ -39,9 +41,11 @@ export function deckReadingDbar(pressureDbar: Float64Array): number | null {
   return isLeast && isWeightOfAir(reading) ? reading : null;
 }
 
+type Pressure = Pick<Vertical, "seaPressureDbar" | "isAbsolute" | "issues">;
+
 const warned = (code: string, message: string): Issue => ({ severity: "warning", code, message });
 
-function seaPressureFrom(absoluteDbar: Float64Array): Pick<Vertical, "seaPressureDbar" | "issues"> {
+function withoutAir(absoluteDbar: Float64Array): Pressure {
   const deck = deckReadingDbar(absoluteDbar);
   const airDbar = deck ?? STANDARD_AIR_DBAR;
   const message =
@@ -50,15 +54,17 @@ function seaPressureFrom(absoluteDbar: Float64Array): Pick<Vertical, "seaPressur
       : `the first readings, ${airDbar.toFixed(3)} dbar, are taken for the weight of the air and off absolute pressure`;
   return {
     seaPressureDbar: absoluteDbar.map((value) => value - airDbar),
+    isAbsolute: true,
     issues: [warned(deck === null ? "standard-air-taken-off" : "deck-reading-taken-off", message)],
   };
 }
 
 /** A pressure column that does not say whether it is gauge, but shows the air in its first rows, is absolute. */
-function gaugeOrNot(pressureDbar: Float64Array): Pick<Vertical, "seaPressureDbar" | "issues"> {
-  return deckReadingDbar(pressureDbar) === null
-    ? { seaPressureDbar: pressureDbar, issues: [] }
-    : seaPressureFrom(pressureDbar);
+function readPressure(reader: CellReader, isGauge: boolean): Pressure {
+  const own = reader.numbers("seaPressure");
+  if (own !== null && !isGauge && deckReadingDbar(own) !== null) return withoutAir(own);
+  const absolute = own === null ? reader.numbers("absolutePressure") : null;
+  return absolute === null ? { seaPressureDbar: own, isAbsolute: false, issues: [] } : withoutAir(absolute);
 }
 
 function depthFrom(elevationM: Float64Array | null, surfaceM: Float64Array | null): Float64Array | null {
@@ -70,13 +76,7 @@ function depthFrom(elevationM: Float64Array | null, surfaceM: Float64Array | nul
 
 /** @param isGauge whether the column of sea pressure says that it is gauge pressure */
 export function readVertical(reader: CellReader, isGauge: boolean): Vertical {
-  const own = reader.numbers("seaPressure");
-  const absolute = own === null ? reader.numbers("absolutePressure") : null;
-  const pressure = absolute
-    ? seaPressureFrom(absolute)
-    : own && !isGauge
-      ? gaugeOrNot(own)
-      : { seaPressureDbar: own, issues: [] };
+  const pressure = readPressure(reader, isGauge);
   const depth = reader.numbers("depth");
   if (depth !== null || pressure.seaPressureDbar !== null) return { depthM: depth, ...pressure, isFromHighest: false };
   const surface = reader.numbers("surfaceElevation");

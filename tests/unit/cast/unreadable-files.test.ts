@@ -86,8 +86,13 @@ describe("one clear line for each", () => {
     ]);
   });
 
-  test("depth counted upwards", () => {
-    expect(messageOf("Depth (m),Temp (C)\n-1,10\n-2,10\n-3,10\n", "depth-upside-down")).toContain("change the sign");
+  test("depth counted upwards: a question, and the sign is changed when it is answered so", () => {
+    const text = "Depth (m),Temp (C)\n-1,10\n-2,9\n-3,8\n";
+    const question = questionOf(readText(text), "depth-upside-down");
+    expect(question.message).toContain("change the sign");
+    expect(readText(text).casts).toEqual([]);
+    const answered = readText(text, { columns: [question.choices[0]!.answer] });
+    expect([...answered.casts[0]!.samples.depthM!]).toEqual([1, 2, 3]);
   });
 
   test("decimal commas between delimiting commas", () => {
