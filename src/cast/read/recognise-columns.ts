@@ -141,8 +141,12 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
     }
     if (contender === null) return whyUnused(place, answerName(headers, columnIndex));
     const winner = winners.get(contender.role)!;
-    if (winner !== contender) return passOver(contender, winner);
-    return whichTwin(winner, contenders) ?? decide(contender, markOfTable);
+    const asked = whichTwin(winner, contenders);
+    if (winner === contender) return asked ?? decide(contender, markOfTable);
+    const isAsked = asked !== null && contender.header === winner.header;
+    return isAsked
+      ? leave(place, "which column of this name it is has to be said", "doubtful")
+      : passOver(contender, winner);
   });
   const decisions = settled(first, headers);
   const used: Partial<Record<ColumnRole, UsedColumn>> = {};
