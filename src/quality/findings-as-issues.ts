@@ -26,7 +26,7 @@ const WORDING: Readonly<Record<CheckName, Wording>> = {
   "depth-jump": { code: "depth-jump", severity: "warning", words: "have a depth that jumps away and back" },
   deck: { code: "deck", severity: "note", words: "were recorded at the surface or on deck" },
   soak: { code: "soak", severity: "note", words: "were recorded while the probe waited near the surface" },
-  "other-way": { code: "other-way", severity: "note", words: "belong to the way that is not used" },
+  "other-way": { code: "other-way", severity: "note", words: "were recorded on the other way" },
   "pressure-reversal": {
     code: "pressure-reversal",
     severity: "note",

@@ -15,7 +15,7 @@ import { depthBins } from "./preparing/depth-bins.ts";
 import { depthJumps } from "./preparing/depth-jump.ts";
 import { duplicates } from "./preparing/duplicates.ts";
 import { oneWay } from "./preparing/one-way.ts";
-import { isRawRecord } from "./preparing/raw-record.ts";
+import { goesBothWays, isRawRecord } from "./preparing/raw-record.ts";
 import { selectSamples } from "./preparing/select-samples.ts";
 import { QUALITY_FLAG, worstFlag } from "./quality-flag.ts";
 import { takesOut, verdictsOn } from "./verdicts.ts";
@@ -78,11 +78,9 @@ function placeInWay(
   const repeats = duplicates(evidence.samples, usable);
   const once = usable.filter(inNone(repeats));
   const { timeS } = evidence.samples;
-  const isRaw = isRawRecord(
-    once.map((i) => evidence.depthM[i]!),
-    timeS && once.map((i) => timeS[i]!),
-  );
-  if (way === "auto" && !isRaw) return { placing: repeats, isOneWay: false };
+  const depthsM = once.map((i) => evidence.depthM[i]!);
+  const isToBeCut = way === "auto" ? isRawRecord(depthsM, timeS && once.map((i) => timeS[i]!)) : goesBothWays(depthsM);
+  if (!isToBeCut) return { placing: repeats, isOneWay: false };
   const jumps = depthJumps(evidence, once);
   return { placing: [...repeats, ...jumps, ...oneWay(evidence, once.filter(inNone(jumps)), way)], isOneWay: true };
 }

@@ -15,7 +15,7 @@ const WIDE_GAP_FACTOR = 3;
 /** What sticks out by less, in degC or salinity, moves no pressure that anybody reads. */
 const LEAST_HEIGHT: InOwnUnit = 0.05;
 
-const SUSPECT_SCORE = 6;
+const SUSPECT_SCORE = 3;
 const FAIL_SCORE = 20;
 
 /** Spike value of the QARTOD manual: how far a value lies from the mean of its two neighbours. */

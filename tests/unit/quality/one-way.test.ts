@@ -76,6 +76,12 @@ describe("one way of a raw record", () => {
     expect(kept(WHOLE, { way: "all" })).toEqual(WHOLE.filter((z) => z >= 0));
   });
 
+  it("is not asked for where the samples run one way already", () => {
+    const upward = DOWN.toSorted((a, b) => b - a);
+    expect(kept(upward, { way: "down" })).toEqual(upward);
+    expect(kept(upward, { way: "up" })).toEqual(upward);
+  });
+
   it("does not take one wild depth for the bottom", () => {
     const wild = DOWN.with(3, 99);
     const { flag, reasons, cast } = preparedOf(recorded(wild));

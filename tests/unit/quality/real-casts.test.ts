@@ -27,9 +27,9 @@ it.each([
   ["usgs-sfbay-2017.csv", { pass: 789, suspect: 0, fail: 0, failing: [] }],
   ["usgs-sfbay-2020.csv", { pass: 519, suspect: 2, fail: 0, failing: [] }],
   ["usgs-sfbay-2022.csv", { pass: 731, suspect: 15, fail: 1, failing: [564] }],
-  ["usbr-ship-channel.csv", { pass: 529, suspect: 1, fail: 0, failing: [] }],
-  ["ntl-mendota.csv", { pass: 2116, suspect: 2, fail: 0, failing: [] }],
-  ["falling-creek-reservoir.csv", { pass: 3581, suspect: 58, fail: 0, failing: [] }],
+  ["usbr-ship-channel.csv", { pass: 528, suspect: 2, fail: 0, failing: [] }],
+  ["ntl-mendota.csv", { pass: 2115, suspect: 3, fail: 0, failing: [] }],
+  ["falling-creek-reservoir.csv", { pass: 3579, suspect: 60, fail: 0, failing: [] }],
 ])("real casts are not drowned in flags: %s", (fileName, expected) => {
   expect(flagged(fileName)).toEqual(expected);
 });
