@@ -121,7 +121,7 @@ test("the table of results is fresh", async () => {
   const table = [
     "# What is understood of the corpus",
     "",
-    "Written by `corpus.test.ts`, which fails when it is stale; `npx vitest run -u tests/corpus` writes it anew.",
+    "Written by `corpus.test.ts`, which fails when it is stale; `npx vitest run tests/corpus -u` writes it anew.",
     "Values are those named in `corpus.ts`, of the first sample and the last.",
     "",
     count,
