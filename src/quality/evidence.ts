@@ -2,13 +2,18 @@ import { type Cast, type Samples, sampleSalinity } from "../cast/index.ts";
 import { ownSalinity, ownTemperature, waterModel } from "../water/index.ts";
 import { type InOwnUnit, resolutionOf } from "./resolution.ts";
 
-/** A measured quantity that runs along a cast; the checks treat each the same way, by its own limits. */
-export interface Quantity {
-  readonly name: "temperature" | "salinity";
+/** A column of numbers as the probe recorded it. */
+export interface RecordedColumn {
+  readonly name: string;
   readonly values: Float64Array;
   /** The step in which it was recorded. */
   readonly resolution: InOwnUnit;
   readonly write: (value: InOwnUnit) => string;
+}
+
+/** A quantity of the water that runs along a cast; the checks treat each the same way, by its own limits. */
+export interface Quantity extends RecordedColumn {
+  readonly name: "temperature" | "salinity";
 }
 
 /** What the checks look at, one entry a sample as read. */
@@ -20,8 +25,10 @@ export interface Evidence {
   /** As measured or from the conductivity; what is assumed where neither was measured. */
   readonly practicalSalinity: Float64Array;
   readonly isSalinityMeasured: boolean;
-  /** The quantities that were measured. */
+  /** The quantities that were measured, salinity perhaps by way of conductivity. */
   readonly quantities: readonly Quantity[];
+  /** What the sensors themselves gave: of a conductivity cell the conductivity. */
+  readonly recorded: readonly RecordedColumn[];
 }
 
 /** @param unmeasuredPracticalSalinity what the basis says where the probe measured none */
@@ -32,21 +39,27 @@ export function evidenceOf(cast: Cast, unmeasuredPracticalSalinity: number): Evi
   const measured = sampleSalinity(samples, unmeasuredPracticalSalinity);
   const practicalSalinity = Float64Array.from(depthM, (pressureDbar, i) => measured.at(i, pressureDbar || 0));
   const isSalinityMeasured = measured.source !== "basis";
-  const temperature: Quantity = {
-    name: "temperature",
-    values: inSituTempC,
-    resolution: resolutionOf(inSituTempC),
-    write: (value) => `${written(value)} degC`,
+  const temperature: Quantity = { ...column(inSituTempC, "degC"), name: "temperature" };
+  const salinity: Quantity = { ...column(practicalSalinity), name: "salinity" };
+  const conductivity = samples.conductivityMsCm ?? samples.specificConductanceMsCm;
+  const isByCell = measured.source === "conductivity" || measured.source === "specificConductance";
+  const cell = isByCell && conductivity ? { ...column(conductivity, "mS/cm"), name: "conductivity" } : salinity;
+  return {
+    samples,
+    depthM,
+    inSituTempC,
+    practicalSalinity,
+    isSalinityMeasured,
+    quantities: isSalinityMeasured ? [temperature, salinity] : [temperature],
+    recorded: isSalinityMeasured ? [temperature, cell] : [temperature],
   };
-  const salinity: Quantity = {
-    name: "salinity",
-    values: practicalSalinity,
-    resolution: resolutionOf(practicalSalinity),
-    write: written,
-  };
-  const quantities = isSalinityMeasured ? [temperature, salinity] : [temperature];
-  return { samples, depthM, inSituTempC, practicalSalinity, isSalinityMeasured, quantities };
 }
+
+const column = (values: Float64Array, unit?: string): Omit<RecordedColumn, "name"> => ({
+  values,
+  resolution: resolutionOf(values),
+  write: (value) => (unit === undefined ? written(value) : `${written(value)} ${unit}`),
+});
 
 /** To the third decimal, which is as far as a sentence needs. */
 export const written = (value: InOwnUnit): string => String(Math.round(value * 1000) / 1000);

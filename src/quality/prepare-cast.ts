@@ -1,3 +1,4 @@
+import { ToolError } from "../base/index.ts";
 import type { Cast } from "../cast/index.ts";
 import { freezing } from "./checks/freezing.ts";
 import { grossRange } from "./checks/gross-range.ts";
@@ -34,6 +35,9 @@ export function prepareCast(
   edits: readonly FlagEdit[],
   unmeasuredPracticalSalinity: number,
 ): PreparedCast {
+  const { binM } = preparation;
+  if (binM !== null && !(binM > 0))
+    throw new ToolError("DomainError", `binM is ${binM}, expected more than 0 m or null`);
   const { samples } = cast;
   const evidence = evidenceOf(cast, unmeasuredPracticalSalinity);
   const byHand = wordsOn(cast, edits);
@@ -52,13 +56,13 @@ export function prepareCast(
   const findings = [...unusable, ...alone, ...density.findings, ...placing, ...neighbours];
   const verdicts = verdictsOn(samples.n, findings, words);
   const used = [...verdicts.use.keys()].filter((i) => verdicts.use[i] === 1);
-  const chosen = grouped(evidence, used, { isOneWay, binM: preparation.binM });
+  const chosen = grouped(evidence, used, { isOneWay, binM });
   return {
     ...verdicts,
     cast: isWhole(chosen, samples.n) ? cast : { ...cast, samples: selectSamples(samples, chosen) },
     sampleIndexOf: Int32Array.from(chosen, (group) => group[0]!),
     preparedFlag: Uint8Array.from(chosen, (group) => worstFlag(group.map((i) => verdicts.flag[i]!))),
-    binCount: preparation.binM === null ? null : Int32Array.from(chosen, (group) => group.length),
+    binCount: binM === null ? null : Int32Array.from(chosen, (group) => group.length),
     issues: [...density.issues, ...findingsAsIssues([...words, ...findings], samples, verdicts.use)],
   };
 }

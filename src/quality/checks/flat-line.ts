@@ -1,5 +1,5 @@
 import { median } from "simple-statistics";
-import type { Quantity } from "../evidence.ts";
+import type { RecordedColumn } from "../evidence.ts";
 import type { Finding, NeighbourCheck } from "../finding.ts";
 import { QUALITY_FLAG } from "../quality-flag.ts";
 import type { InOwnUnit } from "../resolution.ts";
@@ -27,10 +27,10 @@ interface Run {
  * several steps of the record on both sides, and only where it is longer than the record's own habit of repeating.
  */
 export const flatLine: NeighbourCheck = (evidence, order) =>
-  evidence.quantities.flatMap((quantity) => flatLinesOf(quantity, order, evidence.samples.lineIndex));
+  evidence.recorded.flatMap((column) => flatLinesOf(column, order, evidence.samples.lineIndex));
 
 function flatLinesOf(
-  { name, values, resolution, write }: Quantity,
+  { name, values, resolution, write }: RecordedColumn,
   order: readonly number[],
   lines: Int32Array,
 ): readonly Finding[] {

@@ -1,4 +1,4 @@
-import type { Evidence, Quantity } from "../evidence.ts";
+import { type Evidence, type Quantity, written } from "../evidence.ts";
 import type { Finding } from "../finding.ts";
 import type { WaterKind } from "../preparation.ts";
 import { QUALITY_FLAG } from "../quality-flag.ts";
@@ -55,6 +55,7 @@ export const grossRange = (evidence: Evidence, kind: WaterKind): readonly Findin
     }),
   ),
   ...outOfWater(evidence),
+  ...tooDeep(evidence),
 ];
 
 /** A cell in water, however fresh, conducts. */
@@ -66,4 +67,17 @@ const outOfWater = ({ samples }: Evidence): readonly Finding[] =>
       sampleIndex,
       flag: QUALITY_FLAG.fail,
       reason: `conductivity ${conductivityMsCm} mS/cm: the cell was in air`,
+    }));
+
+/** The deepest trench is 10 935 m deep. */
+const DEEPEST_M = 12_000;
+
+const tooDeep = ({ depthM }: Evidence): readonly Finding[] =>
+  [...depthM.entries()]
+    .filter(([, depth]) => depth > DEEPEST_M)
+    .map(([sampleIndex, depth]) => ({
+      check: "gross-range",
+      sampleIndex,
+      flag: QUALITY_FLAG.fail,
+      reason: `depth ${written(depth)} m is below the bed of every water`,
     }));

@@ -9,8 +9,8 @@ export function residualsFromLine(depthM: readonly number[], values: readonly In
   const slopes: number[] = [];
   for (let i = 0; i < values.length; i++)
     for (let k = i + 1; k < values.length; k++) {
-      const stepM = depthM[k]! - depthM[i]!;
-      if (stepM !== 0) slopes.push((values[k]! - values[i]!) / stepM);
+      const slope = (values[k]! - values[i]!) / (depthM[k]! - depthM[i]!);
+      if (Number.isFinite(slope)) slopes.push(slope);
     }
   const slope = slopes.length === 0 ? 0 : median(slopes);
   const level = values.map((value, i) => value - slope * depthM[i]!);

@@ -32,7 +32,8 @@ const DEFINITIONS: readonly Definition[] = [
 
 /**
  * Whether the density that a file states for a sample fits the sample's own temperature and salinity. Files do not say
- * which density they mean, so the definition is taken that the values fit best; where it is not the usual one (the first), that is said.
+ * which density they mean, so the definition is taken that the values fit
+ * best; where it is not the usual one, which is the first, that is said.
  */
 export function statedDensity(evidence: Evidence): {
   readonly findings: readonly Finding[];

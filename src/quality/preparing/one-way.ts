@@ -8,6 +8,9 @@ import { soakEnd } from "./soak.ts";
 /** Nearer to the deepest sample than this the probe was still at the bottom of its way. */
 const BOTTOM_M = 0.2;
 
+/** Going back by less is standing still, and no mark against a sample (QARTOD; in dbar, from memory). */
+const STILL_M = 0.02;
+
 /** Of the depths a lowering covers, the share that the way down must have for `auto` to take it. */
 const LEAST_SHARE_RATIO = 0.5;
 
@@ -41,9 +44,11 @@ export function oneWay(evidence: Evidence, inTime: readonly number[], way: "auto
     else if (k === startIndex) furthest = k;
     else if (taken === "down" ? depth > depthsM[furthest]! : depth < depthsM[furthest]!) furthest = k;
     else {
+      const backM = Math.abs(depthsM[furthest]! - depth);
+      const flag = backM > STILL_M ? QUALITY_FLAG.suspect : null;
       const passed = `${written(depthsM[furthest]!)} m at line ${samples.lineIndex[wet[furthest]!]}`;
       const words = taken === "down" ? `not deeper than ${passed}` : `not shallower than ${passed}`;
-      leaveOut("pressure-reversal", k, QUALITY_FLAG.suspect, `${words}: the probe had turned or stood still`);
+      leaveOut("pressure-reversal", k, flag, `${words}: the probe had turned or stood still`);
     }
   });
   return findings;

@@ -117,6 +117,18 @@ describe("stuck sensor", () => {
     expect(reasons[0]).toEqual(["temperature is 12.347 degC in all 12 samples while the depth changes"]);
   });
 
+  it("looks at the conductivity itself", () => {
+    const columns = {
+      depthM,
+      inSituTempC: depthM.map((z) => 12 + z / 100),
+      conductivityMsCm: depthM.map(() => 31.247),
+    };
+    expect(preparedOf(columns).reasons[0]).toEqual([
+      "conductivity is 31.247 mS/cm in all 12 samples while the depth changes",
+    ]);
+    expect(flagsOf({ ...columns, conductivityMsCm: depthM.map(() => 0.255) })).toEqual(depthM.map(() => 1));
+  });
+
   it("lets a coarse record of mixed water be the same throughout", () => {
     expect(flagsOf({ depthM, practicalSalinity, inSituTempC: depthM.map(() => 12.3) })).toEqual(depthM.map(() => 1));
   });

@@ -76,6 +76,12 @@ describe("one way of a raw record", () => {
     expect(kept(WHOLE, { way: "all" })).toEqual(WHOLE.filter((z) => z >= 0));
   });
 
+  it("holds nothing against a sample of a probe that only stood still", () => {
+    const { flag, use } = preparedOf(recorded(DOWN.with(5, 2.79)));
+    expect([flag[5], use[5]]).toEqual([1, 0]);
+    expect([flag[6], use[6]]).toEqual([3, 0]);
+  });
+
   it("is not asked for where the samples run one way already", () => {
     const upward = DOWN.toSorted((a, b) => b - a);
     expect(kept(upward, { way: "down" })).toEqual(upward);

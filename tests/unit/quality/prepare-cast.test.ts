@@ -102,6 +102,10 @@ describe("bins", () => {
     expect([...cast.samples.practicalSalinity!]).toEqual([10.1, 10.7, 14].map((s) => expect.closeTo(s, 12)));
   });
 
+  it("have a thickness", () => {
+    expect(() => preparedOf(calmWater(5), { binM: 0 })).toThrow("binM is 0, expected more than 0 m or null");
+  });
+
   it("say how many samples they hold, and do not fill a gap", () => {
     expect([...binCount!]).toEqual([2, 2, 1]);
     expect([...sampleIndexOf]).toEqual([0, 2, 4]);

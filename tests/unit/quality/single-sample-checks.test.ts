@@ -50,6 +50,10 @@ describe("gross range", () => {
     expect(flagsOf({ depthM: [1], inSituTempC: [12], conductivityMsCm: [0] })).toEqual([4]);
   });
 
+  it("fails a depth that no water has", () => {
+    expect(flagsOf({ depthM: [1, 1e9], inSituTempC: [12, 12], practicalSalinity: [20, 21] })).toEqual([1, 4]);
+  });
+
   it("makes what is unusual for the kind of water suspect", () => {
     // IOOS QARTOD manual, default ranges: -2 to 40 degC, salinity 0 to 42; from memory.
     expect(at(41, 20)).toBe(3);
