@@ -11,9 +11,9 @@ const FAIL_COUNT = 5;
 /** Steps on either side of a run that tell whether the water was changing there. */
 const NEIGHBOUR_COUNT = 3;
 
-/** Steps of the record by which the water must change from sample to sample for a repeated value to be odd, or wrong. */
-const LIVELY_STEPS_COUNT = 5;
-const CERTAIN_STEPS_COUNT = 20;
+/** How many such runs a cast may be expected to hold by chance before one is odd, and before one is wrong. */
+const ODD_CHANCE_RATIO = 0.1;
+const WRONG_CHANCE_RATIO = 1e-3;
 
 interface Run {
   /** Places in the order: the first sample of the run, and the one behind its last. */
@@ -23,8 +23,9 @@ interface Run {
 
 /**
  * Values that stay while the water changes. Well-mixed water repeats honestly when it is recorded to 0.1 or 0.01, and it
- * reaches the surface or the bed or fades into its neighbours; so a run counts only between samples that change by
- * several steps of the record on both sides, and only where it is longer than the record's own habit of repeating.
+ * reaches the surface or the bed or fades into its neighbours; so a run is held against how the samples on both sides
+ * change. Where they change by m steps of the record from one to the next, a value repeats by chance once in m times, and a
+ * cast of n samples holds n / m^(k - 1) runs of k. Where every value is written several times, that counts as once.
  */
 export const flatLine: NeighbourCheck = (evidence, order) =>
   evidence.recorded.flatMap((column) => flatLinesOf(column, order, evidence.samples.lineIndex));
@@ -37,16 +38,17 @@ function flatLinesOf(
   const runs = runsOf(order.map((i) => values[i]!));
   if (runs.length === 0) return [];
   const habitCount = median(runs.map(({ startIndex, endIndex }) => endIndex - startIndex));
-  const step = Math.max(resolution, Number.MIN_VALUE);
   return runs.flatMap(({ startIndex, endIndex }): readonly Finding[] => {
     const count = endIndex - startIndex;
     if (count < SUSPECT_COUNT * habitCount) return [];
-    const liveliness = Math.min(
-      changeAround(order, values, startIndex - NEIGHBOUR_COUNT, startIndex),
-      changeAround(order, values, endIndex - 1, endIndex - 1 + NEIGHBOUR_COUNT),
-    );
-    if (!(liveliness >= LIVELY_STEPS_COUNT * step)) return [];
-    const isCertain = count >= FAIL_COUNT * habitCount && liveliness >= CERTAIN_STEPS_COUNT * step;
+    const stepsCount =
+      Math.min(
+        changeAround(order, values, startIndex - NEIGHBOUR_COUNT, startIndex),
+        changeAround(order, values, endIndex - 1, endIndex - 1 + NEIGHBOUR_COUNT),
+      ) / resolution;
+    const chance = order.length / stepsCount ** (count / habitCount - 1);
+    if (!(chance < ODD_CHANCE_RATIO)) return [];
+    const isCertain = count >= FAIL_COUNT * habitCount && chance < WRONG_CHANCE_RATIO;
     const run = order.slice(startIndex, endIndex);
     return run.slice(isCertain ? 0 : SUSPECT_COUNT - 1).map((sampleIndex) => ({
       check: "flat-line",

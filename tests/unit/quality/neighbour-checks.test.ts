@@ -24,7 +24,7 @@ describe("flat line", () => {
     expect(flags.map((flag, i) => (flag === 1 ? null : [i, flag])).filter(Boolean)).toEqual([[7, 3]]);
   });
 
-  it("fails five where the water around changes by 20 steps and more", () => {
+  it("fails five that are not there by chance", () => {
     const { flag, reasons } = preparedOf(cast(rising([20, 20, 20, 20, 20])));
     expect([...flag.slice(5, 10)]).toEqual([4, 4, 4, 4, 4]);
     expect(reasons[7]).toEqual([
