@@ -4,6 +4,7 @@ import { failed, type Outcome } from "../../base/index.ts";
 import { findTable } from "../read/find-header.ts";
 import { readCastFile } from "../read/read-cast-file.ts";
 import { readTable } from "../read/read-table.ts";
+import { listedRows } from "../read/rows.ts";
 import type { FileReading, ReadingAnswers } from "../reading.ts";
 import { readClassicNetcdf } from "./classic-netcdf.ts";
 import { readHdfNetcdf } from "./hdf-netcdf.ts";
@@ -69,7 +70,7 @@ function fromNetcdf(fileName: string, format: string, file: NetcdfFile, options:
     delimiter: { character: "\0", name: "variables" },
     header: { lineIndex: 0, cells: headers },
     unitTexts: units,
-    rows: rows.map((cells, i) => ({ lineIndex: i + 1, cells })),
+    rows: listedRows(rows.map((cells, i) => ({ lineIndex: i + 1, cells }))),
     preface: [],
     hasOpenQuote: false,
   };

@@ -6,6 +6,7 @@ import { isMissing, parseNumber } from "./parse-number.ts";
 import { parsePosition } from "./parse-position.ts";
 import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
 import { MEASURED, type MeasuredRole, ROLE_WORDS } from "./roles.ts";
+import { columnTexts } from "./rows.ts";
 import { findSentinels } from "./sentinels.ts";
 import type { Table } from "./table.ts";
 import type { TimeForm } from "./time-form.ts";
@@ -43,7 +44,7 @@ export class CellReader {
   }
 
   textsAt(columnIndex: number): readonly string[] {
-    return this.#table.rows.map((row) => row.cells[columnIndex] ?? "");
+    return columnTexts(this.#table.rows, columnIndex);
   }
 
   timeForm(role: "date" | "dateTime"): TimeForm {
@@ -62,7 +63,7 @@ export class CellReader {
       return above;
     });
     if (filledRows.length > 0) {
-      const line = this.#table.rows[filledRows[0]!]!.lineIndex;
+      const line = this.#table.rows.lineIndexAt(filledRows[0]!);
       const message = `${ROLE_WORDS[role]} is blank in ${filledRows.length} rows (first line ${line}); taken from the row above`;
       this.issues.push({ severity: "warning", code: "filled-down", message, line });
     }
@@ -89,7 +90,7 @@ export class CellReader {
     const parse = isPlace(role) ? parsePosition : parseNumber;
     const values = new Float64Array(rows.length);
     for (let i = 0; i < rows.length; i++) {
-      const text = rows[i]!.cells[column.columnIndex] ?? "";
+      const text = rows.cellAt(i, column.columnIndex) ?? "";
       const value = parse(text, column.style);
       if (value === null) {
         const expected = isPlace(role) ? "degrees" : "a number or a blank";
@@ -111,7 +112,7 @@ export class CellReader {
     for (let i = 0; i < values.length; i++) {
       const isFound = found.has(values[i]!);
       if (isFound || kept.has(values[i]!)) {
-        (isFound ? foundTexts : keptTexts).push(this.#table.rows[i]!.cells[columnIndex]!);
+        (isFound ? foundTexts : keptTexts).push(this.#table.rows.cellAt(i, columnIndex)!);
       }
       if (isFound) values[i] = Number.NaN;
     }

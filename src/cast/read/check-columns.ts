@@ -5,6 +5,7 @@ import { answerName } from "./answers.ts";
 import { type Choice, choose } from "./ask.ts";
 import { isMissing, parseNumber } from "./parse-number.ts";
 import { type RecognisedColumns, VERTICAL_ROLES } from "./recognise-columns.ts";
+import { rowsBetween } from "./rows.ts";
 import type { Table } from "./table.ts";
 
 const TEMPERATURE_ROLES: readonly ColumnRole[] = ["temperature"];
@@ -45,7 +46,7 @@ function openColumns(table: Table, columns: RecognisedColumns): readonly number[
     .filter(({ role, confidence }) => role === null && confidence !== "doubtful")
     .map(({ columnIndex }) => columnIndex)
     .filter((columnIndex) => {
-      const cells = table.rows.slice(0, SEARCHED_ROWS).map((row) => row.cells[columnIndex] ?? "");
+      const cells = rowsBetween(table.rows, 0, SEARCHED_ROWS).map((row) => row.cells[columnIndex] ?? "");
       const filled = cells.filter((cell) => !isMissing(cell));
       return filled.length > 1 && filled.every((cell) => parseNumber(cell, style) !== null);
     });

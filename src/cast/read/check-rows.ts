@@ -5,21 +5,37 @@ import type { Question } from "../reading.ts";
 import { answerName } from "./answers.ts";
 import { choose, chooseForm, type Doubt, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
-import type { Row } from "./parse-table.ts";
 import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
+import { chosenRows, type Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
 import { isWeightOfAir } from "./vertical.ts";
 
-const overlong = (table: Table) =>
-  table.rows.filter((row) => row.cells.slice(table.header.cells.length).some((cell) => cell !== ""));
+/** Whether a row holds something beyond the last column that has a name. */
+function isWide({ rows, header }: Table, row: number): boolean {
+  for (let column = header.cells.length; ; column++) {
+    const cell = rows.cellAt(row, column);
+    if (cell === undefined) return false;
+    if (cell !== "") return true;
+  }
+}
+
+const isShort = ({ rows, header }: Table, row: number): boolean =>
+  rows.cellAt(row, header.cells.length - 1) === undefined;
+
+/** How many rows are not of the header's width, with the first of them; null when none is. */
+function describe({ rows, header }: Table, odd: Rows, word: string): { found: string; line: number } | null {
+  if (odd.length === 0) return null;
+  const line = odd.lineIndexAt(0);
+  const found = `${odd.length} of ${rows.length} rows are ${word} than the header (line ${line}: ${odd.cellsAt(0).length} cells, expected ${header.cells.length})`;
+  return { found, line };
+}
 
 /** Rows wider than their header have their values under the wrong names, or a decimal comma among delimiting commas. */
 function widthIssue(table: Table): Issue | null {
-  const wide = overlong(table);
-  const first = wide[0];
-  if (first === undefined) return null;
-  const line = first.lineIndex;
-  const found = `${wide.length} of ${table.rows.length} rows are wider than the header (line ${line}: ${first.cells.length} cells, expected ${table.header.cells.length})`;
+  const wide = chosenRows(table.rows, (row) => isWide(table, row));
+  const described = describe(table, wide, "wider");
+  if (described === null) return null;
+  const { found, line } = described;
   const isMost = wide.length > table.rows.length / 2;
   return isMost
     ? {
@@ -31,14 +47,15 @@ function widthIssue(table: Table): Issue | null {
     : { severity: "warning", code: "rows-too-wide", line, message: `${found}; check them, surplus cells are not read` };
 }
 
-const isShort = (table: Table, row: Row): boolean => row.cells.length < table.header.cells.length;
-
 /** Rows that end early: what is missing is blank, unless blanks part the cells, where nobody can say which is missing. */
 function shortIssue(table: Table): Issue | null {
-  const short = table.rows.filter((row) => isShort(table, row));
-  const first = short[0];
-  if (first === undefined) return null;
-  const found = `${short.length} of ${table.rows.length} rows are shorter than the header (line ${first.lineIndex}: ${first.cells.length} cells, expected ${table.header.cells.length})`;
+  const described = describe(
+    table,
+    chosenRows(table.rows, (row) => isShort(table, row)),
+    "shorter",
+  );
+  if (described === null) return null;
+  const { found, line } = described;
   const isLeftOut = table.delimiter.blanks !== undefined;
   const what = isLeftOut
     ? "left out, as blanks do not tell which cell is missing"
@@ -46,7 +63,7 @@ function shortIssue(table: Table): Issue | null {
   return {
     severity: isLeftOut ? "warning" : "note",
     code: "rows-too-short",
-    line: first.lineIndex,
+    line,
     message: `${found}; ${what}`,
   };
 }
@@ -54,7 +71,7 @@ function shortIssue(table: Table): Issue | null {
 /** Without the rows whose cells may stand under the wrong names. */
 export function withoutShiftedRows(table: Table): Table {
   if (table.delimiter.blanks === undefined) return table;
-  return { ...table, rows: table.rows.filter((row) => !isShort(table, row)) };
+  return { ...table, rows: chosenRows(table.rows, (row) => !isShort(table, row)) };
 }
 
 /** A column in use, as a question names it. */

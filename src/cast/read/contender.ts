@@ -7,6 +7,7 @@ import { isMissing } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseDateTime } from "./parse-time.ts";
 import { ABSOLUTE, readHeaderCell, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
+import type { Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
 
 export interface Contender {
@@ -56,12 +57,22 @@ function namedRole(table: Table, columnIndex: number, answer: ResolvedAnswer | n
   return meaning;
 }
 
+/** Of a long record so many rows, evenly chosen, stand for all of them. */
+const MOST_LOOKED_AT = 200_000;
+
+function evenlyChosen(rows: Rows, columnIndex: number): readonly string[] {
+  const step = Math.ceil(rows.length / MOST_LOOKED_AT);
+  const texts: string[] = [];
+  for (let row = 0; row < rows.length; row += step) texts.push(rows.cellAt(row, columnIndex) ?? "");
+  return texts;
+}
+
 /** null when the header is no name that we use. */
 export function contenderOf(table: Table, columnIndex: number, answer: ResolvedAnswer | null): Contender | null {
   const header = table.header.cells[columnIndex]!;
   const meaning = namedRole(table, columnIndex, answer);
   if (meaning === null || answer?.role === "unused") return null;
-  const filled = table.rows.map((row) => row.cells[columnIndex] ?? "").filter((cell) => !isMissing(cell));
+  const filled = evenlyChosen(table.rows, columnIndex).filter((cell) => !isMissing(cell));
   const unitText = table.unitTexts[columnIndex] ?? "";
   const isAbsolute = meaning.role === "seaPressure" && ABSOLUTE.test(unitText);
   const named = isAbsolute ? "absolutePressure" : meaning.role;

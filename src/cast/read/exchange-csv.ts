@@ -6,6 +6,7 @@
 import type { ColumnRole } from "../reading.ts";
 import { isCommentLine, parseTable, type Row } from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
+import { listedRows } from "./rows.ts";
 import type { Table } from "./table.ts";
 
 const STAMP = /^(CTD|BOTTLE),/;
@@ -65,7 +66,7 @@ export function exchangeTable(text: string): Table | null {
     delimiter: COMMA,
     header: { lineIndex: names.lineIndex, cells: [...names.cells, ...added.map(([key]) => key)] },
     unitTexts: [...names.cells.map((_, i) => units.cells[i] ?? ""), ...added.map(([key]) => KEY_UNITS[key] ?? "")],
-    rows: rows.slice(2).map(widened),
+    rows: listedRows(rows.slice(2).map(widened)),
     preface: [],
     hasOpenQuote,
     ownRoles: OWN_ROLES,

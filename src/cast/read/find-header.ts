@@ -3,7 +3,9 @@ import { unitByName } from "../../units/index.ts";
 import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withoutCommentSign } from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
+import { chosenRows, rowsBetween } from "./rows.ts";
 import type { Table } from "./table.ts";
+import { TextRows } from "./text-rows.ts";
 
 /** So many lines are searched at a time; text above a table may be longer. */
 const SEARCHED_LINES = 1000;
@@ -72,13 +74,30 @@ function headerByShape(lines: readonly string[], delimiter: Delimiter): Candidat
   return header ? { delimiter, headerLineIndex: header.lineIndex, score: 0 } : null;
 }
 
+/** The lines of a text, a stretch at a time; each overlaps the next by the rows between a header and its numbers. */
+function* stretchesOf(text: string): Generator<{ readonly lines: readonly string[]; readonly firstLine: number }> {
+  let start = 0;
+  for (let firstLine = 0; start <= text.length; firstLine += SEARCHED_LINES) {
+    const lines: string[] = [];
+    let next = start;
+    let at = start;
+    while (lines.length < SEARCHED_LINES + ROWS_TO_NUMBERS && at <= text.length) {
+      const end = text.indexOf("\n", at);
+      lines.push(text.slice(at, end < 0 ? text.length : end));
+      at = end < 0 ? text.length + 1 : end + 1;
+      if (lines.length === SEARCHED_LINES) next = at;
+    }
+    yield { lines, firstLine };
+    start = lines.length < SEARCHED_LINES ? text.length + 1 : next;
+  }
+}
+
 /** The best header among all lines; the search ends with the first stretch of lines that has one above numbers. */
-function bestByNames(lines: readonly string[]): Candidate | null {
+function bestByNames(text: string): Candidate | null {
   let best: Candidate | null = null;
-  for (let start = 0; start < lines.length; start += SEARCHED_LINES) {
-    const searched = lines.slice(start, start + SEARCHED_LINES + ROWS_TO_NUMBERS);
+  for (const { lines, firstLine } of stretchesOf(text)) {
     for (const delimiter of DELIMITERS) {
-      const found = bestRow(searched, start, delimiter);
+      const found = bestRow(lines, firstLine, delimiter);
       if (found.score > (best?.score ?? 0)) best = found;
     }
     if (best !== null && best.score > HAS_NUMBERS) return best;
@@ -87,10 +106,19 @@ function bestByNames(lines: readonly string[]): Candidate | null {
 }
 
 /** Some files put a comment sign before the header itself, as the last line of the comments at the top. */
-function withHeaderUncommented(lines: readonly string[]): readonly string[] {
-  const first = lines.findIndex((line) => line.trim() !== "" && !isCommentLine(line));
-  const last = lines.slice(0, Math.max(first, 0)).findLastIndex(isCommentLine);
-  return lines.map((line, i) => (i === last ? withoutCommentSign(line) : line));
+function withHeaderUncommented(text: string): string {
+  let start = 0;
+  let comment: { readonly start: number; readonly end: number } | null = null;
+  while (start <= text.length) {
+    const end = text.indexOf("\n", start) < 0 ? text.length : text.indexOf("\n", start);
+    const line = text.slice(start, end);
+    if (isCommentLine(line)) comment = { start, end };
+    else if (line.trim() !== "") break;
+    start = end + 1;
+  }
+  if (comment === null) return text;
+  const { start: from, end: to } = comment;
+  return text.slice(0, from) + withoutCommentSign(text.slice(from, to)) + text.slice(to);
 }
 
 /** A pure number as a unit: practical salinity has it in the CF conventions. */
@@ -134,52 +162,70 @@ function namesAt(rows: readonly Row[], at: number, delimiter: Delimiter): Names 
   return alone;
 }
 
-const isSameRow = (row: Row, cells: readonly string[]): boolean =>
-  row.cells.length === cells.length && row.cells.every((cell, i) => cell === cells[i]);
+const isSameRow = (a: readonly string[], b: readonly string[]): boolean =>
+  a.length === b.length && a.every((cell, i) => cell === b[i]);
 
 /** Rows of numbers and nothing above them: the columns are called by their place, #1 and on. */
-function withoutHeader(lines: readonly string[]): Table | null {
+function withoutHeader(text: string): Table | null {
   for (const delimiter of DELIMITERS) {
-    const { rows, hasOpenQuote } = parseTable(lines, delimiter);
-    const width = rows[0]?.cells.length ?? 0;
-    const isTable = rows.every((row) => row.cells.length === width && row.cells.filter(looksNumeric).length >= 2);
-    if (!isTable || rows.length < 2) continue;
-    const cells = rows[0]!.cells.map((_, i) => `#${i + 1}`);
+    const rows = new TextRows(text, delimiter);
+    const width = rows.length === 0 ? 0 : rows.cellsAt(0).length;
+    const isOdd = (row: number): boolean => {
+      const cells = rows.cellsAt(row);
+      return cells.length !== width || cells.filter(looksNumeric).length < 2;
+    };
+    if (rows.length < 2 || chosenRows(rows, isOdd).length > 0) continue;
+    const cells = rows.cellsAt(0).map((_, i) => `#${i + 1}`);
     return {
       delimiter,
       header: { lineIndex: 0, cells },
       unitTexts: cells.map(() => ""),
       rows,
       preface: [],
-      hasOpenQuote,
+      hasOpenQuote: rows.hasOpenQuote,
     };
   }
   return null;
 }
 
-/** The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out. */
-export function findTable(text: string): Table | null {
-  const plain = text.split("\n");
-  const byNames = bestByNames(plain);
-  const lines = byNames === null ? withHeaderUncommented(plain) : plain;
-  const searched = lines.slice(0, SEARCHED_LINES);
-  const candidate =
-    byNames ?? bestByNames(lines) ?? DELIMITERS.map((d) => headerByShape(searched, d)).find((c) => c !== null);
-  if (!candidate) return withoutHeader(lines);
-  const { rows, hasOpenQuote } = parseTable(lines, candidate.delimiter);
-  const at = rows.findIndex((row) => row.lineIndex === candidate.headerLineIndex);
-  const names = namesAt(rows, at, candidate.delimiter);
-  const units = unitsIn(names.cells, rows[names.lastAt + 1]);
+function candidateIn(text: string): Candidate | null {
+  const byNames = bestByNames(text);
+  if (byNames !== null) return byNames;
+  const [head] = stretchesOf(text);
+  return DELIMITERS.map((delimiter) => headerByShape(head!.lines, delimiter)).find((found) => found !== null) ?? null;
+}
+
+/**
+ * The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out.
+ * @param onShare told now and then which share of the text has been gone through
+ */
+export function findTable(text: string, onShare?: (doneFrac: number) => void): Table | null {
+  const named = bestByNames(text);
+  const read = named === null ? withHeaderUncommented(text) : text;
+  const candidate = named ?? candidateIn(read);
+  if (candidate === null) return withoutHeader(read);
+  const all = new TextRows(read, candidate.delimiter, onShare);
+  let at = 0;
+  while (all.lineIndexAt(at) !== candidate.headerLineIndex) at += 1;
+  // A second line of names stands just above or below, and the units below that.
+  const near = rowsBetween(all, 0, at + ROWS_TO_NUMBERS);
+  const names = namesAt(near, at, candidate.delimiter);
+  const units = unitsIn(names.cells, near[names.lastAt + 1]);
   const header = {
-    lineIndex: rows[names.lastAt]!.lineIndex,
+    lineIndex: near[names.lastAt]!.lineIndex,
     cells: names.cells.slice(0, Math.max(2, widthOf(names.cells))),
   };
+  const bodyAt = names.lastAt + (units === null ? 1 : 2);
+  const first = near[at]!.cells;
   return {
     delimiter: candidate.delimiter,
     header,
     unitTexts: header.cells.map((_, i) => units?.[i] ?? ""),
-    rows: rows.slice(names.lastAt + (units === null ? 1 : 2)).filter((row) => !isSameRow(row, rows[at]!.cells)),
-    preface: rows.slice(0, names.firstAt),
-    hasOpenQuote,
+    rows: chosenRows(
+      all,
+      (row) => row >= bodyAt && !(all.cellAt(row, 0) === first[0] && isSameRow(all.cellsAt(row), first)),
+    ),
+    preface: near.slice(0, names.firstAt),
+    hasOpenQuote: all.hasOpenQuote,
   };
 }

@@ -89,7 +89,7 @@ export function readMeasuredRows(table: Table, columns: RecognisedColumns): Meas
   const { issues: verticalIssues, ...vertical } = readVertical(reader, isGaugePressure);
   const measured = {
     n: rows.length,
-    lineIndex: Int32Array.from(rows, (row) => row.lineIndex),
+    lineIndex: Int32Array.from({ length: rows.length }, (_, row) => rows.lineIndexAt(row)),
     ...vertical,
     isGaugePressure,
     inSituTempC: reader.numbers("temperature") ?? new Float64Array(rows.length).fill(Number.NaN),

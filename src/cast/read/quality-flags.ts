@@ -90,8 +90,8 @@ function schemeOf(header: string, values: ReadonlyMap<string, number>): FlagSche
 
 function flagsIn(table: Table, columnIndex: number): ReadonlyMap<string, number> {
   const counts = new Map<string, number>();
-  for (const row of table.rows) {
-    const text = plain(row.cells[columnIndex] ?? "");
+  for (let row = 0; row < table.rows.length; row++) {
+    const text = plain(table.rows.cellAt(row, columnIndex) ?? "");
     if (!isMissing(text)) counts.set(text, (counts.get(text) ?? 0) + 1);
   }
   return counts;
@@ -137,9 +137,11 @@ const worse = (a: number, b: number): number => (WORST_FIRST.indexOf(a) <= WORST
 /** One flag a row, the worst among the columns given; a value without a flag is not evaluated. null without columns. */
 export function statedFlags(table: Table, columns: readonly FlagColumn[]): Uint8Array | null {
   if (columns.length === 0) return null;
-  return Uint8Array.from(table.rows, (row) =>
+  const { rows } = table;
+  return Uint8Array.from({ length: rows.length }, (_, row) =>
     columns.reduce(
-      (worst, { columnIndex, scheme }) => worse(worst, scheme[plain(row.cells[columnIndex] ?? "")] ?? NOT_EVALUATED),
+      (worst, { columnIndex, scheme }) =>
+        worse(worst, scheme[plain(rows.cellAt(row, columnIndex) ?? "")] ?? NOT_EVALUATED),
       NOT_EVALUATED,
     ),
   );

@@ -8,6 +8,7 @@ import { askAboutVertical, checkRows, rowLengthIssues, withoutShiftedRows } from
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
+import { rowsBetween } from "./rows.ts";
 import { type RowGroup, splitCasts } from "./split-casts.ts";
 import type { Table, TableSource } from "./table.ts";
 
@@ -102,7 +103,7 @@ export function readTable(
     decimalMark: columns.decimalMark,
     headerLineIndex: table.header.lineIndex,
     headers: table.header.cells,
-    firstRows: table.rows.slice(0, SHOWN_ROWS).map((row) => row.cells),
+    firstRows: rowsBetween(table.rows, 0, SHOWN_ROWS).map((row) => row.cells),
     columns: columns.readings,
     questions: [...columns.questions, ...check.questions],
     splitBy: "nothing yet",

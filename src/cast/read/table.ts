@@ -1,6 +1,7 @@
 /** A table as found in a file, whatever the format: a row of headers, their units, and rows of cells as texts. */
 import type { ColumnRole } from "../reading.ts";
 import type { Delimiter, Row } from "./parse-table.ts";
+import type { Rows } from "./rows.ts";
 
 export interface Table {
   readonly delimiter: Delimiter;
@@ -8,7 +9,7 @@ export interface Table {
   /** One text a column; all empty where the file gives no units outside the headers. */
   readonly unitTexts: readonly string[];
   /** Below the header; a cell that is not there counts as blank. */
-  readonly rows: readonly Row[];
+  readonly rows: Rows;
   /** Rows above the header that are no comments. */
   readonly preface: readonly Row[];
   readonly hasOpenQuote: boolean;
