@@ -35,6 +35,7 @@ export async function readFiles(files: readonly File[], start?: SurveyStart): Pr
   const answers = read.map(({ answer }) => answer).filter(({ stations }) => !stations);
   if (answers.length > 0) dispatch({ kind: "files-read", files: answers, start: start ?? { name: nameFor(answers) } });
   for (const { file, answer } of read) if (answer.outcome.ok) keepFile(answer, file);
+  filesGone.value = [];
   openQuestions(answers);
   for (const { answer } of read) if (answer.stations) takeStations(answer.stations);
 }
@@ -50,16 +51,17 @@ export async function readAgain(
     filesGone.value = [...filesGone.value, reading.fileName];
     return;
   }
-  const sheet = change.sheet ?? reading.sheet ?? undefined;
+  const wanted = change.sheet ?? reading.sheet;
+  const sheet = wanted === null ? {} : { sheet: wanted };
   const job = startJob(reading.fileName);
   const answer = await readOne({
     file,
     remembered: {},
     answers: change.answers,
-    ...(sheet === undefined ? {} : { sheet }),
+    ...sheet,
   });
   endJob(job);
-  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName: reading.fileName }, memory });
+  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName: reading.fileName }, ...sheet, memory });
 }
 
 /** Stops reading a file, or takes one that waits out of the queue. */

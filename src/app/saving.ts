@@ -2,7 +2,7 @@ import { effect } from "@preact/signals";
 import { inStore } from "../worker/index.ts";
 import { pruneKeptFiles } from "./kept-files.ts";
 import { noteSamplesKey, samplesKeyOf } from "./samples-keys.ts";
-import { initialState, readingsOf } from "./state/app-state.ts";
+import { allReadingsOf, initialState } from "./state/app-state.ts";
 import { type SavedState, samplesKeysOf, statePacker, takeUp } from "./state/saved-state.ts";
 import { savingTrouble, state } from "./store.ts";
 import { threads } from "./threads.ts";
@@ -26,7 +26,7 @@ export async function restore(): Promise<void> {
     const samplesByKey = await threads.solver.restoreSamples([...samplesKeysOf(saved.state)]);
     for (const [key, samples] of samplesByKey) noteSamplesKey(samples, key);
     state.value = takeUp(saved.state, samplesByKey);
-    void pruneKeptFiles(readingsOf(state.value));
+    void pruneKeptFiles(allReadingsOf(state.value));
   } catch (cause) {
     savingTrouble.value = `Earlier work could not be read (${reasonOf(cause)}).`;
   }

@@ -16,9 +16,9 @@ export interface DrawnProfile extends Pick<Profile, "n" | "depthM" | (typeof DRA
   readonly lastSampleIndex: number;
 }
 
-const MOST_ROWS_COUNT = 4000;
-/** Finer than the rows of pixels of any screen. */
-const SLICES_COUNT = 1500;
+const MOST_ROWS_COUNT = 3000;
+/** No fewer than the eye can follow down a chart. */
+const SLICES_COUNT = 500;
 
 /** Of each thin slice of depth the first and last row, and those with the least and greatest of every quantity. */
 function rowsToDraw({ profile, column }: Solution): Int32Array {

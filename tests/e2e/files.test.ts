@@ -18,7 +18,8 @@ describe("files", () => {
     await page.locator(".charts .curve").first().waitFor();
     expect(await page.locator(".cast .name").textContent()).toBe("pier");
     await page.getByText("How the file was read").click();
-    expect(await page.locator(".how-read").textContent()).toContain("temperature (degC)");
+    await page.getByRole("region", { name: "How pier.csv was read" }).waitFor();
+    expect(await page.getByLabel("temperature (degC) is", { exact: true }).inputValue()).toBe("temperature");
     expect(misdeeds).toEqual([]);
   });
 
@@ -50,17 +51,34 @@ describe("files", () => {
     await expect.poll(() => page.locator(".cast .name").allTextContents()).toEqual(["dropped"]);
   });
 
-  it("shows text from a file as text", async () => {
+  it("shows text from a file as text, wherever it is shown", async () => {
     const { page, misdeeds } = await session.open();
     const name = "<img src=x onerror=alert(1)>";
     const rows = [0.5, 2, 4].map((depth) => `${name},${depth},${15 - depth},${10 + depth}`).join("\n");
     await page.setInputFiles("input[type=file]", [
-      csv("a.csv", `station,depth (m),temperature (degC),salinity\n${rows}\n`),
+      csv(`${name}.csv`, `station,depth (m),temperature (degC),${name}\n${rows}\n`),
+      csv("list.csv", `station,latitude,longitude\n${name},51,1\n`),
     ]);
     await page.locator(".charts .curve").first().waitFor();
     expect(await page.locator(".cast .name").textContent()).toBe(name);
+    await page.getByRole("button", { name: "How the file was read" }).click();
+    expect(await page.locator(".as-found").textContent()).toContain(name);
+    expect(await page.locator(".stations").textContent()).toContain(name);
     expect(await page.locator("img").count()).toBe(0);
     expect(misdeeds).toEqual([]);
+  });
+
+  it("exports no cell that a spreadsheet would compute", async () => {
+    const { page } = await session.open();
+    const rows = [0.5, 2, 4].map((depth) => `=cmd(),${depth},${15 - depth}`).join("\n");
+    await page.setInputFiles("input[type=file]", [csv("a.csv", `station,depth (m),temperature (degC)\n${rows}\n`)]);
+    await page.locator(".charts .curve").first().waitFor();
+    const waiting = page.waitForEvent("download");
+    await page.getByRole("button", { name: "Export" }).click();
+    await page.getByRole("button", { name: "Profile of this cast, CSV" }).click();
+    const text = readFileSync(await (await waiting).path(), "utf8");
+    expect(text).toContain("=cmd()");
+    expect(text).not.toMatch(/(^|,)"?=/m);
   });
 
   it("exports a profile as CSV with its metadata beside it", async () => {

@@ -33,12 +33,15 @@ export function ReadingPanel() {
       <Remembered reading={reading} />
       {reading.refusal.length > 0 ? (
         <div class="refused">
-          <p class="warn">With these answers the file gives no casts. Change an answer, or undo.</p>
+          <p class="warn">
+            As it stands this gives no casts. Change an answer{reading.sheets.length > 1 ? " or the sheet" : ""}, or
+            undo.
+          </p>
           <IssueList issues={reading.refusal} />
         </div>
       ) : null}
       <ReadingQuestions questions={reading.questions} onAnswer={answer} />
-      <ReadingTable reading={reading} onAnswer={answer} />
+      {reading.columns.length > 0 ? <ReadingTable reading={reading} onAnswer={answer} /> : null}
     </section>
   );
 }

@@ -71,3 +71,7 @@ export const initialState: AppState = {
 export const surveyOf = (state: AppState): Survey => state.history.present.survey;
 
 export const readingsOf = (state: AppState): readonly KeptReading[] => state.history.present.readings;
+
+/** Those of the whole history, since undo can bring any of them back. */
+export const allReadingsOf = ({ history: { past, present, future } }: AppState): readonly KeptReading[] =>
+  [...past, present, ...future].flatMap(({ readings }) => readings);

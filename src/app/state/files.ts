@@ -39,15 +39,21 @@ function takeFile(work: Work, file: ReadFile): Work {
   return putReading(work, { ...file, fileName: name });
 }
 
-/** A file of that name read once more, with other answers or another sheet, in place of its earlier reading. */
-export function takeAgain(work: Work, file: ReadFile): Work {
-  const { outcome, answers, areAnswersRemembered } = file;
+/**
+ * A file of that name read once more, with other answers or another sheet, in place of its earlier reading.
+ * @param sheet which was asked for; null leaves it
+ */
+export function takeAgain(work: Work, file: ReadFile, sheet: string | null = null): Work {
+  const { outcome, answers } = file;
   if (outcome.ok) return putReading(work, file);
-  const refused = work.readings.map((reading) =>
-    reading.fileName === file.fileName
-      ? { ...reading, answers, areAnswersRemembered, questions: [], refusal: outcome.issues }
-      : reading,
-  );
+  const refused = work.readings.map((reading) => {
+    if (reading.fileName !== file.fileName) return reading;
+    const kept = { ...reading, answers, areAnswersRemembered: false, questions: [], refusal: outcome.issues };
+    // Nothing is known of the columns of a sheet that is no table.
+    return sheet === null || sheet === reading.sheet
+      ? kept
+      : { ...kept, sheet, headers: [], columns: [], firstRows: [] };
+  });
   return { ...work, readings: refused, survey: putCasts(work.survey, file.fileName, []) };
 }
 

@@ -20,7 +20,13 @@ import { correctStation, dropStations, joinList, withStations } from "./stations
 
 export type Action =
   | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly start: SurveyStart }
-  | { readonly kind: "file-read-again"; readonly file: ReadFile; readonly memory: "keep" | "forget" | "as-it-is" }
+  | {
+      readonly kind: "file-read-again";
+      readonly file: ReadFile;
+      readonly sheet?: string;
+      /** What becomes of the answers remembered for files with the same headers. */
+      readonly memory: "keep" | "forget" | "as-it-is";
+    }
   | { readonly kind: "troubles-dismissed" }
   | { readonly kind: "survey-renamed"; readonly name: string }
   | { readonly kind: "survey-cleared" }
@@ -62,7 +68,9 @@ export function reduce(state: AppState, action: Action): AppState {
         troubles: troublesOf(action.files),
       };
     case "file-read-again":
-      return changeWork(withStations(work, (plain) => remembering(takeAgain(plain, action.file), action)));
+      return changeWork(
+        withStations(work, (plain) => remembering(takeAgain(plain, action.file, action.sheet), action)),
+      );
     case "troubles-dismissed":
       return { ...state, troubles: [] };
     case "survey-renamed":

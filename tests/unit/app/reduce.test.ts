@@ -24,6 +24,7 @@ const fileOf = (fileName: string, stations: readonly string[], over: Partial<Rea
   answers: NO_ANSWERS,
   areAnswersRemembered: false,
   headerKey: "station\tdepth (m)\ttemperature (degC)\tsalinity",
+  stations: null,
   ...over,
 });
 
