@@ -70,7 +70,11 @@ async function writeTables(
   ) => {
     const fileName = `${stem}.csv`;
     await host.writeFile(join(folder, fileName), text);
-    const metadata = tableMetadata(fileName, columns, { basis: survey.basis, sources: from });
+    const metadata = tableMetadata(fileName, columns, {
+      basis: survey.basis,
+      preparation: survey.preparation,
+      sources: from,
+    });
     await host.writeFile(join(folder, `${fileName}-metadata.json`), `${JSON.stringify(metadata, null, 2)}\n`);
   };
   for (const [i, one] of withResult.entries()) {

@@ -5,6 +5,8 @@ export interface Host {
   /** Bytes of a file; rejects with the system's error (its `code` says why). */
   readonly readFile: (path: string) => Promise<Uint8Array>;
   readonly readStandardInput: () => Promise<Uint8Array>;
+  /** Shows a line that the next one overwrites; null where nobody is watching (no terminal). */
+  readonly showStatus: ((line: string) => void) | null;
   /** Writes a file, making the folders it needs. */
   readonly writeFile: (path: string, text: string) => Promise<void>;
 }

@@ -7,6 +7,7 @@ const host: Host = {
   out: (text) => void process.stdout.write(text),
   err: (text) => void process.stderr.write(text),
   readFile,
+  showStatus: process.stderr.isTTY ? (line) => void process.stderr.write(`\r\x1b[K${line}`) : null,
   readStandardInput: async () => {
     const chunks: Buffer[] = [];
     for await (const chunk of process.stdin) chunks.push(chunk as Buffer);

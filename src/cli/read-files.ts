@@ -3,6 +3,7 @@ import { failed, type Outcome } from "../base/index.ts";
 import { type AnyFileReading, type ReadOptions, readFile, readStationList, type StationList } from "../cast/index.ts";
 import type { SourceFile } from "../export/index.ts";
 import type { Host } from "./host.ts";
+import { progressBar } from "./progress-bar.ts";
 import type { ReadingOptions } from "./reading-options.ts";
 
 const WHY_UNREADABLE: Readonly<Record<string, string>> = {
@@ -45,7 +46,10 @@ async function readOne(host: Host, path: string, options: ReadOptions): Promise<
   if (!bytes.ok)
     return { path: path.trim() === "" ? '""' : path, source: { fileName: path, sha256: "" }, reading: bytes };
   const sha256 = createHash("sha256").update(bytes.value).digest("hex");
-  return { path, source: { fileName: path, sha256 }, reading: await readFile(path, bytes.value, options) };
+  const bar = progressBar(host, path, bytes.value.length);
+  const reading = await readFile(path, bytes.value, { ...options, onShare: bar.onShare });
+  bar.end();
+  return { path, source: { fileName: path, sha256 }, reading };
 }
 
 export async function readStationFile(host: Host, path: string): Promise<Outcome<StationList>> {

@@ -114,3 +114,18 @@ describe("preparation on the command line", () => {
     expect(err).toContain(message);
   });
 });
+
+describe("a long file on a terminal", () => {
+  it("shows a bar that fills up and is taken away", async () => {
+    const remark = "a remark that makes the line long ".repeat(15);
+    const rows = Array.from({ length: 20_000 }, (_, i) => `${(i / 1000).toFixed(3)},15.000,10.000,${remark}`).join(
+      "\n",
+    );
+    const file = `depth_m,temperature_degC,practical_salinity,remark\n${rows}\n`;
+    const { shown } = await layerhead({ "long.csv": file }, "inspect", "long.csv", "--json");
+    expect(shown.length).toBeGreaterThan(5);
+    expect(shown[0]).toMatch(/^long\.csv \[[#.]{30}\] \d+ %$/);
+    expect(shown.at(-2)).toContain("100 %");
+    expect(shown.at(-1)).toBe("");
+  });
+});

@@ -3,7 +3,7 @@ import type { Host } from "../../src/cli/host.ts";
 /** A machine for the command that keeps what is written, with the given files on it. */
 export function testHost(files: Readonly<Record<string, string | Uint8Array>> = {}, standardInput = "") {
   const written = new Map<string, string>();
-  const said = { out: "", err: "" };
+  const said = { out: "", err: "", shown: [] as string[] };
   const bytes = (content: string | Uint8Array) =>
     typeof content === "string" ? new TextEncoder().encode(content) : content;
   const host: Host = {
@@ -20,6 +20,9 @@ export function testHost(files: Readonly<Record<string, string | Uint8Array>> = 
       return bytes(content);
     },
     readStandardInput: async () => bytes(standardInput),
+    showStatus: (line) => {
+      said.shown.push(line);
+    },
     writeFile: async (path, text) => {
       written.set(path.split("\\").join("/"), text);
     },

@@ -16,6 +16,8 @@ export interface ReadOptions {
   readonly answers?: ReadingAnswers;
   /** Which sheet of a workbook; the first that holds casts unless given. */
   readonly sheet?: string;
+  /** Told now and then, in order, which share of a text is done, from 0 to 1. */
+  readonly onShare?: (doneFrac: number) => void;
 }
 
 /** A reading, and for a workbook which of its sheets it is of. */
@@ -53,7 +55,7 @@ export async function readFile(
     const reason = cause instanceof Error ? cause.message.split("\n")[0] : String(cause);
     return refusal("broken-file", `the file is damaged or not what its first bytes say (${reason}); export it anew`);
   }
-  return withoutSheets(readCastFile(fileName, bytes, options.answers));
+  return withoutSheets(readCastFile(fileName, bytes, options.answers, options.onShare));
 }
 
 const withoutSheets = (reading: Outcome<FileReading>): Outcome<AnyFileReading> =>

@@ -31,10 +31,13 @@ export class CellReader {
   readonly issues: Issue[] = [];
   readonly #table: Table;
   readonly #columns: RecognisedColumns;
+  readonly #onColumn: () => void;
 
-  constructor(table: Table, columns: RecognisedColumns) {
+  /** @param onColumn told whenever a column has been gone through */
+  constructor(table: Table, columns: RecognisedColumns, onColumn: () => void = () => {}) {
     this.#table = table;
     this.#columns = columns;
+    this.#onColumn = onColumn;
   }
 
   /** null where the file has no such column. */
@@ -44,7 +47,9 @@ export class CellReader {
   }
 
   textsAt(columnIndex: number): readonly string[] {
-    return columnTexts(this.#table.rows, columnIndex);
+    const texts = columnTexts(this.#table.rows, columnIndex);
+    this.#onColumn();
+    return texts;
   }
 
   timeForm(role: "date" | "dateTime"): TimeForm {
@@ -75,6 +80,7 @@ export class CellReader {
     const column = this.#columns.used[role];
     if (!column) return null;
     const values = this.#written(role, column);
+    this.#onColumn();
     this.#dropSentinels(role, column.columnIndex, values);
     const { unit } = MEASURED[role];
     const from = column.unit ?? unit;

@@ -4,6 +4,7 @@ import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withou
 import { readHeaderCell } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
 import { chosenRows, rowsBetween } from "./rows.ts";
+import type { OnShare } from "./share.ts";
 import type { Table } from "./table.ts";
 import { TextRows } from "./text-rows.ts";
 
@@ -199,14 +200,16 @@ function candidateIn(text: string): Candidate | null {
  * The table in a text, or null when there is none. A header repeated further down, as in joined files, is taken out.
  * @param onShare told now and then which share of the text has been gone through
  */
-export function findTable(text: string, onShare?: (doneFrac: number) => void): Table | null {
+export function findTable(text: string, onShare?: OnShare): Table | null {
   const named = bestByNames(text);
   const read = named === null ? withHeaderUncommented(text) : text;
   const candidate = named ?? candidateIn(read);
   if (candidate === null) return withoutHeader(read);
   const all = new TextRows(read, candidate.delimiter, onShare);
   let at = 0;
-  while (all.lineIndexAt(at) !== candidate.headerLineIndex) at += 1;
+  while (at < all.length && all.lineIndexAt(at) < candidate.headerLineIndex) at += 1;
+  // A stretch of lines can begin within a quotation, and what looks like a header there is none.
+  if (at === all.length) return null;
   // A second line of names stands just above or below, and the units below that.
   const near = rowsBetween(all, 0, at + ROWS_TO_NUMBERS);
   const names = namesAt(near, at, candidate.delimiter);

@@ -5,6 +5,7 @@ import { type BadCell, CellReader } from "./cell-reader.ts";
 import { statedFlags } from "./quality-flags.ts";
 import { type RecognisedColumns, VERTICAL_ROLES } from "./recognise-columns.ts";
 import { type RowTimes, readRowTimes } from "./row-times.ts";
+import type { OnShare } from "./share.ts";
 import type { Table } from "./table.ts";
 import { readVertical, type Vertical } from "./vertical.ts";
 
@@ -82,8 +83,10 @@ function isGauge(table: Table, { used }: RecognisedColumns): boolean {
 }
 
 /** Needs a temperature column among the used ones; without it temperature is missing throughout. */
-export function readMeasuredRows(table: Table, columns: RecognisedColumns): MeasuredRows {
-  const reader = new CellReader(table, columns);
+export function readMeasuredRows(table: Table, columns: RecognisedColumns, onShare: OnShare): MeasuredRows {
+  const columnCount = Object.keys(columns.used).length;
+  let doneCount = 0;
+  const reader = new CellReader(table, columns, () => onShare(Math.min(1, ++doneCount / columnCount)));
   const { rows } = table;
   const isGaugePressure = isGauge(table, columns);
   const { issues: verticalIssues, ...vertical } = readVertical(reader, isGaugePressure);

@@ -6,6 +6,7 @@ import { exchangeTable } from "./exchange-csv.ts";
 import { unreadFormat } from "./file-format.ts";
 import { findTable } from "./find-header.ts";
 import { readTable } from "./read-table.ts";
+import { type OnShare, untold, within } from "./share.ts";
 
 const error = (code: string, message: string): Issue => ({ severity: "error", code, message });
 
@@ -25,14 +26,22 @@ function readText(bytes: Uint8Array): Outcome<DecodedText> {
  * Reads a file into casts. Every decision is in the result: encoding, delimiter, what each column is and why, what tells
  * casts apart, rows left out. Nothing is guessed without an issue that says so; a file that cannot be read gives errors.
  * @param answers what the user has said about columns; it stands above everything the file says
+ * @param onShare told now and then which share of the work is done
  */
-export function readCastFile(fileName: string, bytes: Uint8Array, answers?: ReadingAnswers): Outcome<FileReading> {
+export function readCastFile(
+  fileName: string,
+  bytes: Uint8Array,
+  answers?: ReadingAnswers,
+  onShare: OnShare = untold,
+): Outcome<FileReading> {
   const decoded = readText(bytes);
   if (!decoded.ok) return decoded;
-  const table = exchangeTable(decoded.value.text) ?? findTable(decoded.value.text);
+  onShare(0.05);
+  const { text, encoding } = decoded.value;
+  const table = exchangeTable(text) ?? findTable(text, within(onShare, 0.05, 0.2));
   if (table === null) {
     const message = 'no table in the file; expected a row of headers such as "Depth (m)" above rows of numbers';
     return failed(error("no-table", message));
   }
-  return readTable({ fileName, encoding: decoded.value.encoding }, table, answers);
+  return readTable({ fileName, encoding }, table, answers, within(onShare, 0.2, 1));
 }

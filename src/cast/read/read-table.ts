@@ -9,6 +9,7 @@ import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
 import { rowsBetween } from "./rows.ts";
+import { type OnShare, untold, within } from "./share.ts";
 import { type RowGroup, splitCasts } from "./split-casts.ts";
 import type { Table, TableSource } from "./table.ts";
 
@@ -90,6 +91,7 @@ export function readTable(
   source: TableSource,
   found: Table,
   answers: ReadingAnswers = NO_ANSWERS,
+  onShare: OnShare = untold,
 ): Outcome<FileReading> {
   const lengths = rowLengthIssues(found);
   if (lengths.some((issue) => issue.severity === "error")) return failed(...lengths);
@@ -111,18 +113,24 @@ export function readTable(
     casts: [],
     issues: [...tableIssues(found), ...lengths, ...columns.issues, ...check.questions.map(asIssue)],
   };
-  return check.isWaiting ? succeeded(reading) : withCasts(reading, table, columns);
+  return check.isWaiting ? succeeded(reading) : withCasts(reading, table, columns, onShare);
 }
 
 /** The rows of a table whose columns are known. */
-function withCasts(reading: FileReading, table: Table, columns: RecognisedColumns): Outcome<FileReading> {
-  const rows = readMeasuredRows(table, columns);
+function withCasts(
+  reading: FileReading,
+  table: Table,
+  columns: RecognisedColumns,
+  onShare: OnShare,
+): Outcome<FileReading> {
+  const rows = readMeasuredRows(table, columns, within(onShare, 0, 0.8));
   const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...checkRows(rows)];
   const asked = askAboutVertical(table, columns, rows);
   if (asked !== null) return succeeded(waitingFor(asked, { ...reading, issues: [...issues, asIssue(asked)] }));
   const { groups, splitBy } = splitCasts(rows);
   const sorted = withTwoSamples(castsOf(rows, groups, reading.fileName));
   if (!sorted.ok) return sorted;
+  onShare(1);
   const { casts, issues: castIssues } = sorted.value;
   const seen = rows.isAbsolute ? reading.columns.map(knownAbsolute) : reading.columns;
   return succeeded({ ...reading, columns: seen, splitBy, casts, issues: [...issues, ...castIssues] });

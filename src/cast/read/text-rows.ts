@@ -6,6 +6,7 @@
 import Papa from "papaparse";
 import { type Delimiter, isCommentLine, keptText } from "./parse-table.ts";
 import type { Rows } from "./rows.ts";
+import { type OnShare, untold } from "./share.ts";
 
 /** A list of whole numbers that grows. */
 class Places {
@@ -42,7 +43,7 @@ export class TextRows implements Rows {
    * @param text line ends all "\n"
    * @param onShare told now and then which share of the text is done
    */
-  constructor(text: string, delimiter: Delimiter, onShare: (doneFrac: number) => void = () => {}) {
+  constructor(text: string, delimiter: Delimiter, onShare: OnShare = untold) {
     this.#text = text;
     this.#delimiter = delimiter;
     this.hasOpenQuote = this.#findRows(onShare);
@@ -97,7 +98,7 @@ export class TextRows implements Rows {
   }
 
   /** Whether a quotation is left open. */
-  #findRows(onShare: (doneFrac: number) => void): boolean {
+  #findRows(onShare: OnShare): boolean {
     const text = this.#text;
     let start = 0;
     let lineIndex = 1;
