@@ -35,20 +35,29 @@ export function oneWay(evidence: Evidence, inTime: readonly number[], way: "auto
   const soakEndIndex = taken === "down" ? soakEnd(depthsM.slice(0, depthsM.indexOf(deepestM) + 1)) : 0;
   const startIndex = taken === "down" ? soakEndIndex : depthsM.findIndex(isAtBottom);
   const lastIndex = taken === "down" ? depthsM.findLastIndex(isAtBottom) : depthsM.length - 1;
-  /** The sample that the next one has to pass. */
+  /** The sample that the next one has to pass, and what is said of those that do not. */
   let furthest = startIndex;
+  let reason: string | null = null;
+  const reasonNow = (): string => {
+    const passed = `${written(depthsM[furthest]!)} m at line ${samples.lineIndex[wet[furthest]!]}`;
+    const words = taken === "down" ? `not deeper than ${passed}` : `not shallower than ${passed}`;
+    return `${words}: the probe had turned or stood still`;
+  };
+  const passOn = (k: number): void => {
+    furthest = k;
+    reason = null;
+  };
   depthsM.forEach((depth, k) => {
     if (k < soakEndIndex) leaveOut("soak", k, null, "recorded while the probe waited near the surface");
     else if (k < startIndex) leaveOut("other-way", k, null, "recorded on the way down; the way up is used");
     else if (k > lastIndex) leaveOut("other-way", k, null, "recorded on the way up; the way down is used");
-    else if (k === startIndex) furthest = k;
-    else if (taken === "down" ? depth > depthsM[furthest]! : depth < depthsM[furthest]!) furthest = k;
+    else if (k === startIndex) passOn(k);
+    else if (taken === "down" ? depth > depthsM[furthest]! : depth < depthsM[furthest]!) passOn(k);
     else {
       const backM = Math.abs(depthsM[furthest]! - depth);
       const flag = backM > STILL_M ? QUALITY_FLAG.suspect : null;
-      const passed = `${written(depthsM[furthest]!)} m at line ${samples.lineIndex[wet[furthest]!]}`;
-      const words = taken === "down" ? `not deeper than ${passed}` : `not shallower than ${passed}`;
-      leaveOut("pressure-reversal", k, flag, `${words}: the probe had turned or stood still`);
+      reason ??= reasonNow();
+      leaveOut("pressure-reversal", k, flag, reason);
     }
   });
   return findings;
