@@ -1,11 +1,11 @@
 import { signal } from "@preact/signals";
 import { failed } from "../base/index.ts";
-import type { ReadingAnswers, StationList } from "../cast/index.ts";
+import type { ColumnAnswer, ReadingAnswers, StationList } from "../cast/index.ts";
 import { type ReadRequest, Stopped } from "../worker/index.ts";
 import { keepFile, keptFile } from "./kept-files.ts";
 import { noteSamplesKey } from "./samples-keys.ts";
 import { type KeptReading, readingsOf } from "./state/app-state.ts";
-import type { ReadFile, SurveyStart } from "./state/files.ts";
+import { type ReadFile, type SurveyStart, withAnswer } from "./state/files.ts";
 import { dispatch, isStationPanelOpen, openReading, state } from "./store.ts";
 import { threads } from "./threads.ts";
 
@@ -24,12 +24,10 @@ export const filesGone = signal<readonly string[]>([]);
 /** Reads files in the background, each on its own: what one has wrong does not keep the others out. */
 export async function readFiles(files: readonly File[], start?: SurveyStart): Promise<void> {
   const read: { readonly file: File; readonly answer: ReadFile }[] = [];
-  for (const { file, job } of files.map((file) => ({ file, job: startJob(file.name) }))) {
-    if (readingJobs.value.includes(job)) {
-      const answer = await readOne({ file, remembered: remembered() });
-      if (answer) read.push({ file, answer });
-    }
-    endJob(job);
+  const jobs = files.map((file) => ({ file, job: startJob(file.name) }));
+  for (const { file, job } of jobs) {
+    const answer = await inTurn(job, () => readOne({ file, remembered: remembered() }));
+    if (answer) read.push({ file, answer });
   }
   if (read.length === 0) return;
   const answers = read.map(({ answer }) => answer).filter(({ stations }) => !stations);
@@ -40,28 +38,39 @@ export async function readFiles(files: readonly File[], start?: SurveyStart): Pr
   for (const { answer } of read) if (answer.stations) takeStations(answer.stations);
 }
 
+interface Rereading {
+  readonly answers: ReadingAnswers;
+  readonly sheet?: string;
+}
+
+/** What files are about to be read again with; a later wish takes the place of one that waits. */
+const wishes = new Map<string, Rereading>();
+
+/** One more answer about a file, on top of those that are on their way. */
+export const answerColumn = (reading: KeptReading, answer: ColumnAnswer): Promise<void> =>
+  readAgain(reading, { answers: withAnswer((wishes.get(reading.fileName) ?? reading).answers, answer) }, "keep");
+
 /** Reads a file of the survey again, with other answers or another sheet. */
 export async function readAgain(
   reading: KeptReading,
-  change: { readonly answers: ReadingAnswers; readonly sheet?: string },
+  wish: Rereading,
   memory: "keep" | "forget" | "as-it-is",
 ): Promise<void> {
+  const { fileName } = reading;
   const file = await keptFile(reading);
   if (!file) {
-    filesGone.value = [...filesGone.value, reading.fileName];
+    filesGone.value = [...filesGone.value, fileName];
     return;
   }
-  const wanted = change.sheet ?? reading.sheet;
-  const sheet = wanted === null ? {} : { sheet: wanted };
-  const job = startJob(reading.fileName);
-  const answer = await readOne({
-    file,
-    remembered: {},
-    answers: change.answers,
-    ...sheet,
-  });
-  endJob(job);
-  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName: reading.fileName }, ...sheet, memory });
+  wishes.set(fileName, wish);
+  const job = startJob(fileName);
+  const sheetName = wish.sheet ?? reading.sheet;
+  const sheet = sheetName === null ? {} : { sheet: sheetName };
+  const answer = await inTurn(job, () =>
+    wishes.get(fileName) === wish ? readOne({ file, remembered: {}, answers: wish.answers, ...sheet }) : null,
+  );
+  if (wishes.get(fileName) === wish) wishes.delete(fileName);
+  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName }, ...sheet, memory });
 }
 
 /** Stops reading a file, or takes one that waits out of the queue. */
@@ -90,6 +99,19 @@ function startJob(fileName: string): ReadingJob {
 const endJob = (job: ReadingJob): void => {
   readingJobs.value = readingJobs.value.filter((other) => other !== job);
 };
+
+let lastTurn: Promise<unknown> = Promise.resolve();
+
+/** One reading at a time, in the order they were asked for; one that has been stopped is passed over. */
+function inTurn<T>(job: ReadingJob, read: () => Promise<T> | null): Promise<T | null> {
+  const turn = lastTurn.then(async () => {
+    const result = readingJobs.value.includes(job) ? await read() : null;
+    endJob(job);
+    return result;
+  });
+  lastTurn = turn.catch(() => undefined);
+  return turn;
+}
 
 /** Null where the user stopped it. */
 async function readOne(request: ReadRequest): Promise<ReadFile | null> {

@@ -27,8 +27,7 @@ async function solveInShares(wanted: Survey): Promise<void> {
   const edits = editsByCast(wanted.flagEdits);
   while (waiting.length > 0 && !isCalledOff()) {
     const share = nextShare(waiting);
-    if (share.length < waiting.length || results.size > share.length)
-      progress.value = { doneCount: results.size, allCount: wanted.casts.length };
+    progress.value = { doneCount: results.size, allCount: wanted.casts.length };
     const packed = await threads.solver.solve(
       { ...terms, flagEdits: share.flatMap((cast) => edits.get(cast.id) ?? []) },
       share.map((cast) => onShelf(cast, samplesKeyOf(cast.samples))),

@@ -1,7 +1,6 @@
 import type { ColumnAnswer } from "../../cast/index.ts";
-import { filesGone, readAgain } from "../reading-files.ts";
+import { answerColumn, filesGone, readAgain } from "../reading-files.ts";
 import { type KeptReading, readingsOf } from "../state/app-state.ts";
-import { withAnswer } from "../state/files.ts";
 import { openReading, state } from "../store.ts";
 import { Choice } from "./choice.tsx";
 import { IssueList } from "./issue-list.tsx";
@@ -14,8 +13,7 @@ const NO_ANSWERS = { columns: [] };
 export function ReadingPanel() {
   const reading = readingsOf(state.value).find(({ fileName }) => fileName === openReading.value);
   if (!reading) return null;
-  const answer = (given: ColumnAnswer): void =>
-    void readAgain(reading, { answers: withAnswer(reading.answers, given) }, "keep");
+  const answer = (given: ColumnAnswer): void => void answerColumn(reading, given);
   const isGone = filesGone.value.includes(reading.fileName);
   return (
     <section class="panel-above reading" aria-label={`How ${reading.fileName} was read`}>
