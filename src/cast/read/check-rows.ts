@@ -10,13 +10,17 @@ import { chosenRows, type Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
 import { isWeightOfAir } from "./vertical.ts";
 
+/** No table of samples has more; what has was cut at the wrong sign, and would take very long to go through. */
+const MOST_COLUMNS = 2000;
+
 /** Whether a row holds something beyond the last column that has a name. */
 function isWide({ rows, header }: Table, row: number): boolean {
-  for (let column = header.cells.length; ; column++) {
-    const cell = rows.cellAt(row, column);
-    if (cell === undefined) return false;
-    if (cell !== "") return true;
-  }
+  const width = header.cells.length;
+  if (rows.cellAt(row, width) === undefined) return false;
+  return rows
+    .cellsAt(row)
+    .slice(width)
+    .some((cell) => cell !== "");
 }
 
 const isShort = ({ rows, header }: Table, row: number): boolean =>
@@ -124,8 +128,14 @@ function offTheEarthIssue(words: string, degrees: Float64Array | null, largestDe
 }
 
 /** What the lengths of the rows say; only an error keeps them from being used. */
-export const rowLengthIssues = (table: Table): readonly Issue[] =>
-  [widthIssue(table), shortIssue(table)].filter((issue) => issue !== null);
+export function rowLengthIssues(table: Table): readonly Issue[] {
+  const count = table.header.cells.length;
+  if (count > MOST_COLUMNS) {
+    const message = `the header has ${count} columns, expected at most ${MOST_COLUMNS}; take out what holds no samples`;
+    return [{ severity: "error", code: "too-many-columns", message, line: table.header.lineIndex }];
+  }
+  return [widthIssue(table), shortIssue(table)].filter((issue) => issue !== null);
+}
 
 /** What the values say, taken together. */
 export function checkRows(rows: MeasuredRows): readonly Issue[] {

@@ -10,7 +10,10 @@ export interface NumberStyle {
 }
 
 const MISSING = /^(|n\.?[ad]\.?|#?n\/a|nan|null|none|missing|-{1,3}|–|—|\.|\*+|\?)$/i;
-const NUMBER = { ".": /^[-+]?(\d+\.?\d*|\.\d+)(e[-+]?\d+)?$/i, ",": /^[-+]?(\d+,?\d*|,\d+)(e[-+]?\d+)?$/i } as const;
+const NUMBER = {
+  ".": /^[-+]?(\d+(\.\d*)?|\.\d+)(e[-+]?\d+)?$/i,
+  ",": /^[-+]?(\d+(,\d*)?|,\d+)(e[-+]?\d+)?$/i,
+} as const;
 const GROUPED = {
   ".": /^[-+]?\d{1,3}(\.\d{3})+(,\d*)?$/,
   ",": /^[-+]?\d{1,3}(,\d{3})+(\.\d*)?$/,

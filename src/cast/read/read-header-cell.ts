@@ -17,6 +17,9 @@ export interface HeaderMeaning {
   readonly written: WrittenUnit | null;
 }
 
+/** Names and units are shorter; so much also bounds the work on them. */
+const LONGEST_NAME = 200;
+
 const ROLES = Object.keys(COLUMN_NAMES) as readonly ColumnRole[];
 
 const lettersAndDigits = (text: string): string =>
@@ -55,7 +58,9 @@ const HEMISPHERE = /^(deg(rees?)?|[°º])?[\s_.]*([nsew]|north|south|east|west)$
 
 /** The first of the texts that is a unit of the kind, else the first that is no mere remark. */
 export function writtenUnit(texts: readonly string[], kind: QuantityKind): WrittenUnit | null {
-  const stripped = texts.map((text) => text.replace(/(@|\bat\b).*$|\babs(olute)?\b|\bgauge\b/gi, "").trim());
+  const stripped = texts
+    .map((text) => text.slice(0, LONGEST_NAME))
+    .map((text) => text.replace(/(@|\bat\b).*$|\babs(olute)?\b|\bgauge\b/gi, "").trim());
   for (const text of stripped) {
     const unit = kind === "angle" && HEMISPHERE.test(text) ? unitByName("deg") : unitByName(text, kind);
     if (unit !== null) return { text, unit };
@@ -107,5 +112,6 @@ function trailing(header: string): HeaderMeaning | null {
 
 /** Role and unit of a header, or null when its name is none that we use. */
 export function readHeaderCell(header: string): HeaderMeaning | null {
+  if (header.length > LONGEST_NAME) return null;
   return bracketed(header) ?? meaningOf(header, [], header) ?? trailing(header);
 }

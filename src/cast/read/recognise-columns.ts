@@ -86,6 +86,19 @@ function whichTwin(winner: Contender, contenders: readonly Contender[]): Decisio
   });
 }
 
+/** By role, where it has to be asked. */
+function twinsOf(
+  winners: ReadonlyMap<ColumnRole, Contender>,
+  contenders: readonly Contender[],
+): ReadonlyMap<ColumnRole, Decision> {
+  return new Map(
+    [...winners].flatMap(([role, winner]) => {
+      const asked = whichTwin(winner, contenders);
+      return asked === null ? [] : [[role, asked]];
+    }),
+  );
+}
+
 /** Heights above a datum are depths only against the height of the water surface. */
 function settleElevation(decision: Decision, decisions: readonly Decision[], headers: readonly string[]): Decision {
   const { reading } = decision;
@@ -130,6 +143,7 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
   const contenders = all.filter((contender) => contender !== null);
   const markOfTable = tableMark(contenders.flatMap((contender) => contender.evidence ?? []));
   const winners = winnersOf(contenders);
+  const twins = twinsOf(winners, contenders);
   const flags: FlagColumn[] = [];
   const first = all.map((contender, columnIndex): Decision => {
     const place = { columnIndex, header: headers[columnIndex]! };
@@ -141,9 +155,9 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
     }
     if (contender === null) return whyUnused(place, answerName(headers, columnIndex));
     const winner = winners.get(contender.role)!;
-    const asked = whichTwin(winner, contenders);
+    const asked = twins.get(contender.role);
     if (winner === contender) return asked ?? decide(contender, markOfTable);
-    const isAsked = asked !== null && contender.header === winner.header;
+    const isAsked = asked !== undefined && contender.header === winner.header;
     return isAsked
       ? leave(place, "which column of this name it is has to be said", "doubtful")
       : passOver(contender, winner);

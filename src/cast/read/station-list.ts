@@ -1,6 +1,7 @@
 /** A table of stations: where each is, how far along the channel and how deep the water is there. */
 import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
 import { CellReader } from "./cell-reader.ts";
+import { rowLengthIssues } from "./check-rows.ts";
 import { decodeText } from "./decode-text.ts";
 import { unreadFormat } from "./file-format.ts";
 import { findTable } from "./find-header.ts";
@@ -37,6 +38,8 @@ export function readStationList(fileName: string, bytes: Uint8Array): Outcome<St
       error("no-table", 'no table of text in the file; expected a row of headers such as "Station,Latitude,Longitude"'),
     );
   }
+  const lengths = rowLengthIssues(table);
+  if (lengths.some((issue) => issue.severity === "error")) return failed(...lengths);
   const columns = recogniseColumns(table, { columns: [] });
   const reader = new CellReader(table, columns);
   const names = reader.texts("station");
@@ -74,7 +77,11 @@ export function readStationList(fileName: string, bytes: Uint8Array): Outcome<St
     ];
   });
   if (stations.length === 0) return failed(error("no-station-list", "the list names no station"));
-  const issues = [...columns.issues.filter((issue) => issue.code !== "two-columns-for-one-role"), ...reader.issues];
+  const issues = [
+    ...lengths,
+    ...columns.issues.filter((issue) => issue.code !== "two-columns-for-one-role"),
+    ...reader.issues,
+  ];
   if (repeated.size > 0) {
     const message = `${[...repeated].slice(0, 5).join(", ")} stand more than once in the list; the first row counts`;
     issues.push({ severity: "warning", code: "station-repeated", message });

@@ -1,0 +1,79 @@
+/**
+ * The long run, in chunks of seeds: each in a thread that is watched, so that a hang is found and named too.
+ *
+ *   npx rolldown tests/fuzz/run-text-fuzz.ts --platform node -f esm -o /tmp/text-fuzz.mjs
+ *   node /tmp/text-fuzz.mjs 1 1000000
+ *
+ * Arguments: the first seed, how many, and the folder of the corpus (tests/corpus/files of the folder it is run in).
+ */
+import { isMainThread, parentPort, Worker, workerData } from "node:worker_threads";
+import { corpusIn, type Failure, fuzzText } from "./text-fuzz.ts";
+
+interface Chunk {
+  readonly folder: string;
+  readonly firstSeed: number;
+  readonly count: number;
+  /** The seed in hand. */
+  readonly seedInHand: SharedArrayBuffer;
+}
+
+const CHUNK = 20_000;
+const HANG_MS = 10_000;
+const LOOK_MS = 500;
+
+/** What came of a chunk: how many inputs it got through, and what was wrong. */
+interface Done {
+  readonly count: number;
+  readonly failures: readonly Failure[];
+}
+
+/** A chunk in a thread of its own; a seed that does not come to an end is a failure and ends the chunk there. */
+function runChunk(chunk: Chunk): Promise<Done> {
+  return new Promise((resolve, reject) => {
+    const worker = new Worker(new URL(import.meta.url), { workerData: chunk });
+    const inHand = new Int32Array(chunk.seedInHand);
+    let [seed, sinceMs] = [0, performance.now()];
+    const watch = setInterval(() => {
+      const now = Atomics.load(inHand, 0);
+      if (now !== seed) [seed, sinceMs] = [now, performance.now()];
+      else if (performance.now() - sinceMs > HANG_MS) {
+        clearInterval(watch);
+        const done = { count: seed - chunk.firstSeed + 1, failures: [{ seed, what: "hangs" }] };
+        void worker.terminate().then(() => resolve(done));
+      }
+    }, LOOK_MS);
+    worker.once("message", (failures: readonly Failure[]) => {
+      clearInterval(watch);
+      resolve({ count: chunk.count, failures });
+    });
+    worker.once("error", (error) => {
+      clearInterval(watch);
+      reject(error);
+    });
+  });
+}
+
+async function runAll(args: readonly string[]): Promise<void> {
+  const [firstSeed, count] = [Number(args[0] ?? 1), Number(args[1] ?? CHUNK)];
+  const folder = args[2] ?? "tests/corpus/files";
+  const startMs = performance.now();
+  let failureCount = 0;
+  for (let done = 0; done < count; ) {
+    const size = Math.min(CHUNK, count - done);
+    const seedInHand = new SharedArrayBuffer(4);
+    const chunk = await runChunk({ folder, firstSeed: firstSeed + done, count: size, seedInHand });
+    done += chunk.count;
+    failureCount += chunk.failures.length;
+    for (const { seed, what } of chunk.failures.slice(0, 20)) process.stdout.write(`seed ${seed}: ${what}\n`);
+    const perSecond = Math.round(done / ((performance.now() - startMs) / 1000));
+    process.stdout.write(`${done} inputs, ${failureCount} failures, ${perSecond} a second\n`);
+  }
+  process.exitCode = failureCount === 0 ? 0 : 1;
+}
+
+if (isMainThread) await runAll(process.argv.slice(2));
+else {
+  const { folder, firstSeed, count, seedInHand } = workerData as Chunk;
+  const inHand = new Int32Array(seedInHand);
+  parentPort!.postMessage(fuzzText(corpusIn(folder), firstSeed, count, (seed) => Atomics.store(inHand, 0, seed)));
+}
