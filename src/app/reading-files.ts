@@ -11,6 +11,7 @@ import { threads } from "./threads.ts";
 
 /** A file that is being read or waits for its turn. */
 export interface ReadingJob {
+  readonly number: number;
   readonly fileName: string;
   /** Null while nothing is known. */
   readonly doneFrac: number | null;
@@ -26,7 +27,7 @@ export async function readFiles(files: readonly File[], start?: SurveyStart): Pr
   const read: { readonly file: File; readonly answer: ReadFile }[] = [];
   const jobs = files.map((file) => ({ file, job: startJob(file.name) }));
   for (const { file, job } of jobs) {
-    const answer = await inTurn(job, () => readOne({ file, remembered: remembered() }));
+    const answer = await inTurn(job, () => readOne(job, { file, remembered: remembered() }));
     if (answer) read.push({ file, answer });
   }
   if (read.length === 0) return;
@@ -67,7 +68,7 @@ export async function readAgain(
   const sheetName = wish.sheet ?? reading.sheet;
   const sheet = sheetName === null ? {} : { sheet: sheetName };
   const answer = await inTurn(job, () =>
-    wishes.get(fileName) === wish ? readOne({ file, remembered: {}, answers: wish.answers, ...sheet }) : null,
+    wishes.get(fileName) === wish ? readOne(job, { file, remembered: {}, answers: wish.answers, ...sheet }) : null,
   );
   if (wishes.get(fileName) === wish) wishes.delete(fileName);
   if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName }, ...sheet, memory });
@@ -75,7 +76,7 @@ export async function readAgain(
 
 /** Stops reading a file, or takes one that waits out of the queue. */
 export function stopReading(job: ReadingJob): void {
-  const isBeingRead = readingJobs.value[0] === job;
+  const isBeingRead = readingJobs.value.findIndex(isSame(job)) === 0;
   endJob(job);
   if (isBeingRead) threads.stopReading();
 }
@@ -90,14 +91,22 @@ const remembered = () => state.value.history.present.remembered;
 const nameFor = (read: readonly ReadFile[]): string =>
   read.length === 1 ? read[0]!.fileName.replace(/\.[^.]*$/, "") : "Survey";
 
+let lastNumber = 0;
+
 function startJob(fileName: string): ReadingJob {
-  const job = { fileName, doneFrac: null };
+  const job = { number: ++lastNumber, fileName, doneFrac: null };
   readingJobs.value = [...readingJobs.value, job];
   return job;
 }
 
+const isSame = (a: ReadingJob) => (b: ReadingJob) => a.number === b.number;
+
 const endJob = (job: ReadingJob): void => {
-  readingJobs.value = readingJobs.value.filter((other) => other !== job);
+  readingJobs.value = readingJobs.value.filter((other) => !isSame(job)(other));
+};
+
+const advance = (job: ReadingJob, doneFrac: number): void => {
+  readingJobs.value = readingJobs.value.map((other) => (isSame(job)(other) ? { ...job, doneFrac } : other));
 };
 
 let lastTurn: Promise<unknown> = Promise.resolve();
@@ -105,7 +114,7 @@ let lastTurn: Promise<unknown> = Promise.resolve();
 /** One reading at a time, in the order they were asked for; one that has been stopped is passed over. */
 function inTurn<T>(job: ReadingJob, read: () => Promise<T> | null): Promise<T | null> {
   const turn = lastTurn.then(async () => {
-    const result = readingJobs.value.includes(job) ? await read() : null;
+    const result = readingJobs.value.some(isSame(job)) ? await read() : null;
     endJob(job);
     return result;
   });
@@ -114,10 +123,10 @@ function inTurn<T>(job: ReadingJob, read: () => Promise<T> | null): Promise<T | 
 }
 
 /** Null where the user stopped it. */
-async function readOne(request: ReadRequest): Promise<ReadFile | null> {
+async function readOne(job: ReadingJob, request: ReadRequest): Promise<ReadFile | null> {
   const { file, answers } = request;
   try {
-    const { samplesKeys, ...answer } = await threads.read(request);
+    const { samplesKeys, ...answer } = await threads.read(request, (doneFrac) => advance(job, doneFrac));
     if (answer.outcome.ok)
       answer.outcome.value.casts.forEach(({ samples }, k) => {
         noteSamplesKey(samples, samplesKeys[k]!);

@@ -20,8 +20,15 @@ export function keepSolved(): void {
 async function solveInShares(wanted: Survey): Promise<void> {
   const results = new Map<string, AnsweredCast>();
   const isCalledOff = (): boolean => survey.peek() !== wanted;
+  const breath = breathing();
   for (const kept of stillValid(solved.peek(), wanted)) results.set(kept.cast.id, kept);
-  if (solved.peek().survey.levels !== wanted.levels) await moveLevels(results, wanted, isCalledOff);
+  if (solved.peek().survey.levels !== wanted.levels) {
+    for (const [id, result] of results) {
+      if (isCalledOff()) return;
+      results.set(id, atLevels(wanted, result));
+      await breath();
+    }
+  }
   let waiting = wanted.casts.filter((cast) => !results.has(cast.id));
   const { casts: _, name: __, ...terms } = wanted;
   const edits = editsByCast(wanted.flagEdits);
@@ -32,9 +39,10 @@ async function solveInShares(wanted: Survey): Promise<void> {
       { ...terms, flagEdits: share.flatMap((cast) => edits.get(cast.id) ?? []) },
       share.map((cast) => onShelf(cast, samplesKeyOf(cast.samples))),
     );
-    packed.forEach((answer, k) => {
+    for (const [k, answer] of packed.entries()) {
       results.set(share[k]!.id, unpackCast(answer, share[k]!));
-    });
+      await breath();
+    }
     waiting = waiting.slice(share.length);
   }
   if (isCalledOff()) return;
@@ -43,21 +51,20 @@ async function solveInShares(wanted: Survey): Promise<void> {
   solved.value = { survey: wanted, casts: wanted.casts.map((cast) => results.get(cast.id)!) };
 }
 
+/** Reads the levels off a column that stands. */
+function atLevels(wanted: Survey, { drawn, marked, ...solvedCast }: AnsweredCast): AnsweredCast {
+  return { ...solveLevels(wanted, solvedCast), drawn, marked };
+}
+
 /** Longer than this without a pause would be felt. */
 const MOST_AT_ONCE_MS = 12;
 
-/** Reads the levels off columns that stand. */
-async function moveLevels(
-  results: Map<string, AnsweredCast>,
-  wanted: Survey,
-  isCalledOff: () => boolean,
-): Promise<void> {
+/** A pause for the page whenever much has been done since the last. */
+function breathing(): () => Promise<void> {
   let pauseAtMs = performance.now() + MOST_AT_ONCE_MS;
-  for (const [id, { drawn, marked, ...solvedCast }] of results) {
-    results.set(id, { ...solveLevels(wanted, solvedCast), drawn, marked });
-    if (performance.now() < pauseAtMs) continue;
+  return async () => {
+    if (performance.now() < pauseAtMs) return;
     await new Promise((resolve) => setTimeout(resolve));
-    if (isCalledOff()) return;
     pauseAtMs = performance.now() + MOST_AT_ONCE_MS;
-  }
+  };
 }

@@ -32,7 +32,7 @@ export interface MarkedSamples {
   readonly marks: Marks;
 }
 
-const MOST_MARKS_COUNT = 1500;
+const MOST_MARKS_COUNT = 600;
 
 /** Which samples of a cast are flagged or left out, where they stand and why. */
 export function markedSamples(solved: SolvedCast, unmeasuredPracticalSalinity: number): MarkedSamples {

@@ -45,13 +45,16 @@ export const readerTasks = {
     solver = wrap<SolverTasks>(port);
   },
 
-  /** Reads one file; its casts are at the solver when the answer comes. */
-  async read(request: ReadRequest): Promise<ReadAnswer> {
+  /**
+   * Reads one file; its casts are at the solver when the answer comes.
+   * @param onShare told now and then which share is done, from 0 to 1
+   */
+  async read(request: ReadRequest, onShare: (doneFrac: number) => void): Promise<ReadAnswer> {
     const { file, sheet, remembered } = request;
     const bytes = new Uint8Array(await file.arrayBuffer());
     const sha256 = await sha256Of(bytes);
     const attempt = (answers: ReadingAnswers): Promise<Outcome<AnyFileReading>> =>
-      readFile(file.name, bytes, { answers, ...(sheet === undefined ? {} : { sheet }) });
+      readFile(file.name, bytes, { answers, onShare, ...(sheet === undefined ? {} : { sheet }) });
 
     let answers = request.answers ?? NO_ANSWERS;
     let outcome = await attempt(answers);

@@ -1,4 +1,4 @@
-import { createEndpoint, type Remote, transfer, wrap } from "comlink";
+import { createEndpoint, proxy, type Remote, transfer, wrap } from "comlink";
 import type { ReadAnswer, ReaderTasks, ReadRequest } from "./reader-tasks.ts";
 import type { SolverTasks } from "./solver-tasks.ts";
 
@@ -10,8 +10,11 @@ export class Stopped extends Error {
 /** The page's background threads: one solves and keeps the samples, one reads and can be stopped at any moment. */
 export interface Threads {
   readonly solver: Remote<SolverTasks>;
-  /** Rejects with Stopped when the reading is stopped. */
-  readonly read: (request: ReadRequest) => Promise<ReadAnswer>;
+  /**
+   * Rejects with Stopped when the reading is stopped.
+   * @param onShare told now and then which share is done, from 0 to 1
+   */
+  readonly read: (request: ReadRequest, onShare: (doneFrac: number) => void) => Promise<ReadAnswer>;
   /** Ends the reading thread, whatever it is doing, and starts a new one. */
   readonly stopReading: () => void;
 }
@@ -21,9 +24,9 @@ export function startThreads(): Threads {
   let reader = startReader(solver);
   return {
     solver,
-    read: async (request) => {
+    read: async (request, onShare) => {
       const { tasks, ended } = reader;
-      return Promise.race([(await tasks).read(request), ended]);
+      return Promise.race([(await tasks).read(request, proxy(onShare)), ended]);
     },
     stopReading: () => {
       reader.end();

@@ -1,8 +1,14 @@
+import { computed } from "@preact/signals";
 import { describeAtDepths, type Solution } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
 import { scientific, shownPercent, shownValue } from "../show/shown.ts";
-import { strongestStratification } from "../show/water-at.ts";
+import { type Strongest, strongestStratification } from "../show/water-at.ts";
 import { castInHand, state } from "../store.ts";
+
+const strongest = computed(() => {
+  const solution = castInHand.value?.solution;
+  return solution ? strongestStratification(solution.profile) : null;
+});
 
 /** The cast in hand in a few lines. */
 export function CastSummary() {
@@ -12,7 +18,7 @@ export function CastSummary() {
     <section aria-label="Summary">
       <h2>{inHand.cast.name}</h2>
       <dl>
-        {summaryRows(inHand.solution, state.value.system).map(([quantity, value]) => (
+        {summaryRows(inHand.solution, strongest.value, state.value.system).map(([quantity, value]) => (
           <div class="row" key={quantity}>
             <dt>{quantity}</dt>
             <dd>{value}</dd>
@@ -23,9 +29,12 @@ export function CastSummary() {
   );
 }
 
-function summaryRows({ column, profile }: Solution, system: DisplaySystem): readonly (readonly [string, string])[] {
+function summaryRows(
+  { column }: Solution,
+  strongest: Strongest | null,
+  system: DisplaySystem,
+): readonly (readonly [string, string])[] {
   const bottom = describeAtDepths(column, [column.bottomDepthM]);
-  const strongest = strongestStratification(profile);
   return [
     ["Samples used", String(column.n)],
     ["First sample at", shownValue(column.depthM[0]!, "depth", system)],

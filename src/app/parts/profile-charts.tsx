@@ -12,7 +12,7 @@ import {
   type SheetLayout,
 } from "../../charts/layout/index.ts";
 import { inMetres, inShownDepth, steppedDepthM, tidyDepthM } from "../show/plumb-steps.ts";
-import { levelInputs, plumbValues, profileSheet, type SheetSource } from "../show/profile-sheet.ts";
+import { isSameSheet, levelInputs, plumbValues, profileSheet, type SheetSource } from "../show/profile-sheet.ts";
 import { sampleMarks } from "../show/sample-marks.ts";
 import { shownValue } from "../show/shown.ts";
 import {
@@ -35,7 +35,12 @@ export function ProfileCharts() {
   const curves = useRef<SVGSVGElement>(null);
   const overlay = useRef<SVGSVGElement>(null);
   const size = useElementSize(frame);
-  const source = useComputed(sheetSource);
+  const drawnSource = useRef<SheetSource | null>(null);
+  const source = useComputed(() => {
+    const next = sheetSource();
+    if (!drawnSource.current || !isSameSheet(drawnSource.current, next)) drawnSource.current = next;
+    return drawnSource.current;
+  });
   const sheet = useComputed(() =>
     size.value.widthPx > 0 ? layOutSheet(profileSheet(source.value), size.value) : null,
   );
@@ -86,9 +91,9 @@ export function ProfileCharts() {
 
 function sheetSource(): SheetSource {
   const { castInHandId, colourIndexOf, system } = state.value;
-  const { levels } = survey.value;
+  const deepestLevelM = Math.max(0, ...survey.value.levels.map((level) => level.depthM));
   const { basis } = solved.value.survey;
-  return { solved: visibleCasts.value, castInHandId, colourIndexOf, basis, levels, system };
+  return { solved: visibleCasts.value, castInHandId, colourIndexOf, basis, deepestLevelM, system };
 }
 
 /** From where the plumb line hung when Shift was first held. */

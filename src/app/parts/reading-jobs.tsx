@@ -5,7 +5,7 @@ export function ReadingJobs() {
   return (
     <div role="status">
       {readingJobs.value.map((job, k) => (
-        <p key={k} class="job">
+        <p key={job.number} class="job">
           <span>
             {k === 0 ? "Reading" : "Waiting:"} {job.fileName}
             {job.doneFrac === null ? "" : ` ${Math.floor(job.doneFrac * 100)} %`}

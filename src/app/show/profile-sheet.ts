@@ -90,13 +90,24 @@ export interface SheetSource {
   readonly castInHandId: string | null;
   readonly colourIndexOf: Readonly<Record<string, number>>;
   readonly basis: Basis;
-  readonly levels: readonly Level[];
+  /** The charts reach down to it; 0 without levels. */
+  readonly deepestLevelM: number;
   readonly system: DisplaySystem;
 }
 
+/** Whether two sources draw the same sheet: then what is laid out stands, however much else has changed. */
+export const isSameSheet = (a: SheetSource, b: SheetSource): boolean =>
+  a.castInHandId === b.castInHandId &&
+  a.colourIndexOf === b.colourIndexOf &&
+  a.basis === b.basis &&
+  a.deepestLevelM === b.deepestLevelM &&
+  a.system === b.system &&
+  a.solved.length === b.solved.length &&
+  a.solved.every(({ drawn }, k) => drawn === b.solved[k]!.drawn);
+
 /** The sheet of linked profiles in the units shown; the cast in hand comes last, so that it is drawn on top. */
 export function profileSheet(source: SheetSource): SheetInput {
-  const { basis, system, levels } = source;
+  const { basis, system, deepestLevelM } = source;
   const drawn = source.solved.filter((entry) => entry.drawn !== null);
   drawn.sort((a, b) => Number(a.cast.id === source.castInHandId) - Number(b.cast.id === source.castInHandId));
   const curvesOf = (panel: PanelKind): CurveInput[] =>
@@ -109,11 +120,7 @@ export function profileSheet(source: SheetSource): SheetInput {
       firstSampleIndex: profile!.firstSampleIndex,
       lastSampleIndex: profile!.lastSampleIndex,
     }));
-  const deepestM = Math.max(
-    0,
-    ...drawn.map(({ solution }) => solution!.column.bottomDepthM),
-    ...levels.map((l) => l.depthM),
-  );
+  const deepestM = Math.max(deepestLevelM, ...drawn.map(({ solution }) => solution!.column.bottomDepthM));
   return {
     depthUnit: unitLabel("depth", system),
     deepest: inShownUnitOne(deepestM, "depth", system),

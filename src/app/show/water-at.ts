@@ -28,12 +28,20 @@ export function buoyancyAround(profile: Profile, depthM: number): number {
   return profile.buoyancyFrequencySquaredPerS2[low - 1] ?? Number.NaN;
 }
 
+export interface Strongest {
+  readonly perS2: number;
+  readonly depthM: number;
+}
+
 /** The most stratified interval between two samples. */
-export function strongestStratification(profile: Profile): { readonly perS2: number; readonly depthM: number } | null {
-  let strongest: { readonly perS2: number; readonly depthM: number } | null = null;
-  profile.buoyancyFrequencySquaredPerS2.forEach((perS2, k) => {
-    if (perS2 > (strongest?.perS2 ?? Number.NEGATIVE_INFINITY))
-      strongest = { perS2, depthM: (profile.depthM[k]! + profile.depthM[k + 1]!) / 2 };
-  });
-  return strongest;
+export function strongestStratification({ n, depthM, buoyancyFrequencySquaredPerS2 }: Profile): Strongest | null {
+  let strongest = -1;
+  let perS2 = Number.NEGATIVE_INFINITY;
+  for (let row = 0; row < n; row++) {
+    const value = buoyancyFrequencySquaredPerS2[row]!;
+    if (!(value > perS2)) continue;
+    strongest = row;
+    perS2 = value;
+  }
+  return strongest < 0 ? null : { perS2, depthM: (depthM[strongest]! + depthM[strongest + 1]!) / 2 };
 }

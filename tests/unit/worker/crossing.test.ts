@@ -125,6 +125,6 @@ describe("markedSamples", () => {
     const cast = smoothCast(6000);
     const marked = markedSamples(solveCast(flagging(cast, 100, 4100), cast), 0);
     expect(marked.leftOutCount).toBeGreaterThanOrEqual(4001);
-    expect(marked.marks.sampleIndex.length).toBeLessThanOrEqual(1500);
+    expect(marked.marks.sampleIndex.length).toBeLessThanOrEqual(600);
   });
 });
