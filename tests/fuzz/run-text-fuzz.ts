@@ -1,8 +1,8 @@
 /**
  * The long run, in chunks of seeds: each in a thread that is watched, so that a hang is found and named too.
  *
- *   npx rolldown tests/fuzz/run-text-fuzz.ts --platform node -f esm -o /tmp/text-fuzz.mjs
- *   node /tmp/text-fuzz.mjs 1 1000000
+ *   npx vite build --ssr tests/fuzz/run-text-fuzz.ts --outDir dist/fuzz
+ *   node dist/fuzz/run-text-fuzz.js 1 1000000
  *
  * Arguments: the first seed, how many, and the folder of the corpus (tests/corpus/files of the folder it is run in).
  */
