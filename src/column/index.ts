@@ -3,3 +3,4 @@ export type { Column } from "./column.ts";
 export { integrateCast } from "./integrate.ts";
 export type { Origin } from "./nodes.ts";
 export { describeAtDepths, type Profile, sampledProfile } from "./profile.ts";
+export * from "./stratification/index.ts";

@@ -3,7 +3,8 @@ import { expect, it } from "vitest";
 import { roomOf, sourceFiles } from "./source-files.ts";
 
 /** Unit and datum stand in the name, because a name is still there after arithmetic, in a debugger and in a file. */
-const SUFFIX = /(M|Km|Pa|KPa|Dbar|C|K|GKg|KgM3|Ms2|PerS2|Deg|Rad|S|Ms|MsCm|Frac|Count|Index|Px|Factor|Ratio|KPaPerM)$/;
+const SUFFIX =
+  /(M|Km|Pa|KPa|Dbar|C|K|GKg|KgM3|Ms2|PerS2|Deg|Rad|S|Ms|MsCm|Frac|Count|Index|Px|Factor|Ratio|KPaPerM|JM3)$/;
 
 /** Dimensionless by definition, counts by custom, or numbers whose scale is said by a field beside them. */
 const EXEMPT = new Set([
