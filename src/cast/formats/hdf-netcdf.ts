@@ -8,9 +8,17 @@ const MOST_COMPRESSED = 1000;
 /** The library keeps files by name in a file system of its own. */
 const SCRATCH_NAME = "/file-in-hand.nc";
 
+/** Whole numbers, floating-point numbers and texts, as HDF5 counts its kinds of data. */
+const PLAIN_KINDS = [0, 1, 3];
+
+/** Lists of lists and references, whose lengths a damaged file may state at will, are not looked into. */
+const isPlain = (metadata: { readonly type: number } | null): boolean =>
+  metadata !== null && PLAIN_KINDS.includes(metadata.type);
+
 function attributesOf(dataset: Dataset | Group): Attributes {
   const found: Record<string, string | number> = {};
   for (const [name, attribute] of Object.entries(dataset.attrs)) {
+    if (!isPlain(attribute.metadata)) continue;
     const { value } = attribute;
     const first = Array.isArray(value) || ArrayBuffer.isView(value) ? (value as ArrayLike<unknown>)[0] : value;
     if (typeof first === "string" || typeof first === "number") found[name] = first;
@@ -44,7 +52,10 @@ export async function readHdfNetcdf(bytes: Uint8Array): Promise<NetcdfFile> {
   try {
     const datasets = file.keys().flatMap((name) => {
       const item = file.get(name);
-      const isVariable = item instanceof h5wasm.Dataset && !EMPTY_DIMENSION.test(String(item.attrs.NAME?.value ?? ""));
+      const isVariable =
+        item instanceof h5wasm.Dataset &&
+        isPlain(item.metadata) &&
+        !EMPTY_DIMENSION.test(String(item.attrs.NAME?.value ?? ""));
       return isVariable ? [item] : [];
     });
     return {
