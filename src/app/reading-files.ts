@@ -5,7 +5,7 @@ import { type ReadRequest, Stopped } from "../worker/index.ts";
 import { keepFile, keptFile } from "./kept-files.ts";
 import { noteSamplesKey } from "./samples-keys.ts";
 import { type KeptReading, readingsOf } from "./state/app-state.ts";
-import { type ReadFile, type SurveyStart, withAnswer } from "./state/files.ts";
+import { type FileAgain, type ReadFile, type SurveyStart, waitingLike, withAnswer } from "./state/files.ts";
 import { dispatch, isStationPanelOpen, openReading, state } from "./store.ts";
 import { threads } from "./threads.ts";
 
@@ -47,31 +47,41 @@ interface Rereading {
 /** What files are about to be read again with; a later wish takes the place of one that waits. */
 const wishes = new Map<string, Rereading>();
 
-/** One more answer about a file, on top of those that are on their way. */
-export const answerColumn = (reading: KeptReading, answer: ColumnAnswer): Promise<void> =>
-  readAgain(reading, { answers: withAnswer((wishes.get(reading.fileName) ?? reading).answers, answer) }, "keep");
+/** One more answer about a file, on top of those on their way; it goes for files that wait with the same headers, too. */
+export function answerColumn(reading: KeptReading, answer: ColumnAnswer): Promise<void> {
+  const wish = { answers: withAnswer((wishes.get(reading.fileName) ?? reading).answers, answer) };
+  return readAgain([reading, ...waitingLike(reading, readingsOf(state.value))], wish, "keep");
+}
 
-/** Reads a file of the survey again, with other answers or another sheet. */
+/** Reads files of the survey again, with other answers or another sheet. */
 export async function readAgain(
-  reading: KeptReading,
+  readings: readonly KeptReading[],
   wish: Rereading,
   memory: "keep" | "forget" | "as-it-is",
 ): Promise<void> {
+  for (const { fileName } of readings) wishes.set(fileName, wish);
+  const read = await Promise.all(readings.map((reading) => readOneAgain(reading, wish)));
+  const files = read.filter((file) => file !== null);
+  if (files.length > 0) dispatch({ kind: "files-read-again", files, memory });
+}
+
+/** Null where the bytes are gone, the reading was stopped, or a later wish has taken its place. */
+async function readOneAgain(reading: KeptReading, wish: Rereading): Promise<FileAgain | null> {
   const { fileName } = reading;
   const file = await keptFile(reading);
   if (!file) {
     filesGone.value = [...filesGone.value, fileName];
-    return;
+    return null;
   }
-  wishes.set(fileName, wish);
   const job = startJob(fileName);
-  const sheetName = wish.sheet ?? reading.sheet;
-  const sheet = sheetName === null ? {} : { sheet: sheetName };
+  const sheet = wish.sheet ?? reading.sheet;
   const answer = await inTurn(job, () =>
-    wishes.get(fileName) === wish ? readOne(job, { file, remembered: {}, answers: wish.answers, ...sheet }) : null,
+    wishes.get(fileName) === wish
+      ? readOne(job, { file, remembered: {}, answers: wish.answers, ...(sheet === null ? {} : { sheet }) })
+      : null,
   );
   if (wishes.get(fileName) === wish) wishes.delete(fileName);
-  if (answer) dispatch({ kind: "file-read-again", file: { ...answer, fileName }, ...sheet, memory });
+  return answer && { ...answer, fileName, sheet };
 }
 
 /** Stops reading a file, or takes one that waits out of the queue. */

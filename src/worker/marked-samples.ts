@@ -30,25 +30,34 @@ export interface MarkedSamples {
   readonly leftOutCount: number;
   readonly runs: readonly MarkedRun[];
   readonly marks: Marks;
+  /** Whether every one of them has its mark. */
+  readonly areAllMarked: boolean;
 }
 
-const MOST_MARKS_COUNT = 600;
+const MOST_FLAGGED_COUNT = 600;
+/** Samples with nothing wrong, as those of the way up: enough to show where they lie, too few to hide the curve. */
+const MOST_PLAIN_COUNT = 100;
 
 /** Which samples of a cast are flagged or left out, where they stand and why. */
 export function markedSamples(solved: SolvedCast, unmeasuredPracticalSalinity: number): MarkedSamples {
   const { samples } = solved.cast;
   const { flag, use } = solved.prepared;
+  const isFlagged = (i: number): boolean => flag[i] === QUALITY_FLAG.suspect || flag[i] === QUALITY_FLAG.fail;
   const marked: number[] = [];
   let leftOutCount = 0;
   for (let i = 0; i < samples.n; i++) {
     if (use[i] === 0) leftOutCount++;
-    if (use[i] === 0 || flag[i] === QUALITY_FLAG.suspect || flag[i] === QUALITY_FLAG.fail) marked.push(i);
+    if (use[i] === 0 || isFlagged(i)) marked.push(i);
   }
   const sampleDepthM = sampleDepthsM(solved);
-  const shown = evenly(
-    marked.filter((i) => Number.isFinite(sampleDepthM[i]!)),
-    MOST_MARKS_COUNT,
-  );
+  const placed = marked.filter((i) => Number.isFinite(sampleDepthM[i]!));
+  const shown = [
+    ...evenly(placed.filter(isFlagged), MOST_FLAGGED_COUNT),
+    ...evenly(
+      placed.filter((i) => !isFlagged(i)),
+      MOST_PLAIN_COUNT,
+    ),
+  ].sort((a, b) => a - b);
   const salinity = sampleSalinity(samples, unmeasuredPracticalSalinity);
   const ofShown = (valueAt: (i: number) => number): Float64Array => Float64Array.from(shown, valueAt);
   return {
@@ -64,6 +73,7 @@ export function markedSamples(solved: SolvedCast, unmeasuredPracticalSalinity: n
       practicalSalinity: ofShown((i) => salinity.at(i, samples.seaPressureDbar?.[i] ?? sampleDepthM[i]!)),
       isUsed: Uint8Array.from(shown, (i) => use[i]!),
     },
+    areAllMarked: shown.length === placed.length,
   };
 }
 

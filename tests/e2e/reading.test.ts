@@ -54,6 +54,23 @@ describe("reading", () => {
     expect(misdeeds).toEqual([]);
   });
 
+  it("takes one answer for all files that wait with the same headers, and undoes it in one step", async () => {
+    const { page, misdeeds } = await session.open();
+    await add(
+      page,
+      csv("a.csv", UNNAMED),
+      csv("b.csv", `${UNNAMED}6,13,24\n`),
+      csv("c.csv", UNNAMED.replace("D,", "Z,")),
+    );
+    await expect.poll(() => page.locator(".casts .waiting").count()).toBe(3);
+    await page.getByRole("button", { name: '"D" is depth in m' }).click();
+    await expect.poll(() => page.locator(".cast .name").allTextContents()).toEqual(["a", "b"]);
+    expect(await page.locator(".casts .waiting").textContent()).toBe("c.csv needs your answer");
+    await page.getByRole("button", { name: "Undo" }).click();
+    await expect.poll(() => page.locator(".casts .waiting").count()).toBe(3);
+    expect(misdeeds).toEqual([]);
+  });
+
   it("reads a file again as soon as a control is changed, and undoes it", async () => {
     const { page, misdeeds } = await session.open();
     await add(page, csv("a.csv", GOOD));

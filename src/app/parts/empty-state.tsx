@@ -20,7 +20,10 @@ export function EmptyState() {
       <p class="note">An estuary and a reservoir that exist nowhere: both are invented to try the page with.</p>
       <h3>What a file should contain</h3>
       <ul>
-        <li>One table of text (CSV or other delimited text) with a row of column names, with or without units.</li>
+        <li>
+          A table with a row of column names, with or without units: CSV or other delimited text, a sheet of a workbook
+          (.xlsx), or netCDF with CF names. What is not clear is asked.
+        </li>
         <li>
           <b>Depth</b> (m or ft) or <b>sea pressure</b> (dbar), and <b>temperature</b> (°C or °F).
         </li>
@@ -30,7 +33,7 @@ export function EmptyState() {
         </li>
         <li>
           One cast, or many casts told apart by station, cast name, date or time. Latitude, longitude and distance are
-          used where they are given.
+          used where they are given, or come from a list of stations dropped beside the casts.
         </li>
       </ul>
       <pre>{EXAMPLE}</pre>

@@ -14,7 +14,7 @@ const CHOICES: readonly { readonly flag: FlagEdit["flag"] | null; readonly label
 export function FlagBar() {
   const inHand = castInHand.value;
   if (!inHand) return null;
-  const { flaggedCount, leftOutCount } = inHand.marked;
+  const { flaggedCount, leftOutCount, areAllMarked } = inHand.marked;
   return (
     <div class="flag-bar">
       {flaggedCount + leftOutCount > 0 ? (
@@ -22,6 +22,7 @@ export function FlagBar() {
           {flaggedCount > 0 ? "◇ suspect, in use" : ""}
           {flaggedCount > 0 && leftOutCount > 0 ? " · " : ""}
           {leftOutCount > 0 ? "× left out" : ""}
+          {areAllMarked ? "" : " (some of them shown)"}
         </span>
       ) : null}
       {isFlagging.value ? <Selection /> : null}

@@ -61,7 +61,7 @@ function SheetChoice({ reading }: { readonly reading: KeptReading }) {
       label="Sheet"
       value={reading.sheet ?? ""}
       options={reading.sheets.map((sheet) => [sheet, sheet] as const)}
-      onValue={(sheet) => void readAgain(reading, { answers: reading.answers, sheet }, "as-it-is")}
+      onValue={(sheet) => void readAgain([reading], { answers: reading.answers, sheet }, "as-it-is")}
     />
   );
 }
@@ -78,7 +78,7 @@ function Remembered({ reading }: { readonly reading: KeptReading }) {
         : isKept
           ? "Your answers are used for every file with these headers."
           : "Read with your answers."}{" "}
-      <button type="button" class="small" onClick={() => void readAgain(reading, { answers: NO_ANSWERS }, "forget")}>
+      <button type="button" class="small" onClick={() => void readAgain([reading], { answers: NO_ANSWERS }, "forget")}>
         Forget them
       </button>
     </p>

@@ -39,12 +39,15 @@ function takeFile(work: Work, file: ReadFile): Work {
   return putReading(work, { ...file, fileName: name });
 }
 
-/**
- * A file of that name read once more, with other answers or another sheet, in place of its earlier reading.
- * @param sheet which was asked for; null leaves it
- */
-export function takeAgain(work: Work, file: ReadFile, sheet: string | null = null): Work {
-  const { outcome, answers } = file;
+/** A file of the survey as it was read once more, by the name it has there. */
+export interface FileAgain extends ReadFile {
+  /** Which sheet of a workbook was asked for. */
+  readonly sheet: string | null;
+}
+
+/** A file of that name read once more, with other answers or another sheet, in place of its earlier reading. */
+export function takeAgain(work: Work, file: FileAgain): Work {
+  const { outcome, answers, sheet } = file;
   if (outcome.ok) return putReading(work, file);
   const refused = work.readings.map((reading) => {
     if (reading.fileName !== file.fileName) return reading;
@@ -116,6 +119,16 @@ function firstFree(wanted: string, taken: ReadonlySet<string>): string {
   for (let count = 2; taken.has(name); count++) name = `${wanted} (${count})`;
   return name;
 }
+
+/** Other files that wait for an answer, with the same headers and nothing said about them yet. */
+export const waitingLike = (reading: KeptReading, all: readonly KeptReading[]): readonly KeptReading[] =>
+  all.filter(
+    ({ fileName, headerKey, questions, answers }) =>
+      fileName !== reading.fileName &&
+      headerKey === reading.headerKey &&
+      questions.length > 0 &&
+      (answers.columns.length === 0 || answers === reading.answers),
+  );
 
 /** Answers with one more; what was said about the same column before goes. */
 export const withAnswer = ({ columns }: ReadingAnswers, answer: ColumnAnswer): ReadingAnswers => ({

@@ -14,16 +14,15 @@ import {
 } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
 import { type AppState, emptyWork, surveyOf, type Work } from "./app-state.ts";
-import { type ReadFile, type SurveyStart, takeAgain, takeFiles, troublesOf } from "./files.ts";
+import { type FileAgain, type ReadFile, type SurveyStart, takeAgain, takeFiles, troublesOf } from "./files.ts";
 import { addLevel, changeLevel, removeLevel } from "./levels.ts";
 import { correctStation, dropStations, joinList, withStations } from "./stations.ts";
 
 export type Action =
   | { readonly kind: "files-read"; readonly files: readonly ReadFile[]; readonly start: SurveyStart }
   | {
-      readonly kind: "file-read-again";
-      readonly file: ReadFile;
-      readonly sheet?: string;
+      readonly kind: "files-read-again";
+      readonly files: readonly FileAgain[];
       /** What becomes of the answers remembered for files with the same headers. */
       readonly memory: "keep" | "forget" | "as-it-is";
     }
@@ -67,10 +66,8 @@ export function reduce(state: AppState, action: Action): AppState {
         ...changeWork(withStations(work, (plain) => takeFiles(plain, action.files, action.start))),
         troubles: troublesOf(action.files),
       };
-    case "file-read-again":
-      return changeWork(
-        withStations(work, (plain) => remembering(takeAgain(plain, action.file, action.sheet), action)),
-      );
+    case "files-read-again":
+      return changeWork(withStations(work, (plain) => remembering(readAgain(plain, action.files), action)));
     case "troubles-dismissed":
       return { ...state, troubles: [] };
     case "survey-renamed":
@@ -122,8 +119,12 @@ const flagged = (survey: Survey, ranges: readonly SampleRange[], flag: FlagEdit[
     survey,
   );
 
-/** What is remembered for files with the same headers, after one was read again. */
-function remembering(work: Work, { file, memory }: Extract<Action, { kind: "file-read-again" }>): Work {
+const readAgain = (work: Work, files: readonly FileAgain[]): Work =>
+  files.reduce((taken, file) => takeAgain(taken, file), work);
+
+/** What is remembered for files with the same headers, after some were read again. */
+function remembering(work: Work, { files, memory }: Extract<Action, { kind: "files-read-again" }>): Work {
+  const file = files[0]!;
   const reading = work.readings.find(({ fileName }) => fileName === file.fileName);
   if (memory === "as-it-is" || !reading) return work;
   const { [reading.headerKey]: _, ...others } = work.remembered;

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { type AppState, initialState, readingsOf, surveyOf } from "../../../src/app/state/app-state.ts";
-import type { ReadFile } from "../../../src/app/state/files.ts";
+import { type ReadFile, waitingLike } from "../../../src/app/state/files.ts";
 import { type Action, reduce } from "../../../src/app/state/reduce.ts";
 import { failed, type Issue, type Outcome } from "../../../src/base/index.ts";
 import { type AnyFileReading, type CastId, type ReadingAnswers, readCastFile } from "../../../src/cast/index.ts";
@@ -146,7 +146,7 @@ describe("reading a file again", () => {
     fileOf("a.csv", ["A", "B"], { outcome: outcomeOf("a.csv", tableOf(["A", "B"]), inFeet), answers: inFeet, ...over });
   const start = reached(reading(fileOf("a.csv", ["A", "B"]), fileOf("b.csv", ["C"])));
   const readAgain = (state: AppState, file: ReadFile, memory: "keep" | "forget" | "as-it-is" = "keep"): AppState =>
-    reduce(state, { kind: "file-read-again", file, memory });
+    reduce(state, { kind: "files-read-again", files: [{ ...file, sheet: null }], memory });
 
   it("puts its casts where they were, remembers the answers for its headers, and can be undone", () => {
     const state = readAgain(start, again());
@@ -156,6 +156,14 @@ describe("reading a file again", () => {
     const undone = reduce(state, { kind: "undone" });
     expect(readingsOf(undone)[0]!.answers).toEqual(NO_ANSWERS);
     expect(undone.history.present.remembered).toEqual({});
+  });
+
+  it("finds the files that wait with the same headers and nothing said about them", () => {
+    const question = { code: "x", columnIndex: 1, message: "?", choices: [] };
+    const [a, b] = readingsOf(start).map((one) => ({ ...one, questions: [question] }));
+    expect(waitingLike(a!, [a!, b!])).toEqual([b]);
+    expect(waitingLike(a!, [a!, { ...b!, headerKey: "other" }])).toEqual([]);
+    expect(waitingLike(a!, [a!, { ...b!, answers: inFeet }])).toEqual([]);
   });
 
   it("forgets answers when told to", () => {
