@@ -224,6 +224,13 @@ export const UNDERSTOOD: readonly Understood[] = [
     { specificConductanceMsCm: 0.641 },
     { reads: SC },
   ),
+  file(
+    "conductance-in-units-row.csv",
+    "the units row says compensated to 25 degC",
+    { specificConductanceMsCm: 0.518 },
+    { specificConductanceMsCm: 0.52 },
+    { reads: SC },
+  ),
   file("ec.csv", "EC, compensated or not", [1, 10], [2, 9], {
     reads: DT,
     asks: ["compensated-or-not"],
@@ -288,6 +295,13 @@ export const UNDERSTOOD: readonly Understood[] = [
     { seaPressureDbar: 2 },
     { seaPressureDbar: 10 },
     { reads: "absolutePressure dbar, temperature degC, practicalSalinity 1", says: ["standard-air-taken-off"] },
+  ),
+  file(
+    "depth-beside-absolute.csv",
+    "depth and absolute pressure in one file",
+    { depthM: 1, seaPressureDbar: 0.9775 },
+    { depthM: 2, seaPressureDbar: 1.9575 },
+    { reads: "depth m, temperature degC, absolutePressure kPa", says: ["standard-air-taken-off", "temperature-only"] },
   ),
   file(
     "deck-reading-untold.csv",
@@ -470,6 +484,24 @@ export const UNDERSTOOD: readonly Understood[] = [
     },
   ),
   file(
+    "time-in-seconds.csv",
+    "a column named Time that holds seconds",
+    { timeS: 0 },
+    { timeS: 0.5 },
+    { samples: 3, reads: `elapsedTime s, ${DT}`, says: NO_SALT, cast: { time: null } },
+  ),
+  file(
+    "cf-time.csv",
+    "hours since a moment, as the CF conventions write it",
+    { timeS: 0 },
+    { timeS: 1800 },
+    {
+      reads: `dateTime hours since 2026-07-04 12:00:00, ${DT}`,
+      says: NO_SALT,
+      cast: { time: "2026-07-04T13:00:00" },
+    },
+  ),
+  file(
     "past-midnight.csv",
     "a clock that runs past midnight",
     { timeS: 0 },
@@ -578,6 +610,12 @@ export const UNDERSTOOD: readonly Understood[] = [
     says: NO_SALT,
     cast: { waterDepthM: 31 },
   }),
+  waiting(
+    "water-depth-alone.csv",
+    "water depth, of the place or of the sample",
+    "waterDepth ft, temperature degC",
+    "no-depth-column",
+  ),
   file("two-temperatures.csv", "two columns for temperature, one better named", [1, 10, 30], [2, 9, 31], {
     says: ["two-columns-for-one-role"],
   }),

@@ -39,11 +39,11 @@ export interface ColumnCheck {
 
 const SEARCHED_ROWS = 50;
 
-/** Columns of numbers that have no role yet. */
+/** Columns of numbers that have no role yet; a depth of the water may be that of the samples after all. */
 function openColumns(table: Table, columns: RecognisedColumns): readonly number[] {
   const style = { decimalMark: columns.decimalMark, groupMark: null };
   return columns.readings
-    .filter(({ role, confidence }) => role === null && confidence !== "doubtful")
+    .filter(({ role, confidence }) => (role === null && confidence !== "doubtful") || role === "waterDepth")
     .map(({ columnIndex }) => columnIndex)
     .filter((columnIndex) => {
       const cells = rowsBetween(table.rows, 0, SEARCHED_ROWS).map((row) => row.cells[columnIndex] ?? "");

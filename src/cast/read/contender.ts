@@ -1,11 +1,11 @@
 /** A column that could have a role by its name, or because the user said so, before it is compared with others. */
 import type { ColumnRole } from "../reading.ts";
 import { answerName, type ResolvedAnswer } from "./answers.ts";
-import { dayCountOf } from "./day-count.ts";
+import { type DayCount, dayCountByName, dayCountOf } from "./day-count.ts";
 import { type MarkEvidence, markEvidence } from "./number-style.ts";
 import { isMissing } from "./parse-number.ts";
 import { dateOrderOf, datePart, parseDateTime } from "./parse-time.ts";
-import { ABSOLUTE, readHeaderCell, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
+import { readHeaderCell, roleByUnit, type WrittenUnit, writtenUnit } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
 import type { Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
@@ -20,6 +20,8 @@ export interface Contender {
   readonly rankIndex: number;
   readonly written: WrittenUnit | null;
   readonly unitSource: "its header" | "the units row";
+  /** "days since 1950-01-01", where the header or the units row says so. */
+  readonly count: DayCount | null;
   readonly countsWestOrSouth: boolean;
   /** The cells that hold something, as written. */
   readonly filled: readonly string[];
@@ -32,8 +34,9 @@ export interface Contender {
 export const TELLING_CELLS = 200;
 
 /** A column named for a date may hold times too, and the other way about: its cells decide. */
-function roleByContent(role: ColumnRole, filled: readonly string[]): ColumnRole {
+function roleByContent(role: ColumnRole, filled: readonly string[], named: DayCount | null): ColumnRole {
   if (role !== "date" && role !== "clock" && role !== "dateTime") return role;
+  if (named !== null) return "dateTime";
   const telling = filled.slice(0, TELLING_CELLS);
   const count = dayCountOf(telling);
   if (count !== null)
@@ -74,9 +77,10 @@ export function contenderOf(table: Table, columnIndex: number, answer: ResolvedA
   if (meaning === null || answer?.role === "unused") return null;
   const filled = evenlyChosen(table.rows, columnIndex).filter((cell) => !isMissing(cell));
   const unitText = table.unitTexts[columnIndex] ?? "";
-  const isAbsolute = meaning.role === "seaPressure" && ABSOLUTE.test(unitText);
-  const named = isAbsolute ? "absolutePressure" : meaning.role;
-  const role = answer ? meaning.role : roleByContent(named, filled);
+  const count = dayCountByName(unitText) ?? dayCountByName(BRACKETED.exec(header)?.[1] ?? "");
+  const role = answer
+    ? meaning.role
+    : roleByContent(roleByUnit(meaning.role, `${header} ${unitText}`, [unitText]), filled, count);
   const fromRow = isMeasured(role) ? writtenUnit([unitText], MEASURED[role].kind) : null;
   const isInHeader = meaning.written !== null && (meaning.written.unit !== null || fromRow === null);
   const isPlace = role === "latitude" || role === "longitude";
@@ -88,12 +92,16 @@ export function contenderOf(table: Table, columnIndex: number, answer: ResolvedA
     rankIndex: meaning.rankIndex,
     written: isInHeader ? meaning.written : fromRow,
     unitSource: isInHeader ? "its header" : "the units row",
+    count,
     countsWestOrSouth: isPlace && WEST_OR_SOUTH.test(`${header} ${unitText}`),
     filled,
     evidence: isMeasured(role) ? markEvidence(filled) : null,
     answer,
   };
 }
+
+/** "time (seconds since 1970-01-01)" */
+const BRACKETED = /[([]([^)\]]{1,80})[)\]]/;
 
 /** "Longitude (W)", "Long_W", "Longitude West", "degrees_west". */
 const WEST_OR_SOUTH = /(^|[^a-z])(w|s|west|south|degw|degs)([^a-z]|$)/i;

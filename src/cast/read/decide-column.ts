@@ -64,6 +64,10 @@ function decideClock(contender: Contender): Decision {
 function decideDate(contender: Contender): Decision {
   const { role, filled, header, name, answer } = contender;
   if (answer?.time) return use(contender, `${answer.unitText}, as you said`, { time: answer.time });
+  if (contender.count) {
+    const time = { order: null, count: contender.count };
+    return use(contender, `${contender.count.name} is given in the file`, { time });
+  }
   const count = dayCountOf(filled);
   if (count !== null)
     return use(contender, `its numbers can be ${count.name}`, { time: { order: null, count }, confidence: "likely" });

@@ -51,7 +51,7 @@ const REMARK =
 const AT_25 = /(@|\bat\b|\bref\b|\b)\s*25\s*[°º]?\s*(deg)?\s*_?c\b/i;
 
 /** A column of seconds or days that have gone by is no clock. */
-const ELAPSED = /^[^:]*\b(s|secs?|seconds?|mins?|minutes?|h|hrs?|hours?|days?)\b[^:]*$/i;
+const isElapsed = (unitText: string): boolean => unitByName(unitText, "time") !== null;
 
 /** "Longitude (W)", "degrees_south": degrees, and which way they count. */
 const HEMISPHERE = /^(deg(rees?)?|[°º])?[\s_.]*([nsew]|north|south|east|west)$/i;
@@ -70,18 +70,18 @@ export function writtenUnit(texts: readonly string[], kind: QuantityKind): Writt
 }
 
 /** A unit can say more than its size: "psia" holds the air, "uS/cm @ 25 C" is compensated. */
-function roleByUnit(role: ColumnRole, header: string, unitTexts: readonly string[]): ColumnRole {
+export function roleByUnit(role: ColumnRole, header: string, unitTexts: readonly string[]): ColumnRole {
   if (role === "conductivity" && AT_25.test(header)) return "specificConductance";
+  if (role === "clock" && unitTexts.some(isElapsed)) return "elapsedTime";
   return role === "seaPressure" && unitTexts.some((text) => ABSOLUTE.test(text)) ? "absolutePressure" : role;
 }
 
 /** "psia", "dbar (absolute)", "kPa abs" */
-export const ABSOLUTE = /\babs(olute)?\b|^\s*(psi|bar|dbar|kpa)\s*\(?a\)?\s*$/i;
+const ABSOLUTE = /\babs(olute)?\b|^\s*(psi|bar|dbar|kpa)\s*\(?a\)?\s*$/i;
 
 function meaningOf(name: string, unitTexts: readonly string[], header: string): HeaderMeaning | null {
   const found = roleOfName(name);
   if (found === null) return null;
-  if (found.role === "clock" && unitTexts.some((text) => ELAPSED.test(text.trim()))) return null;
   const role = roleByUnit(found.role, header, unitTexts);
   const written = isMeasured(role) ? writtenUnit(unitTexts, MEASURED[role].kind) : null;
   return { role, rankIndex: found.rankIndex, written };
@@ -112,6 +112,6 @@ function trailing(header: string): HeaderMeaning | null {
 
 /** Role and unit of a header, or null when its name is none that we use. */
 export function readHeaderCell(header: string): HeaderMeaning | null {
-  if (header.length > LONGEST_NAME) return null;
+  if (header.length > LONGEST_NAME || !/\p{L}/u.test(header)) return null;
   return bracketed(header) ?? meaningOf(header, [], header) ?? trailing(header);
 }

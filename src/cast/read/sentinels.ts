@@ -44,13 +44,16 @@ interface Rest {
   most: number;
 }
 
-function isFarOutside(value: number, rest: Rest, [leastPossible, mostPossible]: readonly [number, number]): boolean {
+function isFarOutside(value: number, rest: Rest, role: MeasuredRole): boolean {
+  const { kind, possible } = MEASURED[role];
+  const [leastPossible, mostPossible] = possible;
   if (isBeyondAll(value) || value < leastPossible || value > mostPossible) return true;
   const { least, most } = rest;
   if (least > most) return false;
   if (value < 0 && least > value / 2) return true;
   const gap = Math.max(least - value, value - most);
-  return gap > FAR_SPANS * Math.max(most - least, Math.abs(most) / 10);
+  const usualSpan = kind === "angle" ? 1 : Math.abs(most) / 10;
+  return gap > FAR_SPANS * Math.max(most - least, usualSpan);
 }
 
 const NONE: Sentinels = { found: new Set(), kept: new Set() };
@@ -73,7 +76,7 @@ export function findSentinels(values: ArrayLike<number>, role: MeasuredRole): Se
   const found = new Set<number>();
   const kept = new Set<number>();
   for (const [value, count] of counts) {
-    if (couldBeFill(value) ? isFarOutside(value, rest, possible) : count >= REPEATED) found.add(value);
+    if (couldBeFill(value) ? isFarOutside(value, rest, role) : count >= REPEATED) found.add(value);
     else if (value < 0 && NINES.has(value)) kept.add(value);
   }
   return { found, kept };

@@ -79,15 +79,15 @@ const secondsOf = (clock: string): number => {
   return clock === "" ? Number.NaN : hours! * 3600 + minutes! * 60 + (seconds ?? 0);
 };
 
-/** Whether time leaps at a row, compared with its usual step from sample to sample within the group. */
-function hasTimeGap(rowIndices: readonly number[], row: number, clock: readonly string[] | null): boolean {
-  if (clock === null) return false;
+/** The rows at which time leaps, compared with its usual step from sample to sample within the group. */
+function timeGaps(rowIndices: readonly number[], clock: readonly string[] | null): ReadonlySet<number> {
+  if (clock === null) return new Set();
   const times = rowIndices.map((i) => secondsOf(clock[i]!));
   const steps = times.slice(1).map((time, k) => Math.abs(time - times[k]!));
   const usual = steps.filter((step) => step > 0 && step < SHORTEST_GAP_S * 10);
   const usualStep = usual.length === 0 ? 0 : median(usual);
-  const step = steps[rowIndices.indexOf(row) - 1]!;
-  return step >= SHORTEST_GAP_S && step > 3 * usualStep;
+  const isGap = (step: number): boolean => step >= SHORTEST_GAP_S && step > 3 * usualStep;
+  return new Set(rowIndices.filter((_, k) => k > 0 && isGap(steps[k - 1]!)));
 }
 
 function cutAt(rowIndices: readonly number[], cuts: ReadonlySet<number>): readonly (readonly number[])[] {
@@ -106,16 +106,18 @@ export function splitCasts(rows: MeasuredRows): SplitRows {
   let hasNewLowering = false;
   const groups = groupByKeys(rows).flatMap((rowIndices) => {
     const restarts = restartsIn(rowIndices, depths);
-    const cuts = restarts.filter((row) => keys.length === 0 || hasTimeGap(rowIndices, row, rows.clock));
-    hasNewLowering ||= cuts.length > 0;
-    return cutAt(rowIndices, new Set(cuts)).map((part): RowGroup => {
-      const first = part[0]!;
+    const gaps = restarts.length === 0 ? new Set<number>() : timeGaps(rowIndices, rows.clock);
+    const cuts = new Set(restarts.filter((row) => keys.length === 0 || gaps.has(row)));
+    const uncut = restarts.filter((row) => !cuts.has(row));
+    hasNewLowering ||= cuts.size > 0;
+    return cutAt(rowIndices, cuts).map((part): RowGroup => {
+      const [first, last] = [part[0]!, part.at(-1)!];
       return {
         rowIndices: part,
         station: rows.station?.[first] || null,
         castName: rows.castName?.[first] || null,
         date: rows.date?.[first] || null,
-        restartRows: restarts.filter((row) => !cuts.includes(row) && part.includes(row)),
+        restartRows: uncut.filter((row) => row >= first && row <= last),
       };
     });
   });

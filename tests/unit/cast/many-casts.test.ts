@@ -124,8 +124,9 @@ describe("times", () => {
 
   test("elapsed seconds are no clock", () => {
     const reading = readText("Time (s),Depth (m),Temp (C)\n0,1,10\n0.25,2,10\n0.5,3,10\n");
-    expect(reading.columns[0]!.role).toBeNull();
+    expect(reading.columns[0]).toMatchObject({ role: "elapsedTime", unit: "s" });
     expect(onlyCast(reading).time).toBeNull();
+    expect([...onlyCast(reading).samples.timeS!]).toEqual([0, 0.25, 0.5]);
   });
 });
 
