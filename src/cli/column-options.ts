@@ -99,7 +99,7 @@ export function columnOptions(args: readonly string[]): ColumnOptions {
   const given = <T>(text: string | undefined, read: (text: string) => T, otherwise: T): T =>
     text === undefined ? otherwise : read(text);
   const help = values.help === true;
-  if (!help && positionals.length === 0) throw new UsageError("column needs at least one cast file");
+  if (!help && positionals.length === 0) throw new UsageError("name at least one cast file");
   if (values.out?.trim() === "") throw new UsageError("--out needs the name of a folder");
   return {
     help,

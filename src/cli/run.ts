@@ -1,5 +1,6 @@
 import { VERSION } from "../export/index.ts";
 import { columnCommand } from "./column-command.ts";
+import { compareCommand } from "./compare-command.ts";
 import { EXIT, type ExitCode, type Host, UsageError } from "./host.ts";
 import { inspectCommand } from "./inspect-command.ts";
 import { USAGE } from "./usage.ts";
@@ -7,6 +8,7 @@ import { waterCommand } from "./water-command.ts";
 
 const COMMANDS: Readonly<Record<string, (host: Host, args: readonly string[]) => Promise<ExitCode>>> = {
   column: columnCommand,
+  compare: compareCommand,
   water: waterCommand,
   inspect: inspectCommand,
 };

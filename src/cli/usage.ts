@@ -6,6 +6,8 @@ usage: layerhead COMMAND [OPTIONS] FILE...
 
 commands
   column FILE...   integrate casts: density, pressure and departure at every sample
+  compare FILE...  tell what depth times one specific weight costs, against the
+                   integrated pressure
   water FILE|-     add water properties to a table of points
   inspect FILE...  tell how each file is read: columns, units, casts, rows left out
 
@@ -50,6 +52,20 @@ what comes out
 Water above the first and below the last sample has that sample's salinity and
 temperature. Files that cannot be read are named on standard error; the others are
 still done, and the exit status is then 2.
+`;
+
+export const COMPARE_USAGE = `usage: layerhead compare FILE... [OPTIONS]
+
+Holds depth times a specific weight against the integrated pressure, for every weight an
+engineer might take: handbook values in SI and US units, fresh and sea water, and the
+surface sample, depth mean and last sample of each cast. Tells the error in kPa, as a
+head and in per cent, and by how much a gauge that turns pressure into depth with that
+weight reads too deep. Positive: the shortcut says too much.
+
+  --levels M,M,...         depths to compare at (default: the bottom of each cast)
+  --reference-density RHO  a density of your own, kg/m3, besides
+  --json                   one JSON object on standard output
+  and the other options of layerhead column, but for --out
 `;
 
 export const WATER_USAGE = `usage: layerhead water FILE.csv|-

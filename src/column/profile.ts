@@ -1,17 +1,10 @@
-import {
-  conservativeTemperature,
-  exactSoundSpeed,
-  PA_PER_DBAR,
-  potentialTemperature,
-  soundSpeed,
-} from "../gsw-ts-port/index.ts";
+import { conservativeTemperature, exactSoundSpeed, potentialTemperature, soundSpeed } from "../gsw-ts-port/index.ts";
 import { absoluteSalinityOf, inSituTemperatureOf, practicalSalinityOf, waterModel } from "../water/index.ts";
 import { buoyancyFrequency } from "./buoyancy-frequency.ts";
 import type { Column } from "./column.ts";
 import { surfaceGravityMs2 } from "./gravity.ts";
+import { KPA_PER_DBAR } from "./kilopascal.ts";
 import { type Nodes, nodesAtDepths, nodesOfProfile, type Origin } from "./nodes.ts";
-
-const KPA_PER_DBAR = PA_PER_DBAR / 1000;
 
 /**
  * Everything there is to say about some depths of a column, one entry a depth. NaN where a value does not exist: no

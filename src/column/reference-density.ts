@@ -5,7 +5,7 @@ import { gravityByDepth } from "./gravity.ts";
 import { frameOf, Stretch } from "./stretch.ts";
 
 /** Depth mean of density down to the bottom of the column, kg/m3: the bottom pressure over gravity and depth. */
-function meanDensityKgM3(column: Column): number {
+export function meanDensityKgM3(column: Column): number {
   const last = column.n - 1;
   const stretch = new Stretch(frameOf(column));
   stretch.hold(column.salinity[last]!, column.tempC[last]!);
@@ -17,7 +17,7 @@ function meanDensityKgM3(column: Column): number {
 }
 
 /** Density of the held water at the surface, kg/m3. */
-const surfaceDensityKgM3 = (column: Column): number =>
+export const surfaceDensityKgM3 = (column: Column): number =>
   waterModel(column.basis.water).density(column.salinity[0]!, column.tempC[0]!, 0);
 
 /** The density that the basis compares with, kg/m3. */

@@ -7,6 +7,8 @@ export {
   type Origin,
   type Profile,
   type ReferenceDensity,
+  type ShortcutCost,
+  shortcutCosts,
 } from "../column/index.ts";
 export type { Level, LevelId } from "../design/index.ts";
 export {

@@ -194,7 +194,7 @@ describe("layerhead column on bad input", () => {
 
 describe("layerhead on a wrong command line", () => {
   it.each([
-    [["column"], "column needs at least one cast file"],
+    [["column"], "name at least one cast file"],
     [["column", "a.csv", "--latitude", "95"], "--latitude 95: expected a number from -90 to 90 degrees"],
     [
       ["column", "a.csv", "--water", "salty"],
