@@ -3,21 +3,12 @@ import { failed } from "../base/index.ts";
 import type { ColumnAnswer, ReadingAnswers, StationList } from "../cast/index.ts";
 import { type ReadRequest, Stopped } from "../worker/index.ts";
 import { keepFile, keptFile } from "./kept-files.ts";
+import { advance, inTurn, type ReadingJob, startJob } from "./reading-queue.ts";
 import { noteSamplesKey } from "./samples-keys.ts";
 import { type KeptReading, readingsOf } from "./state/app-state.ts";
 import { type FileAgain, type ReadFile, type SurveyStart, waitingLike, withAnswer } from "./state/files.ts";
 import { dispatch, isStationPanelOpen, openReading, state } from "./store.ts";
 import { threads } from "./threads.ts";
-
-/** A file that is being read or waits for its turn. */
-export interface ReadingJob {
-  readonly number: number;
-  readonly fileName: string;
-  /** Null while nothing is known. */
-  readonly doneFrac: number | null;
-}
-
-export const readingJobs = signal<readonly ReadingJob[]>([]);
 
 /** Files whose reading cannot be changed, since their bytes are no longer at hand. */
 export const filesGone = signal<readonly string[]>([]);
@@ -70,6 +61,7 @@ async function readOneAgain(reading: KeptReading, wish: Rereading): Promise<File
   const { fileName } = reading;
   const file = await keptFile(reading);
   if (!file) {
+    wishes.delete(fileName);
     filesGone.value = [...filesGone.value, fileName];
     return null;
   }
@@ -84,13 +76,6 @@ async function readOneAgain(reading: KeptReading, wish: Rereading): Promise<File
   return answer && { ...answer, fileName, sheet };
 }
 
-/** Stops reading a file, or takes one that waits out of the queue. */
-export function stopReading(job: ReadingJob): void {
-  const isBeingRead = readingJobs.value.findIndex(isSame(job)) === 0;
-  endJob(job);
-  if (isBeingRead) threads.stopReading();
-}
-
 function takeStations(list: StationList): void {
   dispatch({ kind: "stations-listed", list });
   isStationPanelOpen.value = true;
@@ -100,37 +85,6 @@ const remembered = () => state.value.history.present.remembered;
 
 const nameFor = (read: readonly ReadFile[]): string =>
   read.length === 1 ? read[0]!.fileName.replace(/\.[^.]*$/, "") : "Survey";
-
-let lastNumber = 0;
-
-function startJob(fileName: string): ReadingJob {
-  const job = { number: ++lastNumber, fileName, doneFrac: null };
-  readingJobs.value = [...readingJobs.value, job];
-  return job;
-}
-
-const isSame = (a: ReadingJob) => (b: ReadingJob) => a.number === b.number;
-
-const endJob = (job: ReadingJob): void => {
-  readingJobs.value = readingJobs.value.filter((other) => !isSame(job)(other));
-};
-
-const advance = (job: ReadingJob, doneFrac: number): void => {
-  readingJobs.value = readingJobs.value.map((other) => (isSame(job)(other) ? { ...job, doneFrac } : other));
-};
-
-let lastTurn: Promise<unknown> = Promise.resolve();
-
-/** One reading at a time, in the order they were asked for; one that has been stopped is passed over. */
-function inTurn<T>(job: ReadingJob, read: () => Promise<T> | null): Promise<T | null> {
-  const turn = lastTurn.then(async () => {
-    const result = readingJobs.value.some(isSame(job)) ? await read() : null;
-    endJob(job);
-    return result;
-  });
-  lastTurn = turn.catch(() => undefined);
-  return turn;
-}
 
 /** Null where the user stopped it. */
 async function readOne(job: ReadingJob, request: ReadRequest): Promise<ReadFile | null> {

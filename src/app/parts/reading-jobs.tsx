@@ -1,4 +1,4 @@
-import { readingJobs, stopReading } from "../reading-files.ts";
+import { readingJobs, stopReading } from "../reading-queue.ts";
 
 /** Files that are being read or wait for their turn, each with a way to stop it. */
 export function ReadingJobs() {
