@@ -21,6 +21,11 @@ const isPlace = (role: MeasuredRole): boolean => role === "latitude" || role ===
 
 const MONTH_FIRST: TimeForm = { order: "month-first", count: null };
 
+/** A cell in a message: as much as tells which it is. */
+const cut = (text: string): string => (text.length > LONGEST_SHOWN ? `${text.slice(0, LONGEST_SHOWN)}...` : text);
+
+const LONGEST_SHOWN = 60;
+
 const kindsOf = (texts: readonly string[]): string => [...new Set(texts)].join(", ");
 
 const rowCount = (texts: readonly string[]): string => (texts.length === 1 ? "1 row" : `${texts.length} rows`);
@@ -102,7 +107,7 @@ export class CellReader {
         const expected = isPlace(role) ? "degrees" : "a number or a blank";
         this.#reject(i, {
           code: "not-a-number",
-          message: `${ROLE_WORDS[role]} "${text}" is not a number; expected ${expected}`,
+          message: `${ROLE_WORDS[role]} "${cut(text)}" is not a number; expected ${expected}`,
         });
       }
       values[i] = value ?? Number.NaN;
@@ -149,7 +154,7 @@ export class CellReader {
       if (isMissing(text)) return "";
       const time = read(text, rowIndex);
       if (time !== null) return time;
-      const message = `${ROLE_WORDS[role]} "${text}" is not understood; expected a form such as 2020-01-13 or 13:46`;
+      const message = `${ROLE_WORDS[role]} "${cut(text)}" is not understood; expected a form such as 2020-01-13 or 13:46`;
       this.#reject(rowIndex, { code: "not-a-time", message });
       return "";
     });

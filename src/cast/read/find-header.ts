@@ -128,7 +128,7 @@ const PURE_NUMBER = /^(1|1e-0?3|0\.001)$/i;
 /** One text a column when the row below the header is a row of units, else null. */
 function unitsIn(header: readonly string[], below: Row | undefined): readonly string[] | null {
   if (below === undefined || below.cells.some((cell) => looksNumeric(cell) && !PURE_NUMBER.test(cell))) return null;
-  const texts = header.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]\s*|\s*[)\]}]$/g, ""));
+  const texts = header.map((_, i) => (below.cells[i] ?? "").replace(/^[([{]|[)\]}]$/g, "").trim());
   const isUnits = header.some((cell, i) => {
     const role = readHeaderCell(cell)?.role;
     const isWord = role !== undefined && !PURE_NUMBER.test(texts[i]!);

@@ -20,7 +20,11 @@ const two = (n: number): string => String(n).padStart(2, "0");
 const fullYear = (text: string): number =>
   text.length > 2 ? Number(text) : Number(text) + (Number(text) < 69 ? 2000 : 1900);
 
+/** No water was measured before; "0016" is a year cut short. */
+const FIRST_YEAR = 1700;
+
 function isoDate(year: number, month: number, day: number): string | null {
+  if (year < FIRST_YEAR) return null;
   const lastDay = new Date(Date.UTC(year, month, 0)).getUTCDate();
   return month >= 1 && month <= 12 && day >= 1 && day <= lastDay ? `${year}-${two(month)}-${two(day)}` : null;
 }

@@ -18,7 +18,7 @@ export interface HeaderMeaning {
 }
 
 /** Names and units are shorter; so much also bounds the work on them. */
-const LONGEST_NAME = 200;
+export const LONGEST_NAME = 200;
 
 const ROLES = Object.keys(COLUMN_NAMES) as readonly ColumnRole[];
 

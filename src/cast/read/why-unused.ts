@@ -2,6 +2,7 @@
 import type { ColumnReading } from "../reading.ts";
 import { choose } from "./ask.ts";
 import { type Decision, doubt, leave } from "./decision.ts";
+import { LONGEST_NAME } from "./read-header-cell.ts";
 
 const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
   [/^$/, "it has no name"],
@@ -30,7 +31,8 @@ function compensatedOrNot(place: Pick<ColumnReading, "columnIndex" | "header">, 
 
 /** @param name how an answer names the column */
 export function whyUnused(place: Pick<ColumnReading, "columnIndex" | "header">, name: string): Decision {
-  const known = UNUSED_NAMES.find(([pattern]) => pattern.test(place.header));
+  const header = place.header.slice(0, LONGEST_NAME);
+  const known = UNUSED_NAMES.find(([pattern]) => pattern.test(header));
   if (known) return leave(place, known[1]);
-  return EC.test(place.header) ? compensatedOrNot(place, name) : leave(place, "its name is none known here", "likely");
+  return EC.test(header) ? compensatedOrNot(place, name) : leave(place, "its name is none known here", "likely");
 }
