@@ -1,1 +1,3 @@
+export { defaultStratificationOptions } from "./options.ts";
 export type * from "./stratification.ts";
+export { stratificationOf } from "./stratification-of.ts";
