@@ -8,7 +8,7 @@ import type { MeasuredRows } from "./measured-rows.ts";
 import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
 import { chosenRows, type Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
-import { isWeightOfAir } from "./vertical.ts";
+import { couldHoldAir } from "./vertical.ts";
 
 /** No table of samples has more; what has was cut at the wrong sign, and would take very long to go through. */
 const MOST_COLUMNS = 2000;
@@ -104,11 +104,11 @@ function airInPressure(table: Table, columns: RecognisedColumns, rows: MeasuredR
   const pressures = [...(rows.seaPressureDbar ?? [])].filter((pressure) => !Number.isNaN(pressure));
   if (!column || rows.depthM !== null || rows.isGaugePressure || pressures.length === 0) return null;
   const least = min(pressures);
-  if (!isWeightOfAir(least)) return null;
+  if (!couldHoldAir(least)) return null;
   const header = table.header.cells[column.columnIndex]!;
   return asked(table, column, (name) => ({
     code: "pressure-may-be-absolute",
-    message: `"${header}" starts at ${least.toFixed(2)} dbar, about the weight of the air; expected 0 at the surface; say whether it is gauge or absolute`,
+    message: `"${header}" starts at ${least.toFixed(2)} dbar, about the weight of the air or a little more; expected 0 at the surface; say whether it is gauge or absolute`,
     choices: [
       choose(name, "absolutePressure", column.unit, "absolute: it holds the weight of the air"),
       choose(name, "seaPressure", column.unit, `gauge: the first sample lies ${least.toFixed(1)} dbar deep`),

@@ -35,7 +35,7 @@ export const TELLING_CELLS = 200;
 
 /** A column named for a date may hold times too, and the other way about: its cells decide. */
 function roleByContent(role: ColumnRole, filled: readonly string[], named: DayCount | null): ColumnRole {
-  if (role !== "date" && role !== "clock" && role !== "dateTime") return role;
+  if (role !== "date" && role !== "clock" && role !== "dateTime" && role !== "day") return role;
   if (named !== null) return "dateTime";
   const telling = filled.slice(0, TELLING_CELLS);
   const count = dayCountOf(telling);

@@ -35,7 +35,7 @@ const counted = (n: number): string => (n === 1 ? "one sample" : "no samples");
 /** What is worth knowing about the text around the table. */
 function tableIssues(table: Table): readonly Issue[] {
   const issues: Issue[] = [];
-  if (table.header.lineIndex === 0) {
+  if (table.header.cells.every((cell, i) => cell === `#${i + 1}`)) {
     const names = `#1 to #${table.header.cells.length}`;
     const message = `no row of headers in the file; its columns go by their places, ${names}; say what they are, as in depth=#1:m`;
     issues.push(warning("no-header", message));

@@ -22,7 +22,13 @@ const STANDARD_AIR_DBAR = convert(1, "atm", "dbar");
 const STEADY_DBAR = 0.05;
 const FEWEST_STEADY = 3;
 
-export const isWeightOfAir = (pressureDbar: number): boolean =>
+/** A cast starts in the air or in the first metres: pressure that starts here can hold the air as well as not. */
+const DEEPEST_START_DBAR = 3;
+
+export const couldHoldAir = (leastDbar: number): boolean =>
+  leastDbar >= LIGHTEST_AIR_DBAR && leastDbar <= HEAVIEST_AIR_DBAR + DEEPEST_START_DBAR;
+
+const isWeightOfAir = (pressureDbar: number): boolean =>
   pressureDbar >= LIGHTEST_AIR_DBAR && pressureDbar <= HEAVIEST_AIR_DBAR;
 
 /**

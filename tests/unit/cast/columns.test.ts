@@ -247,6 +247,16 @@ describe("units that the file does not give", () => {
     expect(onlyCast(reading).samples).toMatchObject({ practicalSalinity: null, absSalinityGKg: null });
   });
 
+  test("so is pressure that starts a metre or two below, unless its name says that it is gauge", () => {
+    const rows = [
+      [11.3, 9, 30],
+      [15, 9, 30],
+    ] as const;
+    questionOf(readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], ...rows)), "pressure-may-be-absolute");
+    expect(readText(table(["Sea pressure (dbar)", "Temp (C)", "Sal"], ...rows)).questions).toEqual([]);
+    expect(readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], [25, 9, 30], [30, 9, 30])).questions).toEqual([]);
+  });
+
   test("pressure that starts at one atmosphere is suspected to be absolute, and no cast is made of it", () => {
     const reading = readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], [10.2, 9, 30], [15, 9, 30]));
     expect(reading.casts).toEqual([]);

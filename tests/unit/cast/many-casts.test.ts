@@ -130,6 +130,13 @@ describe("times", () => {
   });
 });
 
+test("a column named Day may hold whole dates, or the day of a year and a month beside it", () => {
+  const whole = readText("Day,Depth (m),Temp (C)\n2026-07-04,1,10\n2026-07-04,2,9\n");
+  const parts = readText("Day,Month,Year,Depth (m),Temp (C)\n4,Jul,2026,1,10\n4,Jul,2026,2,9\n");
+  const alone = readText("Day,Depth (m),Temp (C)\n4,1,10\n4,2,9\n");
+  expect([whole, parts, alone].map((reading) => onlyCast(reading).time)).toEqual(["2026-07-04", "2026-07-04", null]);
+});
+
 test("a latitude that is none is not used, with a warning", () => {
   const reading = readText("Lat,Lon,Depth (m),Temp (C)\n5130,-3,1,10\n5130,-3,2,10\n");
   expect(onlyCast(reading)).toMatchObject({ latitudeDeg: null, longitudeDeg: -3 });

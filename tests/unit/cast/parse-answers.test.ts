@@ -65,6 +65,13 @@ describe("answers stand above what the file says", () => {
     expect(reading.columns[0]).toMatchObject({ confidence: "sure", reason: "As you said depth; ft, as you said." });
   });
 
+  test("columns without any header, by their places", () => {
+    const { samples } = onlyCast(readText("1,50,3\n2,41,4\n", said("depth=#1:m,temperature=#2:degF,salinity=#3")));
+    expect([...samples.depthM!]).toEqual([1, 2]);
+    expect([...samples.practicalSalinity!]).toEqual([3, 4]);
+    expect(samples.inSituTempC[0]).toBe(10);
+  });
+
   test("a column may be left out", () => {
     const reading = readText("Depth (m),Temp (C),Sal\n1,10,3\n2,9,4\n", said("unused=Sal"));
     expect(onlyCast(reading).samples.practicalSalinity).toBeNull();
