@@ -53,19 +53,22 @@ export function formByText(role: ColumnRole, text: string): AnsweredForm | null 
   return unit && { ...NO_FORM, unit: unit.symbol, style, isNegated };
 }
 
-/** How an answer names a column: its header where no other column has the same, "Temp#2" where one has, "#3" where it has none. */
-export function answerName(headers: readonly string[], columnIndex: number): string {
-  const header = headers[columnIndex] ?? "";
-  if (header === "") return `#${columnIndex + 1}`;
-  const before = headers.slice(0, columnIndex).filter((other) => other === header).length;
-  const isRepeated = headers.filter((other) => other === header).length > 1;
-  return isRepeated ? `${header}#${before + 1}` : header;
+/** How answers name columns: by header where no other has the same, "Temp#2" where one has, "#3" where there is none. */
+export function answerNames(headers: readonly string[]): readonly string[] {
+  const counts = new Map<string, number>();
+  for (const header of headers) counts.set(header, (counts.get(header) ?? 0) + 1);
+  const seen = new Map<string, number>();
+  return headers.map((header, i) => {
+    if (header === "") return `#${i + 1}`;
+    const place = (seen.get(header) ?? 0) + 1;
+    seen.set(header, place);
+    return counts.get(header) === 1 ? header : `${header}#${place}`;
+  });
 }
 
 /** The column that a name means, or -1. */
-function columnOf(headers: readonly string[], name: string): number {
+function columnOf(headers: readonly string[], names: readonly string[], name: string): number {
   const wanted = name.trim();
-  const names = headers.map((_, i) => answerName(headers, i));
   const exact = [names.indexOf(wanted), headers.indexOf(wanted)].find((i) => i >= 0);
   if (exact !== undefined) return exact;
   const position = /^#(\d+)$/.exec(wanted);
@@ -90,8 +93,9 @@ function resolve({ role, unit }: ColumnAnswer): ResolvedAnswer | string {
 export function resolveAnswers(headers: readonly string[], answers: ReadingAnswers): ResolvedAnswers {
   const byColumn = new Map<number, ResolvedAnswer>();
   const issues: Issue[] = [];
+  const names = answerNames(headers);
   for (const answer of answers.columns) {
-    const columnIndex = columnOf(headers, answer.header);
+    const columnIndex = columnOf(headers, names, answer.header);
     const resolved = resolve(answer);
     if (columnIndex < 0)
       issues.push(refused(`no column is named "${answer.header}"; what was said about it is not used`));

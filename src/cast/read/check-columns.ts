@@ -1,7 +1,7 @@
 /** What a table must have before casts can be made of it. */
 import type { Issue } from "../../base/index.ts";
 import type { ColumnRole, Question } from "../reading.ts";
-import { answerName } from "./answers.ts";
+import { answerNames } from "./answers.ts";
 import { type Choice, choose } from "./ask.ts";
 import { isMissing, parseNumber } from "./parse-number.ts";
 import { type RecognisedColumns, VERTICAL_ROLES } from "./recognise-columns.ts";
@@ -93,6 +93,7 @@ export function checkColumns(table: Table, columns: RecognisedColumns): ColumnCh
   const lacking = NEEDS.filter(({ roles }) => !hasOneOf(columns, roles));
   const unasked = lacking.filter(({ roles }) => !isAskedAbout(columns, roles));
   const open = unasked.length === 0 ? [] : openColumns(table, columns);
+  const names = answerNames(headers);
   const isHopeless = open.length < unasked.length;
   const messageOf = ({ missing }: Need): string => missing.replace("HEADERS", listed(headers));
   return {
@@ -101,7 +102,7 @@ export function checkColumns(table: Table, columns: RecognisedColumns): ColumnCh
       code: need.code,
       columnIndex: open[0] ?? 0,
       message: messageOf(need),
-      choices: open.flatMap((columnIndex) => need.choicesFor(answerName(headers, columnIndex))),
+      choices: open.flatMap((columnIndex) => need.choicesFor(names[columnIndex]!)),
     })),
     isWaiting: lacking.length > 0,
   };

@@ -2,7 +2,7 @@
 import { min } from "simple-statistics";
 import type { Issue } from "../../base/index.ts";
 import type { Question } from "../reading.ts";
-import { answerName } from "./answers.ts";
+import { answerNames } from "./answers.ts";
 import { choose, chooseForm, type Doubt, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
 import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
@@ -80,7 +80,7 @@ export function withoutShiftedRows(table: Table): Table {
 
 /** A column in use, as a question names it. */
 function asked(table: Table, { columnIndex }: UsedColumn, doubtOf: (name: string) => Doubt): Question {
-  const name = answerName(table.header.cells, columnIndex);
+  const name = answerNames(table.header.cells)[columnIndex]!;
   return questionOf(columnIndex, name, doubtOf(name));
 }
 

@@ -1,6 +1,6 @@
 /** A column that could have a role by its name, or because the user said so, before it is compared with others. */
 import type { ColumnRole } from "../reading.ts";
-import { answerName, type ResolvedAnswer } from "./answers.ts";
+import type { ResolvedAnswer } from "./answers.ts";
 import { type DayCount, dayCountByName, dayCountOf } from "./day-count.ts";
 import { type MarkEvidence, markEvidence } from "./number-style.ts";
 import { isMissing } from "./parse-number.ts";
@@ -71,7 +71,12 @@ function evenlyChosen(rows: Rows, columnIndex: number): readonly string[] {
 }
 
 /** null when the header is no name that we use. */
-export function contenderOf(table: Table, columnIndex: number, answer: ResolvedAnswer | null): Contender | null {
+export function contenderOf(
+  table: Table,
+  columnIndex: number,
+  name: string,
+  answer: ResolvedAnswer | null,
+): Contender | null {
   const header = table.header.cells[columnIndex]!;
   const meaning = namedRole(table, columnIndex, answer);
   if (meaning === null || answer?.role === "unused") return null;
@@ -87,7 +92,7 @@ export function contenderOf(table: Table, columnIndex: number, answer: ResolvedA
   return {
     columnIndex,
     header,
-    name: answerName(table.header.cells, columnIndex),
+    name,
     role,
     rankIndex: meaning.rankIndex,
     written: isInHeader ? meaning.written : fromRow,

@@ -1,7 +1,7 @@
 /** Which column is what, in which unit, and why: at most one column for each role, but for flags about other columns. */
 import type { Issue } from "../../base/index.ts";
 import type { ColumnReading, ColumnRole, Question, ReadingAnswers } from "../reading.ts";
-import { answerName, resolveAnswers } from "./answers.ts";
+import { answerNames, resolveAnswers } from "./answers.ts";
 import { choose } from "./ask.ts";
 import { COLUMN_NAMES } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
@@ -100,12 +100,12 @@ function twinsOf(
 }
 
 /** Heights above a datum are depths only against the height of the water surface. */
-function settleElevation(decision: Decision, decisions: readonly Decision[], headers: readonly string[]): Decision {
+function settleElevation(decision: Decision, decisions: readonly Decision[], names: readonly string[]): Decision {
   const { reading } = decision;
   if (reading.role !== "elevation" || decision.used?.isAnswered || usesAny(decisions, ["surfaceElevation"]))
     return decision;
   if (usesAny(decisions, ["depth", "seaPressure", "absolutePressure"])) return decision;
-  const name = answerName(headers, reading.columnIndex);
+  const name = names[reading.columnIndex]!;
   const why = "the file does not give the elevation of the water surface, from which depth counts";
   const message = `"${reading.header}": ${why}; say that the highest sample of a cast is at the surface, or add a column of water-surface elevation`;
   return doubt(reading, why, {
@@ -126,8 +126,8 @@ function settleDateParts(decision: Decision, decisions: readonly Decision[]): De
   return leave(decision.reading, "year, month and day make a date only together");
 }
 
-function settled(decisions: readonly Decision[], headers: readonly string[]): readonly Decision[] {
-  return decisions.map((decision) => settleDateParts(settleElevation(decision, decisions, headers), decisions));
+function settled(decisions: readonly Decision[], names: readonly string[]): readonly Decision[] {
+  return decisions.map((decision) => settleDateParts(settleElevation(decision, decisions, names), decisions));
 }
 
 /** One note of each kind is enough where it is about the way a whole table is written. */
@@ -138,8 +138,9 @@ function once(issues: readonly Issue[]): readonly Issue[] {
 /** Reads every header of a table. What must be asked leaves its column unused, with an issue and a question. */
 export function recogniseColumns(table: Table, answers: ReadingAnswers): RecognisedColumns {
   const headers = table.header.cells;
+  const names = answerNames(headers);
   const said = resolveAnswers(headers, answers);
-  const all = headers.map((_, i) => contenderOf(table, i, said.byColumn.get(i) ?? null));
+  const all = headers.map((_, i) => contenderOf(table, i, names[i]!, said.byColumn.get(i) ?? null));
   const contenders = all.filter((contender) => contender !== null);
   const markOfTable = tableMark(contenders.flatMap((contender) => contender.evidence ?? []));
   const winners = winnersOf(contenders);
@@ -153,7 +154,7 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
       if (flag.column) flags.push(flag.column);
       return flag.decision;
     }
-    if (contender === null) return whyUnused(place, answerName(headers, columnIndex));
+    if (contender === null) return whyUnused(place, names[columnIndex]!);
     const winner = winners.get(contender.role)!;
     const asked = twins.get(contender.role);
     if (winner === contender) return asked ?? decide(contender, markOfTable);
@@ -162,7 +163,7 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
       ? leave(place, "which column of this name it is has to be said", "doubtful")
       : passOver(contender, winner);
   });
-  const decisions = settled(first, headers);
+  const decisions = settled(first, names);
   const used: Partial<Record<ColumnRole, UsedColumn>> = {};
   for (const [i, decision] of decisions.entries()) {
     const role = decision.reading.role ?? all[i]?.role;
