@@ -7,13 +7,13 @@ export const defaultStratificationOptions: StratificationOptions = {
   mixedLayerThreshold: { quantity: "density", stepKgM3: 0.1 },
   // What bounds a lake's metalimnion, by custom.
   mixedLayerGradientKgM3PerM: 0.1,
-  // Sensor noise of 0.005 kg/m3 then makes less than 1e-4 s-2; a halocline of some metres is left as it is.
+  // Averages four samples of a probe read every 0.25 m; a halocline of some metres is left as it is.
   smoothingLengthM: 1,
   // Lets a seasonal thermocline stand beside a halocline, and steps of the record not.
   prominenceFrac: 0.2,
   modeCount: 3,
-  // Noise of a good probe in brackish water: 0.01 degC and 0.01 in salinity.
-  densityNoiseKgM3: 0.01,
+  // Temperature read to 0.1 degC in warm water makes 0.026; quality control calls an inversion suspect above the same.
+  densityNoiseKgM3: 0.03,
   velocity: null,
 };
 

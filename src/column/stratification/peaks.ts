@@ -7,7 +7,8 @@ export interface Peak {
 
 /**
  * The peaks of a profile, from the surface, with how far each stands above the higher of the two troughs that part it
- * from higher ground; above the surface and below the bottom the ground is at zero.
+ * from higher ground; above the surface and below the bottom the ground is at zero. Of equally high ones the uppermost
+ * counts as the highest.
  * @param squaredPerS2 not negative
  */
 export function peaksOf(squaredPerS2: Float64Array): readonly Peak[] {
@@ -24,10 +25,12 @@ export function peaksOf(squaredPerS2: Float64Array): readonly Peak[] {
 
 /** The lowest value between a peak and higher ground in one direction. */
 function troughTowards(values: Float64Array, peakIndex: number, direction: 1 | -1): number {
-  let lowest = values[peakIndex]!;
+  const height = values[peakIndex]!;
+  let lowest = height;
   for (let i = peakIndex + direction; i >= 0 && i < values.length; i += direction) {
-    if (values[i]! > values[peakIndex]!) return lowest;
-    lowest = Math.min(lowest, values[i]!);
+    const ground = values[i]!;
+    if (ground > height || (direction < 0 && ground === height)) return lowest;
+    lowest = Math.min(lowest, ground);
   }
   return 0;
 }

@@ -1,6 +1,7 @@
+import { type Setting, squaredFrequency } from "./buoyancy-profiles.ts";
 import type { LinearProfile } from "./linear-profile.ts";
 import { type Peak, peaksOf } from "./peaks.ts";
-import type { BuoyancyProfile, Pycnocline } from "./stratification.ts";
+import type { BuoyancyProfile, Pycnocline, StratificationOptions } from "./stratification.ts";
 
 /** Shares of the gain in density between which a pycnocline's thickness is measured. */
 const TOP_FRAC = 0.15;
@@ -10,20 +11,22 @@ const BOTTOM_FRAC = 0.85;
 const FLAT_FRAC = 1e-6;
 
 /**
- * The pycnoclines of a column: peaks of its smoothed buoyancy frequency squared whose prominence is more than a share of
- * the highest peak and which gain more density than noise. Each owns the water down to the trough before the next; its
- * thickness is the distance in which density gains from 15 % to 85 % of what it gains there. The main one, which gains
- * most, comes first. A tanh of half-thickness d is 1.735 d thick.
+ * The pycnoclines of a column: peaks of its smoothed buoyancy frequency squared that stand out by more than a share of
+ * the highest and by more than noise over the smoothing length makes. Each owns the water down to the trough before the
+ * next; its thickness is the distance in which density gains from 15 % to 85 % of what it gains there. The main one,
+ * which gains most, comes first. A tanh of half-thickness d is 1.735 d thick.
  * @param sorted potential density that does not decrease downward, kg/m3, the ground of `smoothed`
  */
 export function pycnoclinesOf(
   smoothed: BuoyancyProfile,
   sorted: LinearProfile,
-  limits: { readonly prominenceFrac: number; readonly densityNoiseKgM3: number },
+  how: Setting & Pick<StratificationOptions, "prominenceFrac" | "densityNoiseKgM3" | "smoothingLengthM">,
 ): readonly Pycnocline[] {
   const { depthM, squaredPerS2 } = smoothed;
   const highestPerS2 = squaredPerS2.reduce((highest, squared) => Math.max(highest, squared), 0);
-  const peaks = peaksOf(squaredPerS2).filter((peak) => peak.prominencePerS2 > limits.prominenceFrac * highestPerS2);
+  const noisePerS2 = squaredFrequency(how, how.densityNoiseKgM3, how.smoothingLengthM);
+  const leastPerS2 = Math.max(how.prominenceFrac * highestPerS2, noisePerS2);
+  const peaks = peaksOf(squaredPerS2).filter((peak) => peak.prominencePerS2 > leastPerS2);
   const troughDepthsM = peaks
     .slice(1)
     .map((peak, i) => depthM[lowestBetween(squaredPerS2, peaks[i]!.peakIndex, peak.peakIndex)]!);
@@ -46,7 +49,6 @@ export function pycnoclinesOf(
         thicknessM: bottomDepthM - topDepthM,
       };
     })
-    .filter((pycnocline) => pycnocline.rhoStepKgM3 > limits.densityNoiseKgM3)
     .sort((a, b) => b.rhoStepKgM3 - a.rhoStepKgM3);
 }
 

@@ -37,7 +37,7 @@ export function stratificationOf(column: Column, given: Partial<StratificationOp
   const smoothed = smoothedBuoyancy(sorted, smoothingLengthM, setting);
   const stability = stabilityOf(column.depthM, potentialRhoKgM3, densityNoiseKgM3);
   const isLayered = stability.verdict !== "neutral";
-  const pycnoclines = isLayered ? pycnoclinesOf(smoothed, sorted, options) : [];
+  const pycnoclines = isLayered ? pycnoclinesOf(smoothed, sorted, { ...setting, ...options }) : [];
   const main = pycnoclines[0];
   const potentialEnergyAnomalyJM3 = potentialEnergyAnomaly(measured, gravityMs2);
   const layers = main ? twoLayers(measured, main.depthM, { gravityMs2, potentialEnergyAnomalyJM3 }) : null;

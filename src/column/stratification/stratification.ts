@@ -25,7 +25,7 @@ export interface StratificationOptions {
   readonly mixedLayerGradientKgM3PerM: number;
   /** Length over which density is averaged for the smoothed buoyancy frequency. */
   readonly smoothingLengthM: number;
-  /** A peak of the smoothed buoyancy frequency is a pycnocline if it stands out by this share of the highest. */
+  /** A peak of the smoothed buoyancy frequency squared is a pycnocline if it stands out by more than this share of the highest. */
   readonly prominenceFrac: number;
   readonly modeCount: number;
   /** Density differences up to this are noise: no inversion, no layering. */
