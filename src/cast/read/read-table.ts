@@ -143,7 +143,7 @@ const knownAbsolute = (column: ColumnReading): ColumnReading =>
         ...column,
         role: "absolutePressure",
         confidence: "likely",
-        reason: "Named as pressure; its first readings show the air.",
+        reason: "Named as pressure; its values show the weight of the air.",
       }
     : column;
 

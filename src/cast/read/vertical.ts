@@ -65,10 +65,21 @@ function withoutAir(absoluteDbar: Float64Array): Pressure {
   };
 }
 
-/** A pressure column that does not say whether it is gauge, but shows the air in its first rows, is absolute. */
-function readPressure(reader: CellReader, isGauge: boolean): Pressure {
+/** Pressure in dbar and depth in metres differ by the weight of the air, or hardly at all, at the shallowest sample. */
+function exceedsDepth(pressureDbar: Float64Array, depthM: Float64Array | null): boolean {
+  if (depthM === null) return false;
+  let at = -1;
+  for (let i = 0; i < depthM.length; i++) {
+    const isMeasured = depthM[i]! >= 0 && !Number.isNaN(pressureDbar[i]!);
+    if (isMeasured && (at < 0 || depthM[i]! < depthM[at]!)) at = i;
+  }
+  return at >= 0 && isWeightOfAir(pressureDbar[at]! - depthM[at]!);
+}
+
+/** A pressure column that does not say whether it is gauge is absolute where its first rows or the depths show the air. */
+function readPressure(reader: CellReader, isGauge: boolean, depthM: Float64Array | null): Pressure {
   const own = reader.numbers("seaPressure");
-  if (own !== null && !isGauge && deckReadingDbar(own) !== null) return withoutAir(own);
+  if (own !== null && !isGauge && (deckReadingDbar(own) !== null || exceedsDepth(own, depthM))) return withoutAir(own);
   const absolute = own === null ? reader.numbers("absolutePressure") : null;
   return absolute === null ? { seaPressureDbar: own, isAbsolute: false, issues: [] } : withoutAir(absolute);
 }
@@ -82,8 +93,8 @@ function depthFrom(elevationM: Float64Array | null, surfaceM: Float64Array | nul
 
 /** @param isGauge whether the column of sea pressure says that it is gauge pressure */
 export function readVertical(reader: CellReader, isGauge: boolean): Vertical {
-  const pressure = readPressure(reader, isGauge);
   const depth = reader.numbers("depth");
+  const pressure = readPressure(reader, isGauge, depth);
   if (depth !== null || pressure.seaPressureDbar !== null) return { depthM: depth, ...pressure, isFromHighest: false };
   const surface = reader.numbers("surfaceElevation");
   const depthM = depthFrom(reader.numbers("elevation"), surface);

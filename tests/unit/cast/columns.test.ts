@@ -257,6 +257,15 @@ describe("units that the file does not give", () => {
     expect(readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], [25, 9, 30], [30, 9, 30])).questions).toEqual([]);
   });
 
+  test("beside depth, pressure shows by itself whether the air is in it", () => {
+    const headers = ["Depth (m)", "Pressure (dbar)", "Temp (C)", "Sal"];
+    const absolute = readText(table(headers, [1, 11.1, 9, 30], [5, 15.1, 9, 30]));
+    expect(onlyCast(absolute).samples.seaPressureDbar![0]).toBe(11.1 - 10.1325);
+    expect(rolesOf(absolute).absolutePressure).toEqual(["Pressure (dbar)", "dbar"]);
+    const gauge = readText(table(headers, [11, 11.1, 9, 30], [15, 15.1, 9, 30]));
+    expect(onlyCast(gauge).samples.seaPressureDbar![0]).toBe(11.1);
+  });
+
   test("pressure that starts at one atmosphere is suspected to be absolute, and no cast is made of it", () => {
     const reading = readText(table(["Pressure (dbar)", "Temp (C)", "Sal"], [10.2, 9, 30], [15, 9, 30]));
     expect(reading.casts).toEqual([]);
