@@ -5,6 +5,7 @@ import type { Question } from "../reading.ts";
 import { answerNames } from "./answers.ts";
 import { choose, chooseForm, type Doubt, questionOf } from "./ask.ts";
 import type { MeasuredRows } from "./measured-rows.ts";
+import { widthOf } from "./parse-table.ts";
 import type { RecognisedColumns, UsedColumn } from "./recognise-columns.ts";
 import { chosenRows, type Rows } from "./rows.ts";
 import type { Table } from "./table.ts";
@@ -24,7 +25,7 @@ function isWide({ rows, header }: Table, row: number): boolean {
 }
 
 const isShort = ({ rows, header }: Table, row: number): boolean =>
-  rows.cellAt(row, header.cells.length - 1) === undefined;
+  rows.cellAt(row, widthOf(header.cells) - 1) === undefined;
 
 /** How many rows are not of the header's width, with the first of them; null when none is. */
 function describe({ rows, header }: Table, odd: Rows, word: string): { found: string; line: number } | null {

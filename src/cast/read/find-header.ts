@@ -1,6 +1,14 @@
 /** Finds the delimiter, the header row and a row of units below it: whichever delimiter makes most sense of a header. */
 import { unitByName } from "../../units/index.ts";
-import { DELIMITERS, type Delimiter, isCommentLine, parseTable, type Row, withoutCommentSign } from "./parse-table.ts";
+import {
+  DELIMITERS,
+  type Delimiter,
+  isCommentLine,
+  parseTable,
+  type Row,
+  widthOf,
+  withoutCommentSign,
+} from "./parse-table.ts";
 import { readHeaderCell } from "./read-header-cell.ts";
 import { isMeasured, MEASURED } from "./roles.ts";
 import { chosenRows, rowsBetween } from "./rows.ts";
@@ -34,9 +42,6 @@ function rolesIn(cells: readonly string[], delimiter: Delimiter): ReadonlySet<st
   if (isTorn || cells.length < 2) return new Set();
   return new Set(cells.flatMap((cell) => readHeaderCell(cell)?.role ?? []));
 }
-
-/** Cells up to the last that holds something: a delimiter at the end of a line opens no column. */
-const widthOf = (cells: readonly string[]): number => cells.findLastIndex((cell) => cell !== "") + 1;
 
 function scoreOf(rows: readonly Row[], at: number, delimiter: Delimiter): number {
   const header = rows[at]!.cells;
@@ -214,10 +219,7 @@ export function findTable(text: string, onShare?: OnShare): Table | null {
   const near = rowsBetween(all, 0, at + ROWS_TO_NUMBERS);
   const names = namesAt(near, at, candidate.delimiter);
   const units = unitsIn(names.cells, near[names.lastAt + 1]);
-  const header = {
-    lineIndex: near[names.lastAt]!.lineIndex,
-    cells: names.cells.slice(0, Math.max(2, widthOf(names.cells))),
-  };
+  const header = { lineIndex: near[names.lastAt]!.lineIndex, cells: names.cells };
   const bodyAt = names.lastAt + (units === null ? 1 : 2);
   const first = near[at]!.cells;
   return {

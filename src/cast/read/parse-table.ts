@@ -7,6 +7,9 @@ export interface Row {
   readonly cells: readonly string[];
 }
 
+/** Cells up to the last that holds something: a delimiter at the end of a line opens no column. */
+export const widthOf = (cells: readonly string[]): number => cells.findLastIndex((cell) => cell !== "") + 1;
+
 export interface ParsedRows {
   /** The rows that have anything in them, cells trimmed. */
   readonly rows: readonly Row[];

@@ -71,6 +71,12 @@ describe("values that cannot be right", () => {
     expect(issueOf(reading.issues, "rows-too-wide")).toMatchObject({ severity: "warning", line: 3 });
   });
 
+  test("a last column without a name is listed and not used, whatever it holds", () => {
+    const reading = readText(`${HEADER},\n1,10,30,calm\n2,9,31,calm\n`);
+    expect(reading.columns[3]).toMatchObject({ header: "", role: null, reason: "Not used: it has no name." });
+    expect(reading.issues).toEqual([]);
+  });
+
   test("an open quotation mark is named", () => {
     const reading = readText(`${HEADER},Note\n1,10,30,a\n2,10,30,b\n3,10,30,"c\n4,10,30,d\n`);
     expect(codesOf(reading.issues)).toContain("open-quote");
