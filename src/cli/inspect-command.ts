@@ -44,6 +44,7 @@ export async function inspectCommand(host: Host, args: readonly string[]): Promi
 
 function readingText(reading: AnyFileReading): string {
   const { sheet, sheets } = reading;
+  const header = reading.headerLineIndex > 0 ? `header in line ${reading.headerLineIndex}, ` : "";
   const decimal = reading.decimalMark === "," ? "decimal comma" : "decimal point";
   const columns = textTable(
     [
@@ -63,7 +64,7 @@ function readingText(reading: AnyFileReading): string {
   );
   return [
     reading.fileName,
-    `  ${reading.encoding}, ${reading.delimiter}, ${decimal}, header in line ${reading.headerLineIndex}, ${reading.rowCount} rows`,
+    `  ${reading.encoding}, ${reading.delimiter}, ${decimal}, ${header}${reading.rowCount} rows`,
     ...(sheet === null ? [] : [`  sheet ${sheet}, of ${sheets.join(", ")}`]),
     columns,
   ].join("\n");

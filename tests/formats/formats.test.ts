@@ -16,7 +16,8 @@ const PRACTICAL_SALINITY = [2.5, 3.25, 10, 24.5, 30.125];
 
 describe("netCDF with CF conventions", () => {
   it("reads one profile in the classic format, its place and time from scalars", async () => {
-    const { encoding, casts, questions } = await reading("single-profile-classic.nc");
+    const { encoding, casts, questions, issues } = await reading("single-profile-classic.nc");
+    expect(issues).toEqual([]);
     expect(encoding).toBe("netCDF classic");
     expect(questions).toEqual([]);
     const [cast] = casts;

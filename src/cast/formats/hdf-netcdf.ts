@@ -1,4 +1,5 @@
 import type { Dataset, Group } from "h5wasm";
+import { checkHeaps } from "./hdf-heaps.ts";
 import type { Attributes, NetcdfFile } from "./netcdf-file.ts";
 import { sizeOf } from "./netcdf-file.ts";
 
@@ -44,6 +45,7 @@ function dimensionsOf(dataset: Dataset): NetcdfFile["variables"][number]["dimens
 
 /** Reads netCDF-4, which is HDF5, from its root group. Throws where the header promises what the file cannot hold. */
 export async function readHdfNetcdf(bytes: Uint8Array): Promise<NetcdfFile> {
+  checkHeaps(bytes);
   const h5wasm = await import("h5wasm");
   const module = await h5wasm.ready;
   module.activate_throwing_error_handler();

@@ -4,7 +4,9 @@ import type { Cast } from "../cast.ts";
 import type { ColumnReading, FileReading, Question, ReadingAnswers } from "../reading.ts";
 import { buildCast, named } from "./build-cast.ts";
 import { checkColumns } from "./check-columns.ts";
-import { askAboutVertical, checkRows, rowLengthIssues, withoutShiftedRows } from "./check-rows.ts";
+import { askAboutVertical } from "./ask-about-vertical.ts";
+import { checkPlaces } from "./check-places.ts";
+import { rowLengthIssues, withoutShiftedRows } from "./row-lengths.ts";
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
@@ -124,7 +126,7 @@ function withCasts(
   onShare: OnShare,
 ): Outcome<FileReading> {
   const rows = readMeasuredRows(table, columns, within(onShare, 0, 0.8));
-  const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...checkRows(rows)];
+  const issues = [...reading.issues, ...saltIssues(columns), ...rows.issues, ...checkPlaces(rows)];
   const asked = askAboutVertical(table, columns, rows);
   if (asked !== null) return succeeded(waitingFor(asked, { ...reading, issues: [...issues, asIssue(asked)] }));
   const { groups, splitBy } = splitCasts(rows);

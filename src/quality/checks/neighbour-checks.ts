@@ -20,13 +20,13 @@ const MOST_ROUNDS_COUNT = 50;
  * @param order indices of samples from the top down
  */
 export function checkNeighbours(evidence: Evidence, order: readonly number[]): readonly Finding[] {
-  const failed: Finding[] = [];
+  let failed: readonly Finding[] = [];
   let left = order;
   for (let round = 0; round < MOST_ROUNDS_COUNT && left.length > 0; round++) {
     const found = firstFailure(evidence, left);
     if (found.failing.length === 0) return [...failed, ...found.suspects];
     const gone = new Set(found.failing.map(({ sampleIndex }) => sampleIndex));
-    failed.push(...found.suspects.filter(({ sampleIndex }) => gone.has(sampleIndex)), ...found.failing);
+    failed = [...failed, ...found.suspects.filter(({ sampleIndex }) => gone.has(sampleIndex)), ...found.failing];
     left = left.filter((i) => !gone.has(i));
   }
   return failed;
@@ -37,12 +37,12 @@ function firstFailure(
   evidence: Evidence,
   order: readonly number[],
 ): { readonly failing: readonly Finding[]; readonly suspects: readonly Finding[] } {
-  const suspects: Finding[] = [];
+  let suspects: readonly Finding[] = [];
   for (const check of IN_TURN) {
     const found = check(evidence, order);
     const failing = found.filter(({ flag }) => flag === QUALITY_FLAG.fail);
     if (failing.length > 0) return { failing, suspects };
-    suspects.push(...found);
+    suspects = [...suspects, ...found];
   }
   return { failing: [], suspects };
 }

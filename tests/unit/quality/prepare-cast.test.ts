@@ -155,3 +155,15 @@ describe("the invented estuary", () => {
     }
   });
 });
+
+describe("a long record", () => {
+  it("of two hundred thousand equal samples is checked like any other", () => {
+    const n = 200_000;
+    const prepared = preparedOf({
+      depthM: Array.from({ length: n }, (_, i) => i / 1000),
+      inSituTempC: new Array<number>(n).fill(12.345),
+      practicalSalinity: new Array<number>(n).fill(20.123),
+    });
+    expect(prepared.flag).toHaveLength(n);
+  });
+});
