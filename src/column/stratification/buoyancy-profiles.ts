@@ -1,6 +1,7 @@
 import { buoyancyFrequency } from "../buoyancy-frequency.ts";
 import type { Column } from "../column.ts";
 import type { LinearProfile } from "./linear-profile.ts";
+import { partWay } from "./part-way.ts";
 import type { BuoyancyProfile } from "./stratification.ts";
 
 /** What turns a step of density into a buoyancy frequency: gravity, and the one density of the Boussinesq approximation. */
@@ -49,7 +50,7 @@ export function smoothedBuoyancy(sorted: LinearProfile, smoothingLengthM: number
   const bottomM = sorted.bottomDepthM;
   const wanted = Math.ceil((STEPS_PER_SMOOTHING_COUNT * bottomM) / smoothingLengthM);
   const steps = Math.min(Math.max(wanted, FEWEST_STEPS_COUNT), MOST_STEPS_COUNT);
-  const depthM = Float64Array.from({ length: steps + 1 }, (_, i) => (bottomM * i) / steps);
+  const depthM = Float64Array.from({ length: steps + 1 }, (_, i) => partWay([0, bottomM], i / steps));
   const squaredPerS2 = depthM.map((depth) => {
     const upperM = Math.max(depth - smoothingLengthM / 2, 0);
     const lowerM = Math.min(depth + smoothingLengthM / 2, bottomM);

@@ -1,3 +1,5 @@
+import { partWay } from "./part-way.ts";
+
 /** Something known at some depths, linear between them and held beyond the ends; two depths may coincide at a jump. */
 export class LinearProfile {
   readonly depthM: Float64Array;
@@ -30,7 +32,7 @@ export class LinearProfile {
     const last = this.depthM.length - 1;
     if (k === last) return this.values[last]!;
     const share = (depthM - this.depthM[k]!) / (this.depthM[k + 1]! - this.depthM[k]!);
-    return this.values[k]! + share * (this.values[k + 1]! - this.values[k]!);
+    return partWay([this.values[k]!, this.values[k + 1]!], share);
   }
 
   /** Depth mean; the value itself where both depths are one. */
@@ -50,7 +52,7 @@ export class LinearProfile {
     if (k < 0) return this.bottomDepthM;
     if (k === 0) return this.topDepthM;
     const share = (values - this.values[k - 1]!) / (this.values[k]! - this.values[k - 1]!);
-    return this.depthM[k - 1]! + share * (this.depthM[k]! - this.depthM[k - 1]!);
+    return partWay([this.depthM[k - 1]!, this.depthM[k]!], share);
   }
 
   #excessDownTo(depthM: number): number {

@@ -1,5 +1,6 @@
 import type { Column } from "../column.ts";
 import type { Setting } from "./buoyancy-profiles.ts";
+import { partWay } from "./part-way.ts";
 import type { BuoyancyProfile, MixedLayer, MixedLayerEnd, StratificationOptions } from "./stratification.ts";
 
 /**
@@ -37,7 +38,7 @@ export function mixedDownToStep(depthM: Float64Array, values: Float64Array, bott
   if (k < 0) return { depthM: bottomDepthM, reachesBottom: true };
   const crossed = values[0]! + Math.sign(values[k]! - values[0]!);
   const share = (crossed - values[k - 1]!) / (values[k]! - values[k - 1]!);
-  return { depthM: depthM[k - 1]! + share * (depthM[k]! - depthM[k - 1]!), reachesBottom: false };
+  return { depthM: partWay([depthM[k - 1]!, depthM[k]!], share), reachesBottom: false };
 }
 
 /** The shallowest depth at which smoothed potential density gains `gradientKgM3PerM`; the bottom where it never does. */
@@ -51,5 +52,5 @@ export function mixedDownToGradient(
   if (k < 0) return { depthM: depthM.at(-1)!, reachesBottom: true };
   if (k === 0) return { depthM: depthM[0]!, reachesBottom: false };
   const share = (limitPerS2 - squaredPerS2[k - 1]!) / (squaredPerS2[k]! - squaredPerS2[k - 1]!);
-  return { depthM: depthM[k - 1]! + share * (depthM[k]! - depthM[k - 1]!), reachesBottom: false };
+  return { depthM: partWay([depthM[k - 1]!, depthM[k]!], share), reachesBottom: false };
 }

@@ -1,18 +1,12 @@
-import { type Setting, squaredFrequency } from "./buoyancy-profiles.ts";
+import type { Setting } from "./buoyancy-profiles.ts";
 import type { LinearProfile } from "./linear-profile.ts";
 import type { VerticalModes } from "./stratification.ts";
 
-const COARSE_COUNT = 256;
-const FINE_COUNT = 2 * COARSE_COUNT;
+/** Slower waves take hours to a metre: what drives them is rounding, not layering. */
+const SLOWEST_MS = 1e-4;
 
-/** Weaker buoyancy frequencies squared, s-2, belong to mixed water: they are rounding, or periods above 17 hours. */
-const MIXED_PER_S2 = 1e-8;
-
-/** A mode whose speed differs by more than this share between both grids is made by the grid. */
-const UNRESOLVED_FRAC = 0.02;
-
-/** Halvings that take a speed to the last digit of the greatest one possible. */
-const HALVINGS_COUNT = 54;
+/** A speed is known when its bounds are this close to each other, relative. */
+const CLOSE_FRAC = 1e-13;
 
 /** Rotation of the Earth against the stars, rad/s (Geodetic Reference System 1980, Moritz 2000). */
 const EARTH_ROTATION_RAD_S = 7.292115e-5;
@@ -21,63 +15,62 @@ const EARTH_ROTATION_RAD_S = 7.292115e-5;
  * Speeds of the internal long waves of a continuously layered column, m/s, first mode first: W'' + (N^2 / c^2) W = 0 with
  * W = 0 at the surface (held flat) and at the bed (Gill 1982, sec. 6.11; from memory). Constant N: c = N H / (n pi).
  *
- * By finite elements of even thickness with the mass lumped, which makes N^2 at each joint the difference of the mean
- * densities of the elements above and below, so that a jump of density weighs in full wherever it lies. The error falls
- * with the square of the thickness; the speeds of two grids are carried on to none (Richardson).
+ * Density that is linear between depths makes N constant there, where W is a sine (Pruess 1973), and a jump of density
+ * breaks the slope of W: so W is followed down the column exactly, for any c. Mode n is the greatest c that gives W a
+ * zero at the bed with n - 1 above it (Sturm); it is found by halving the range that the number of zeros leaves.
  * @param sorted potential density that does not decrease downward, kg/m3, from surface to bed
- * @returns no more than `modeCount`; fewer where the grids cannot tell any more from mixed water or a jump
+ * @returns no more than `modeCount`; fewer where the next is slower than 0.1 mm/s, as below a single jump
  */
 export function modeSpeeds(sorted: LinearProfile, setting: Setting, modeCount: number): Float64Array {
+  const weightMs2 = setting.gravityMs2 / setting.meanRhoKgM3;
   const gainKgM3 = sorted.values.at(-1)! - sorted.values[0]!;
-  const depthM = sorted.bottomDepthM;
   // No column has a faster wave than the one whose whole gain in density lies halfway down.
-  const greatestMs = Math.sqrt(squaredFrequency(setting, gainKgM3, depthM)) * (depthM / 2);
-  const coarse = jointFrequencies(sorted, setting, COARSE_COUNT);
-  const fine = jointFrequencies(sorted, setting, FINE_COUNT);
+  const greatestMs = Math.sqrt(weightMs2 * gainKgM3 * sorted.bottomDepthM) / 2;
   const speeds: number[] = [];
   for (let mode = 0; mode < modeCount; mode++) {
-    const coarseMs = speedOfMode(mode, coarse, depthM / COARSE_COUNT, greatestMs);
-    const fineMs = speedOfMode(mode, fine, depthM / FINE_COUNT, greatestMs);
-    if (!(coarseMs > 0 && Math.abs(fineMs - coarseMs) < UNRESOLVED_FRAC * fineMs)) break;
-    speeds.push((4 * fineMs - coarseMs) / 3);
+    if (zeroCount(sorted, weightMs2, SLOWEST_MS) <= mode) break;
+    let slow = SLOWEST_MS;
+    let fast = greatestMs * (1 + CLOSE_FRAC);
+    while (fast - slow > CLOSE_FRAC * fast) {
+      const middle = (slow + fast) / 2;
+      if (zeroCount(sorted, weightMs2, middle) > mode) slow = middle;
+      else fast = middle;
+    }
+    speeds.push(slow);
   }
   return Float64Array.from(speeds);
 }
 
-/** Buoyancy frequency squared at the joints of elements of even thickness. */
-function jointFrequencies(sorted: LinearProfile, setting: Setting, elementCount: number): Float64Array {
-  const thicknessM = sorted.bottomDepthM / elementCount;
-  const meanRho = (elementIndex: number): number =>
-    sorted.meanExcess(elementIndex * thicknessM, (elementIndex + 1) * thicknessM);
-  return Float64Array.from({ length: elementCount - 1 }, (_, i) => {
-    const squaredPerS2 = squaredFrequency(setting, meanRho(i + 1) - meanRho(i), thicknessM);
-    return squaredPerS2 > MIXED_PER_S2 ? squaredPerS2 : 0;
-  });
-}
-
-/** By bisection between zero and the greatest speed: mode k (from 0) is faster than a speed that more than k modes exceed. */
-function speedOfMode(modeIndex: number, squaredPerS2: Float64Array, thicknessM: number, greatestMs: number): number {
-  let slow = 0;
-  let fast = greatestMs * (1 + 1e-9);
-  for (let halving = 0; halving < HALVINGS_COUNT; halving++) {
-    const middle = (slow + fast) / 2;
-    if (fasterModeCount(squaredPerS2, thicknessM, middle) > modeIndex) slow = middle;
-    else fast = middle;
-  }
-  return slow;
-}
-
 /**
- * How many modes are faster than a speed: the negative pivots of the tridiagonal matrix 2 - (N h / c)^2, -1 (Sturm).
- * Joints in mixed water (N = 0) do no harm here.
+ * Zeros of W below the surface, the bed included, for waves of one speed: as many modes are as fast or faster.
+ * @param weightMs2 gravity over mean density, for densities in kg/m3
  */
-function fasterModeCount(squaredPerS2: Float64Array, thicknessM: number, speedMs: number): number {
-  const weight = (thicknessM / speedMs) ** 2;
+function zeroCount({ depthM, values }: LinearProfile, weightMs2: number, speedMs: number): number {
   let count = 0;
-  let pivot = Number.POSITIVE_INFINITY;
-  for (let i = 0; i < squaredPerS2.length; i++) {
-    pivot = 2 - weight * squaredPerS2[i]! - 1 / pivot;
-    if (pivot < 0) count++;
+  let w = 0;
+  let slope = 1;
+  for (let i = 1; i < depthM.length; i++) {
+    const thicknessM = depthM[i]! - depthM[i - 1]!;
+    const bend = (weightMs2 * (values[i]! - values[i - 1]!)) / speedMs ** 2;
+    if (thicknessM === 0) {
+      slope -= bend * w;
+    } else if (bend === 0) {
+      const next = w + slope * thicknessM;
+      if (next * w < 0) count++;
+      w = next;
+    } else {
+      const wavenumber = Math.sqrt(bend / thicknessM);
+      const phase = Math.atan2(wavenumber * w, slope);
+      const turned = wavenumber * thicknessM;
+      count += Math.floor((phase + turned) / Math.PI) - Math.floor(phase / Math.PI);
+      const next = w * Math.cos(turned) + (slope / wavenumber) * Math.sin(turned);
+      slope = slope * Math.cos(turned) - wavenumber * w * Math.sin(turned);
+      w = next;
+    }
+    // Only the ratio counts; both would grow without bound otherwise.
+    const size = Math.max(Math.abs(w), Math.abs(slope));
+    w /= size;
+    slope /= size;
   }
   return count;
 }
