@@ -27,21 +27,30 @@ const checked = run("npm", ["run", "--silent", "check"]);
 const folder = mkdtempSync(join(tmpdir(), "layerhead-test-"));
 const report = join(folder, "report.json");
 const projects = browser.path === null ? ["--project", "node"] : [];
-run("npx", ["vitest", "run", ...projects, "--reporter=dot", "--reporter=json", `--outputFile.json=${report}`], {
-  CHROME_PATH: browser.path ?? "",
-});
+const green = run(
+  "npx",
+  ["vitest", "run", ...projects, "--reporter=dot", "--reporter=json", `--outputFile.json=${report}`],
+  {
+    CHROME_PATH: browser.path ?? "",
+  },
+);
 
 let passed = 0;
 let failed = 0;
 try {
-  const { numPassedTests, numFailedTests, numFailedTestSuites, success } = JSON.parse(readFileSync(report, "utf8"));
+  const { numPassedTests, numFailedTests, testResults } = JSON.parse(readFileSync(report, "utf8"));
+  // A file that fails before its first test counts as one.
+  const broken = testResults.filter(
+    ({ status, assertionResults }) => status === "failed" && assertionResults.length === 0,
+  );
   passed = numPassedTests;
-  failed = numFailedTests || (success && numFailedTestSuites === 0 ? 0 : 1);
+  failed = numFailedTests + broken.length;
 } catch {
   console.log("The tests did not run to their end.");
   failed = 1;
 }
 rmSync(folder, { recursive: true });
+if (!green && failed === 0) failed = 1;
 
 if (!checked) {
   console.log("Types, lint or dead code: see above (npm run check).");
