@@ -22,10 +22,10 @@ export interface ResolvedAnswer extends AnsweredForm {
   readonly unitText: string | null;
 }
 
-const STYLES: Readonly<Record<string, NumberStyle>> = {
-  "decimal-comma": { decimalMark: ",", groupMark: "." },
-  "decimal-point": { decimalMark: ".", groupMark: "," },
-};
+const STYLES: ReadonlyMap<string, NumberStyle> = new Map([
+  ["decimal-comma", { decimalMark: ",", groupMark: "." }],
+  ["decimal-point", { decimalMark: ".", groupMark: "," }],
+]);
 
 const UPWARD = "upward";
 
@@ -45,9 +45,9 @@ export function formByText(role: ColumnRole, text: string): AnsweredForm | null 
   }
   if (!isMeasured(role)) return null;
   const words = text.trim().split(/\s+/);
-  const style = words.map((word) => STYLES[word]).find((found) => found !== undefined) ?? null;
+  const style = words.map((word) => STYLES.get(word)).find((found) => found !== undefined) ?? null;
   const isNegated = role === "depth" && words.includes(UPWARD);
-  const unitText = words.filter((word) => STYLES[word] === undefined && !(isNegated && word === UPWARD)).join(" ");
+  const unitText = words.filter((word) => !STYLES.has(word) && !(isNegated && word === UPWARD)).join(" ");
   if (unitText === "") return { ...NO_FORM, style, isNegated };
   const unit = unitByName(unitText, MEASURED[role].kind);
   return unit && { ...NO_FORM, unit: unit.symbol, style, isNegated };

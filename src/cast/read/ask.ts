@@ -29,8 +29,8 @@ export interface Doubt {
   readonly choices: readonly Choice[];
 }
 
-export const questionOf = (columnIndex: number, header: string, doubt: Doubt): Question => ({
+export const questionOf = (columnIndex: number, name: string, doubt: Doubt): Question => ({
   ...doubt,
   columnIndex,
-  choices: [...doubt.choices, leaveOut(header)],
+  choices: [...doubt.choices, leaveOut(name)],
 });

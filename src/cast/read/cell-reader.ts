@@ -21,10 +21,10 @@ const isPlace = (role: MeasuredRole): boolean => role === "latitude" || role ===
 
 const MONTH_FIRST: TimeForm = { order: "month-first", count: null };
 
+const LONGEST_SHOWN = 60;
+
 /** A cell in a message: as much as tells which it is. */
 const cut = (text: string): string => (text.length > LONGEST_SHOWN ? `${text.slice(0, LONGEST_SHOWN)}...` : text);
-
-const LONGEST_SHOWN = 60;
 
 const kindsOf = (texts: readonly string[]): string => [...new Set(texts)].join(", ");
 

@@ -4,8 +4,9 @@ import type { ColumnRole, Question } from "../reading.ts";
 import { answerNames } from "./answers.ts";
 import { type Choice, choose } from "./ask.ts";
 import { isMissing, parseNumber } from "./parse-number.ts";
-import { type RecognisedColumns, VERTICAL_ROLES } from "./recognise-columns.ts";
+import type { RecognisedColumns } from "./recognise-columns.ts";
 import { rowsBetween } from "./rows.ts";
+import { VERTICAL_ROLES } from "./settle-columns.ts";
 import type { Table } from "./table.ts";
 
 const TEMPERATURE_ROLES: readonly ColumnRole[] = ["temperature"];

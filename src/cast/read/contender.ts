@@ -33,6 +33,12 @@ export interface Contender {
 /** So many cells tell what kind of thing a column holds. */
 export const TELLING_CELLS = 200;
 
+/** "time (seconds since 1970-01-01)" */
+const BRACKETED = /[([]([^)\]]{1,80})[)\]]/;
+
+/** "Longitude (W)", "Long_W", "Longitude West", "degrees_west". */
+const WEST_OR_SOUTH = /(^|[^a-z])(w|s|west|south|degw|degs)([^a-z]|$)/i;
+
 /** A column named for a date may hold times too, and the other way about: its cells decide. */
 function roleByContent(role: ColumnRole, filled: readonly string[], named: DayCount | null): ColumnRole {
   if (role !== "date" && role !== "clock" && role !== "dateTime" && role !== "day") return role;
@@ -104,9 +110,3 @@ export function contenderOf(
     answer,
   };
 }
-
-/** "time (seconds since 1970-01-01)" */
-const BRACKETED = /[([]([^)\]]{1,80})[)\]]/;
-
-/** "Longitude (W)", "Long_W", "Longitude West", "degrees_west". */
-const WEST_OR_SOUTH = /(^|[^a-z])(w|s|west|south|degw|degs)([^a-z]|$)/i;

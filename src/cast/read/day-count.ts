@@ -28,21 +28,21 @@ const BY_RANGE: readonly (readonly [least: number, most: number, count: DayCount
   [2e11, 4.2e12, MILLISECONDS],
 ];
 
-const STEP_MS: Readonly<Record<string, number>> = {
-  ms: 1,
-  msec: 1,
-  millisecond: 1,
-  s: 1000,
-  sec: 1000,
-  second: 1000,
-  min: 60_000,
-  minute: 60_000,
-  h: 3_600_000,
-  hr: 3_600_000,
-  hour: 3_600_000,
-  d: DAY_MS,
-  day: DAY_MS,
-};
+const STEP_MS: ReadonlyMap<string, number> = new Map([
+  ["ms", 1],
+  ["msec", 1],
+  ["millisecond", 1],
+  ["s", 1000],
+  ["sec", 1000],
+  ["second", 1000],
+  ["min", 60_000],
+  ["minute", 60_000],
+  ["h", 3_600_000],
+  ["hr", 3_600_000],
+  ["hour", 3_600_000],
+  ["d", DAY_MS],
+  ["day", DAY_MS],
+]);
 
 export const KNOWN_COUNTS: readonly DayCount[] = BY_RANGE.map(([, , count]) => count);
 
@@ -55,7 +55,7 @@ export function dayCountByName(text: string): DayCount | null {
     /^([a-z]+?)s? since (\d{4}-\d{1,2}-\d{1,2})(?:[t ](\d{1,2}:\d{2}(?::\d{2})?)(?:\.0*)?)?(?: ?(?:z|utc|\+?0?0:?00))?$/.exec(
       plain,
     );
-  const stepMs = STEP_MS[match?.[1] ?? ""] ?? (match?.[1] === "" ? 1000 : undefined);
+  const stepMs = STEP_MS.get(match?.[1] ?? "") ?? (match?.[1] === "" ? 1000 : undefined);
   if (match === null || stepMs === undefined) return null;
   const [year, month, day] = match[2]!.split("-").map(Number);
   const [hours, minutes, seconds] = (match[3] ?? "0:0:0").split(":").map(Number);

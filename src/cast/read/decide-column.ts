@@ -124,7 +124,7 @@ function styleIssues({ header }: Contender, { style, toldBy }: StyleChoice): rea
   return [{ severity: "warning", code: "assumed-thousands", message }];
 }
 
-export const ASSUMED_COMMA: Issue = {
+const ASSUMED_COMMA: Issue = {
   severity: "warning",
   code: "assumed-decimal-comma",
   message: "every comma stands before three digits; it is read as the decimal mark; if it parts thousands, take it out",

@@ -31,6 +31,11 @@ export interface Decision {
 
 export type Place = Pick<ColumnReading, "columnIndex" | "header">;
 
+/** A column with the name by which an answer means it. */
+export interface NamedPlace extends Place {
+  readonly name: string;
+}
+
 const PLAIN: NumberStyle = { decimalMark: ".", groupMark: null };
 
 export const leave = (
@@ -46,9 +51,9 @@ export const leave = (
 });
 
 /** Not used until the user has said what it is. */
-export function doubt(place: Place, why: string, open: Doubt): Decision {
+export function doubt(place: NamedPlace, why: string, open: Doubt): Decision {
   const issue: Issue = { severity: "warning", code: open.code, message: open.message };
-  return { ...leave(place, why, "doubtful", issue), question: questionOf(place.columnIndex, place.header, open) };
+  return { ...leave(place, why, "doubtful", issue), question: questionOf(place.columnIndex, place.name, open) };
 }
 
 export type Use = Partial<Omit<UsedColumn, "columnIndex" | "isAnswered">> & {

@@ -18,11 +18,11 @@ const END = "END_DATA";
 const OWN_ROLES: ReadonlyMap<string, ColumnRole> = new Map([["DEPTH", "waterDepth"]]);
 
 /** The standard fixes the units of its keys. */
-const KEY_UNITS: Readonly<Record<string, string>> = {
-  DEPTH: "m",
-  LATITUDE: "degrees_north",
-  LONGITUDE: "degrees_east",
-};
+const KEY_UNITS: ReadonlyMap<string, string> = new Map([
+  ["DEPTH", "m"],
+  ["LATITUDE", "degrees_north"],
+  ["LONGITUDE", "degrees_east"],
+]);
 
 const COMMA = { character: ",", name: "comma" } as const;
 
@@ -65,7 +65,7 @@ export function exchangeTable(text: string): Table | null {
   return {
     delimiter: COMMA,
     header: { lineIndex: names.lineIndex, cells: [...names.cells, ...added.map(([key]) => key)] },
-    unitTexts: [...names.cells.map((_, i) => units.cells[i] ?? ""), ...added.map(([key]) => KEY_UNITS[key] ?? "")],
+    unitTexts: [...names.cells.map((_, i) => units.cells[i] ?? ""), ...added.map(([key]) => KEY_UNITS.get(key) ?? "")],
     rows: listedRows(rows.slice(2).map(widened)),
     preface: [],
     hasOpenQuote,

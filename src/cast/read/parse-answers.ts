@@ -11,22 +11,22 @@ type Said = ColumnRole | "unused";
 const lettersOnly = (text: string): string => text.toLowerCase().replace(/[^a-z]/g, "");
 
 /** Plain words beside the names and the descriptions of the roles. */
-const PLAIN_WORDS: Readonly<Record<string, Said>> = {
-  salinity: "practicalSalinity",
-  pressure: "seaPressure",
-  gaugepressure: "seaPressure",
-  conductance: "specificConductance",
-  tds: "dissolvedSolids",
-  sediment: "suspendedSediment",
-  sigma: "densityAnomaly",
-  cast: "castName",
-  time: "clock",
-  watersurfaceelevation: "surfaceElevation",
-  bottomdepth: "waterDepth",
-  flag: "qualityFlag",
-  unused: "unused",
-  none: "unused",
-};
+const PLAIN_WORDS: ReadonlyMap<string, Said> = new Map<string, Said>([
+  ["salinity", "practicalSalinity"],
+  ["pressure", "seaPressure"],
+  ["gaugepressure", "seaPressure"],
+  ["conductance", "specificConductance"],
+  ["tds", "dissolvedSolids"],
+  ["sediment", "suspendedSediment"],
+  ["sigma", "densityAnomaly"],
+  ["cast", "castName"],
+  ["time", "clock"],
+  ["watersurfaceelevation", "surfaceElevation"],
+  ["bottomdepth", "waterDepth"],
+  ["flag", "qualityFlag"],
+  ["unused", "unused"],
+  ["none", "unused"],
+]);
 
 const ROLES = Object.keys(ROLE_WORDS) as readonly ColumnRole[];
 
@@ -34,7 +34,7 @@ function roleByWord(word: string): Said | null {
   const wanted = lettersOnly(word);
   const isNamed = (role: ColumnRole): boolean =>
     role.toLowerCase() === wanted || lettersOnly(ROLE_WORDS[role]) === wanted;
-  return ROLES.find(isNamed) ?? PLAIN_WORDS[wanted] ?? null;
+  return ROLES.find(isNamed) ?? PLAIN_WORDS.get(wanted) ?? null;
 }
 
 /** Cut at a mark that is not within quotes; a backslash takes the meaning off the sign behind it. */

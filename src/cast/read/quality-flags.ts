@@ -9,7 +9,7 @@ import { isMissing } from "./parse-number.ts";
 import type { Table } from "./table.ts";
 
 /** What each flag of a column means. */
-type FlagScheme = Readonly<Record<string, number>>;
+type FlagScheme = ReadonlyMap<string, number>;
 
 export interface FlagColumn {
   readonly columnIndex: number;
@@ -28,33 +28,41 @@ const FAIL = 4;
 const MISSING = 9;
 
 /** 1 not calibrated, 2 good, 3 questionable, 4 bad, 5 not reported, 6 interpolated or a mean, 7 despiked, 8 irregular, 9 not sampled. */
-const EXCHANGE: FlagScheme = {
-  1: NOT_EVALUATED,
-  2: PASS,
-  3: SUSPECT,
-  4: FAIL,
-  5: MISSING,
-  6: PASS,
-  7: PASS,
-  8: SUSPECT,
-  9: MISSING,
-};
+const EXCHANGE: FlagScheme = new Map([
+  ["1", NOT_EVALUATED],
+  ["2", PASS],
+  ["3", SUSPECT],
+  ["4", FAIL],
+  ["5", MISSING],
+  ["6", PASS],
+  ["7", PASS],
+  ["8", SUSPECT],
+  ["9", MISSING],
+]);
 
 /** 1 good, 3 suspect, 4 bad, 9 missing agree in all figures of this family; 0 and 2 vouch for nothing. */
-const FIGURES: FlagScheme = { 0: NOT_EVALUATED, 1: PASS, 2: NOT_EVALUATED, 3: SUSPECT, 4: FAIL, 8: PASS, 9: MISSING };
+const FIGURES: FlagScheme = new Map([
+  ["0", NOT_EVALUATED],
+  ["1", PASS],
+  ["2", NOT_EVALUATED],
+  ["3", SUSPECT],
+  ["4", FAIL],
+  ["8", PASS],
+  ["9", MISSING],
+]);
 
-const WORDS: FlagScheme = {
-  pass: PASS,
-  passed: PASS,
-  good: PASS,
-  ok: PASS,
-  suspect: SUSPECT,
-  questionable: SUSPECT,
-  fail: FAIL,
-  failed: FAIL,
-  bad: FAIL,
-  missing: MISSING,
-};
+const WORDS: FlagScheme = new Map([
+  ["pass", PASS],
+  ["passed", PASS],
+  ["good", PASS],
+  ["ok", PASS],
+  ["suspect", SUSPECT],
+  ["questionable", SUSPECT],
+  ["fail", FAIL],
+  ["failed", FAIL],
+  ["bad", FAIL],
+  ["missing", MISSING],
+]);
 
 const plain = (text: string): string => text.trim().toLowerCase().replace(/\.0+$/, "");
 
@@ -79,13 +87,13 @@ function targetOf(headers: readonly string[], columnIndex: number): number {
 function schemeOf(header: string, values: ReadonlyMap<string, number>): FlagScheme | null {
   if (EXCHANGE_NAME.test(header)) return EXCHANGE;
   const flags = [...values.keys()];
-  if (flags.every((flag) => WORDS[flag] !== undefined)) return WORDS;
+  if (flags.every((flag) => WORDS.has(flag))) return WORDS;
   const countOf = (flag: string): number => values.get(flag) ?? 0;
   // 0 and 1 alone may mean good and bad, or bad and good.
   const isTold = countOf("1") > 0 && (countOf("0") === 0 || flags.length > 2);
-  if (isTold && flags.every((flag) => FIGURES[flag] !== undefined)) return FIGURES;
+  if (isTold && flags.every((flag) => FIGURES.has(flag))) return FIGURES;
   const isExchange = countOf("2") > countOf("1") && countOf("0") === 0;
-  return isExchange && flags.every((flag) => EXCHANGE[flag] !== undefined) ? EXCHANGE : null;
+  return isExchange && flags.every((flag) => EXCHANGE.has(flag)) ? EXCHANGE : null;
 }
 
 function flagsIn(table: Table, columnIndex: number): ReadonlyMap<string, number> {
@@ -141,7 +149,7 @@ export function statedFlags(table: Table, columns: readonly FlagColumn[]): Uint8
   return Uint8Array.from({ length: rows.length }, (_, row) =>
     columns.reduce(
       (worst, { columnIndex, scheme }) =>
-        worse(worst, scheme[plain(rows.cellAt(row, columnIndex) ?? "")] ?? NOT_EVALUATED),
+        worse(worst, scheme.get(plain(rows.cellAt(row, columnIndex) ?? "")) ?? NOT_EVALUATED),
       NOT_EVALUATED,
     ),
   );

@@ -69,15 +69,15 @@ export function writtenUnit(texts: readonly string[], kind: QuantityKind): Writt
   return unknown === undefined ? null : { text: unknown, unit: null };
 }
 
+/** "psia", "dbar (absolute)", "kPa abs" */
+const ABSOLUTE = /\babs(olute)?\b|^\s*(psi|bar|dbar|kpa)\s*\(?a\)?\s*$/i;
+
 /** A unit can say more than its size: "psia" holds the air, "uS/cm @ 25 C" is compensated. */
 export function roleByUnit(role: ColumnRole, header: string, unitTexts: readonly string[]): ColumnRole {
   if (role === "conductivity" && AT_25.test(header)) return "specificConductance";
   if (role === "clock" && unitTexts.some(isElapsed)) return "elapsedTime";
   return role === "seaPressure" && unitTexts.some((text) => ABSOLUTE.test(text)) ? "absolutePressure" : role;
 }
-
-/** "psia", "dbar (absolute)", "kPa abs" */
-const ABSOLUTE = /\babs(olute)?\b|^\s*(psi|bar|dbar|kpa)\s*\(?a\)?\s*$/i;
 
 function meaningOf(name: string, unitTexts: readonly string[], header: string): HeaderMeaning | null {
   const found = roleOfName(name);

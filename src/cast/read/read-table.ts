@@ -2,14 +2,14 @@
 import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
 import type { Cast } from "../cast.ts";
 import type { ColumnReading, FileReading, Question, ReadingAnswers } from "../reading.ts";
+import { askAboutVertical } from "./ask-about-vertical.ts";
 import { buildCast, named } from "./build-cast.ts";
 import { checkColumns } from "./check-columns.ts";
-import { askAboutVertical } from "./ask-about-vertical.ts";
 import { checkPlaces } from "./check-places.ts";
-import { rowLengthIssues, withoutShiftedRows } from "./row-lengths.ts";
 import { type MeasuredRows, readMeasuredRows } from "./measured-rows.ts";
 import { nameCasts } from "./name-casts.ts";
 import { hasSalt, type RecognisedColumns, recogniseColumns } from "./recognise-columns.ts";
+import { rowLengthIssues, withoutShiftedRows } from "./row-lengths.ts";
 import { rowsBetween } from "./rows.ts";
 import { type OnShare, untold, within } from "./share.ts";
 import { type RowGroup, splitCasts } from "./split-casts.ts";

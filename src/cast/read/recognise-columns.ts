@@ -2,15 +2,15 @@
 import type { Issue } from "../../base/index.ts";
 import type { ColumnReading, ColumnRole, Question, ReadingAnswers } from "../reading.ts";
 import { answerNames, resolveAnswers } from "./answers.ts";
-import { choose } from "./ask.ts";
 import { COLUMN_NAMES } from "./column-names.ts";
 import { type Contender, contenderOf } from "./contender.ts";
-import { ASSUMED_COMMA, decide, passOver } from "./decide-column.ts";
-import { type Decision, doubt, leave, type UsedColumn } from "./decision.ts";
+import { decide, passOver } from "./decide-column.ts";
+import { type Decision, leave, type UsedColumn } from "./decision.ts";
 import { tableMark } from "./number-style.ts";
 import type { DecimalMark } from "./parse-number.ts";
 import { type FlagColumn, flagColumnOf } from "./quality-flags.ts";
-import { ROLE_WORDS } from "./roles.ts";
+import { askAboutTwins } from "./same-name.ts";
+import { isWorthAsking, SALT_ROLES, settled } from "./settle-columns.ts";
 import type { Table } from "./table.ts";
 import { whyUnused } from "./why-unused.ts";
 
@@ -42,98 +42,8 @@ function winnersOf(contenders: readonly Contender[]): ReadonlyMap<ColumnRole, Co
   return winners;
 }
 
-export const VERTICAL_ROLES: readonly ColumnRole[] = ["depth", "seaPressure", "absolutePressure", "elevation"];
-/** Best first: each of them makes those behind it unneeded. */
-const SALT_ROLES: readonly ColumnRole[] = [
-  "practicalSalinity",
-  "absoluteSalinity",
-  "conductivity",
-  "specificConductance",
-  "dissolvedSolids",
-];
-const CONDUCTING_ROLES: readonly ColumnRole[] = ["conductivity", "specificConductance", "dissolvedSolids"];
-
-const usesAny = (decisions: readonly Decision[], roles: readonly ColumnRole[]): boolean =>
-  decisions.some(({ reading }) => reading.role !== null && roles.includes(reading.role));
-
 export const hasSalt = ({ used }: Pick<RecognisedColumns, "used">): boolean =>
   SALT_ROLES.some((role) => used[role] !== undefined);
-
-/** A question is only asked when the answer changes a result: not about a second depth, or conductance beside salinity. */
-function isWorthAsking(question: Question, decisions: readonly Decision[]): boolean {
-  const roles = question.choices.map(({ answer }) => answer.role).filter((role) => role !== "unused");
-  const areAll = (of: readonly ColumnRole[]): boolean => roles.every((role) => of.includes(role));
-  if (areAll(VERTICAL_ROLES)) return !usesAny(decisions, VERTICAL_ROLES);
-  return !areAll(CONDUCTING_ROLES) || !usesAny(decisions, SALT_ROLES);
-}
-
-/** Two columns of one name that hold different values: only the user can say which it is. */
-function whichTwin(winner: Contender, contenders: readonly Contender[]): Decision | null {
-  const isTwin = ({ role, header, filled }: Contender): boolean =>
-    role === winner.role && header === winner.header && filled.length > 0;
-  const twins = winner.answer === null ? contenders.filter(isTwin) : [];
-  const isSame = ({ filled }: Contender): boolean => filled.join("\n") === winner.filled.join("\n");
-  if (twins.length < 2 || twins.every(isSame)) return null;
-  const words = ROLE_WORDS[winner.role];
-  const why = `${twins.length} columns of this name hold different values`;
-  const unit = winner.written?.unit?.symbol ?? null;
-  return doubt(winner, why, {
-    code: "same-name-twice",
-    message: `"${winner.header}": ${why}; say which is ${words}`,
-    choices: twins.map(({ name, columnIndex }) =>
-      choose(name, winner.role, unit, `column ${columnIndex + 1} is ${words}`),
-    ),
-  });
-}
-
-/** By role, where it has to be asked. */
-function twinsOf(
-  winners: ReadonlyMap<ColumnRole, Contender>,
-  contenders: readonly Contender[],
-): ReadonlyMap<ColumnRole, Decision> {
-  return new Map(
-    [...winners].flatMap(([role, winner]) => {
-      const asked = whichTwin(winner, contenders);
-      return asked === null ? [] : [[role, asked]];
-    }),
-  );
-}
-
-/** Heights above a datum are depths only against the height of the water surface. */
-function settleElevation(decision: Decision, decisions: readonly Decision[], names: readonly string[]): Decision {
-  const { reading } = decision;
-  if (reading.role !== "elevation" || decision.used?.isAnswered || usesAny(decisions, ["surfaceElevation"]))
-    return decision;
-  if (usesAny(decisions, ["depth", "seaPressure", "absolutePressure"])) return decision;
-  const name = names[reading.columnIndex]!;
-  const why = "the file does not give the elevation of the water surface, from which depth counts";
-  const message = `"${reading.header}": ${why}; say that the highest sample of a cast is at the surface, or add a column of water-surface elevation`;
-  return doubt(reading, why, {
-    code: "no-surface-elevation",
-    message,
-    choices: [
-      choose(name, "elevation", decision.used!.unit, "the highest sample of each cast is at the water surface"),
-    ],
-  });
-}
-
-/** Year, month and day make a date together or not at all. */
-function settleDateParts(decision: Decision, decisions: readonly Decision[]): Decision {
-  const role = decision.reading.role;
-  const parts: readonly ColumnRole[] = ["year", "month", "day"];
-  const isPart = role !== null && parts.includes(role);
-  if (!isPart || parts.every((part) => usesAny(decisions, [part]))) return decision;
-  return leave(decision.reading, "year, month and day make a date only together");
-}
-
-function settled(decisions: readonly Decision[], names: readonly string[]): readonly Decision[] {
-  return decisions.map((decision) => settleDateParts(settleElevation(decision, decisions, names), decisions));
-}
-
-/** One note of each kind is enough where it is about the way a whole table is written. */
-function once(issues: readonly Issue[]): readonly Issue[] {
-  return issues.filter((issue, i) => issue !== ASSUMED_COMMA || issues.indexOf(issue) === i);
-}
 
 /** Reads every header of a table. What must be asked leaves its column unused, with an issue and a question. */
 export function recogniseColumns(table: Table, answers: ReadingAnswers): RecognisedColumns {
@@ -144,17 +54,17 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
   const contenders = all.filter((contender) => contender !== null);
   const markOfTable = tableMark(contenders.flatMap((contender) => contender.evidence ?? []));
   const winners = winnersOf(contenders);
-  const twins = twinsOf(winners, contenders);
+  const twins = askAboutTwins(winners, contenders);
   const flags: FlagColumn[] = [];
   const first = all.map((contender, columnIndex): Decision => {
-    const place = { columnIndex, header: headers[columnIndex]! };
+    const place = { columnIndex, header: headers[columnIndex]!, name: names[columnIndex]! };
     if (said.byColumn.get(columnIndex)?.role === "unused") return leave(place, "as you said");
     const flag = flagColumnOf(table, columnIndex, contender);
     if (flag !== null) {
       if (flag.column) flags.push(flag.column);
       return flag.decision;
     }
-    if (contender === null) return whyUnused(place, names[columnIndex]!);
+    if (contender === null) return whyUnused(place);
     const winner = winners.get(contender.role)!;
     const asked = twins.get(contender.role);
     if (winner === contender) return asked ?? decide(contender, markOfTable);
@@ -176,6 +86,9 @@ export function recogniseColumns(table: Table, answers: ReadingAnswers): Recogni
     readings: decisions.map((decision) => decision.reading),
     decimalMark: used.depth?.style.decimalMark ?? used.temperature?.style.decimalMark ?? markOfTable ?? ".",
     questions: questions.filter((question) => isWorthAsking(question, decisions)),
-    issues: [...said.issues, ...once(decisions.flatMap((decision) => decision.issues))],
+    issues: [
+      ...said.issues, // What is said of the way the whole table is written is said once.
+      ...new Set(decisions.flatMap((decision) => decision.issues)),
+    ],
   };
 }

@@ -1,11 +1,11 @@
 /** A table of stations: where each is, how far along the channel and how deep the water is there. */
 import { failed, type Issue, type Outcome, succeeded } from "../../base/index.ts";
 import { CellReader } from "./cell-reader.ts";
-import { rowLengthIssues } from "./check-rows.ts";
 import { decodeText } from "./decode-text.ts";
 import { unreadFormat } from "./file-format.ts";
 import { findTable } from "./find-header.ts";
 import { recogniseColumns } from "./recognise-columns.ts";
+import { rowLengthIssues } from "./row-lengths.ts";
 
 export interface ListedStation {
   readonly station: string;

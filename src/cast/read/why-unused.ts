@@ -1,7 +1,6 @@
 /** Why a column is not used whose name has no role. */
-import type { ColumnReading } from "../reading.ts";
 import { choose } from "./ask.ts";
-import { type Decision, doubt, leave } from "./decision.ts";
+import { type Decision, doubt, leave, type NamedPlace } from "./decision.ts";
 import { LONGEST_NAME } from "./read-header-cell.ts";
 
 const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
@@ -15,7 +14,8 @@ const UNUSED_NAMES: readonly (readonly [RegExp, string])[] = [
 const EC = /^e\.?c\.?([\W_]|$)/i;
 
 /** EC is written for conductivity as measured and for what an instrument has compensated to 25 degC. */
-function compensatedOrNot(place: Pick<ColumnReading, "columnIndex" | "header">, name: string): Decision {
+function compensatedOrNot(place: NamedPlace): Decision {
+  const { name } = place;
   const unit = /u|µ|μ/i.test(place.header) ? "uS/cm" : /ms/i.test(place.header) ? "mS/cm" : null;
   const message = `"${place.header}" does not say whether it is compensated to 25 degC; name it conductivity or specific conductance`;
   return doubt(
@@ -29,10 +29,9 @@ function compensatedOrNot(place: Pick<ColumnReading, "columnIndex" | "header">, 
   );
 }
 
-/** @param name how an answer names the column */
-export function whyUnused(place: Pick<ColumnReading, "columnIndex" | "header">, name: string): Decision {
+export function whyUnused(place: NamedPlace): Decision {
   const header = place.header.slice(0, LONGEST_NAME);
   const known = UNUSED_NAMES.find(([pattern]) => pattern.test(header));
   if (known) return leave(place, known[1]);
-  return EC.test(header) ? compensatedOrNot(place, name) : leave(place, "its name is none known here", "likely");
+  return EC.test(header) ? compensatedOrNot(place) : leave(place, "its name is none known here", "likely");
 }

@@ -131,3 +131,20 @@ test("files with the same headers share a key", () => {
 test("what was said about files that need no answer changes nothing", () => {
   expect(codesOf(readText("Depth (m),Temp (C),Sal\n1,10,3\n2,9,4\n", { columns: [] }).issues)).toEqual([]);
 });
+
+test.each(["constructor=X", "toString=X", "depth=D:m constructor", "dateTime=t:constructor since 2020-01-01"])(
+  "words that a program knows are no words of ours: %s",
+  (text) => {
+    expect(refusedFor(text).length).toBe(1);
+  },
+);
+
+test("to leave out the second of two columns of one name leaves the first alone", () => {
+  const text = "Depth (m),Temp,Temp\n1,40,10\n2,39,9\n";
+  const names = questionOf(readText(text), "same-name-twice").choices.map(({ answer }) => [answer.header, answer.role]);
+  expect(names).toEqual([
+    ["Temp#1", "temperature"],
+    ["Temp#2", "temperature"],
+    ["Temp#1", "unused"],
+  ]);
+});
