@@ -17,8 +17,8 @@ function addsUp(view: DataView, at: number): boolean {
   while (place + HEADER_BYTES <= end) {
     const index = view.getUint16(place, true);
     const size = Number(view.getBigUint64(place + 8, true));
-    // Object 0 is the free space at the end, and counts its own header.
-    if (index === 0) return size === 0 || place + size <= end;
+    // Object 0 is the free space, which counts its own header and goes to the end.
+    if (index === 0) return place + size === end;
     if (size === 0) return false;
     place += HEADER_BYTES + Math.ceil(size / 8) * 8;
   }
