@@ -4,7 +4,7 @@ import { defaultBasis, integrateCast, type Stratification, stratificationOf } fr
 import { LinearProfile } from "../../src/column/stratification/linear-profile.ts";
 import { stratificationMoments } from "../../src/column/stratification/moments.ts";
 import { potentialEnergyAnomaly } from "../../src/column/stratification/potential-energy.ts";
-import { densityOrder, thorpeSorting } from "../../src/column/stratification/thorpe.ts";
+import { inDensityOrder, thorpeSorting } from "../../src/column/stratification/thorpe.ts";
 import { twoLayers } from "../../src/column/stratification/two-layers.ts";
 import { modeSpeeds } from "../../src/column/stratification/vertical-modes.ts";
 import { castOf } from "../support/cast-of.ts";
@@ -53,15 +53,12 @@ const weightsPa = (thicknessM: number, rhoKgM3: Float64Array): Float64Array => {
   return rhoKgM3.map((rho) => (pressurePa += rho * GRAVITY_MS2 * thicknessM));
 };
 
-const inOrder = (rhoKgM3: Float64Array): Float64Array =>
-  Float64Array.from(densityOrder(rhoKgM3), (sample) => rhoKgM3[sample]!);
-
 describe("sorting", () => {
   it("keeps the mass and the bed pressure of equal layers, and presses nowhere harder", () => {
     fc.assert(
       fc.property(equalLayers, ({ thicknessM, rhoKgM3 }) => {
         const before = weightsPa(thicknessM, rhoKgM3);
-        const after = weightsPa(thicknessM, inOrder(rhoKgM3));
+        const after = weightsPa(thicknessM, inDensityOrder(rhoKgM3));
         expect(Math.abs(after.at(-1)! / before.at(-1)! - 1)).toBeLessThan(1e-13);
         after.forEach((pressurePa, k) => {
           expect(pressurePa).toBeLessThanOrEqual(before[k]! * (1 + 1e-13));
@@ -94,7 +91,7 @@ describe("sorting", () => {
     fc.assert(
       fc.property(equalLayers, ({ thicknessM, rhoKgM3 }) => {
         const measured = potentialEnergyAnomaly(layeredProfile(thicknessM, rhoKgM3), GRAVITY_MS2);
-        const sorted = potentialEnergyAnomaly(layeredProfile(thicknessM, inOrder(rhoKgM3)), GRAVITY_MS2);
+        const sorted = potentialEnergyAnomaly(layeredProfile(thicknessM, inDensityOrder(rhoKgM3)), GRAVITY_MS2);
         expect(sorted).toBeGreaterThanOrEqual(measured - 1e-9);
       }),
       RUNS,

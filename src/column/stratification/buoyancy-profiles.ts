@@ -3,6 +3,7 @@ import type { Column } from "../column.ts";
 import type { LinearProfile } from "./linear-profile.ts";
 import { partWay } from "./part-way.ts";
 import type { BuoyancyProfile } from "./stratification.ts";
+import { inDensityOrder } from "./thorpe.ts";
 
 /** What turns a step of density into a buoyancy frequency: gravity, and the one density of the Boussinesq approximation. */
 export interface Setting {
@@ -31,20 +32,22 @@ export const rawBuoyancy = (column: Column): BuoyancyProfile => ({
 /**
  * Between samples in order of density, from the gradient of potential density (equal to that from expansion and
  * contraction within 1 % in the upper 100 m); never negative. NaN where two samples share a depth.
+ * @param depthM of the samples, not decreasing
+ * @param rhoKgM3 their potential density, in any order
  */
-export function sortedBuoyancy(sorted: LinearProfile, sampleCount: number, setting: Setting): BuoyancyProfile {
-  const sampleDepthM = sorted.depthM.subarray(1, sampleCount + 1);
-  const sampleRhoKgM3 = sorted.values.subarray(1, sampleCount + 1);
-  const depthM = midDepths(sampleDepthM);
-  const squaredPerS2 = depthM.map((_, k) =>
-    squaredFrequency(setting, sampleRhoKgM3[k + 1]! - sampleRhoKgM3[k]!, sampleDepthM[k + 1]! - sampleDepthM[k]!),
+export function sortedBuoyancy(depthM: Float64Array, rhoKgM3: Float64Array, setting: Setting): BuoyancyProfile {
+  const inOrder = inDensityOrder(rhoKgM3);
+  const middleM = midDepths(depthM);
+  const squaredPerS2 = middleM.map((_, k) =>
+    squaredFrequency(setting, inOrder[k + 1]! - inOrder[k]!, depthM[k + 1]! - depthM[k]!),
   );
-  return { depthM, squaredPerS2 };
+  return { depthM: middleM, squaredPerS2 };
 }
 
 /**
- * Of the sorted column averaged over `smoothingLengthM`, at even depths from surface to bottom. The gradient of a running
- * mean is the difference across its window over its length; at the ends the window is cut off by surface and bottom.
+ * g / rho0 times the gradient of the sorted column averaged over `smoothingLengthM`, at even depths from surface to
+ * bottom. The gradient of a running mean is the difference across its window over its length; at the ends the window is
+ * cut off by surface and bottom.
  */
 export function smoothedBuoyancy(sorted: LinearProfile, smoothingLengthM: number, setting: Setting): BuoyancyProfile {
   const bottomM = sorted.bottomDepthM;

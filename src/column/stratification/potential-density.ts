@@ -9,6 +9,8 @@ export interface PotentialDensities {
   /** From the water surface to the bottom of the column, gaps included. */
   readonly depthM: Float64Array;
   readonly rhoKgM3: Float64Array;
+  /** Where the samples start among them. */
+  readonly firstSampleIndex: number;
   /** Of the samples alone. */
   readonly sampleRhoKgM3: Float64Array;
 }
@@ -16,7 +18,7 @@ export interface PotentialDensities {
 /**
  * Density of every sample, and of the water at the surface and the bed as the basis has it, after moving it without
  * exchange of heat or salt to the pressure halfway down the column, by the column's own water model: its potential
- * density (IOC, SCOR & IAPSO 2010, sec. 3.5). One pressure for the whole column judges fresh water around 4 degC right
+ * density (IOC, SCOR & IAPSO 2010, sec. 3.4). One pressure for the whole column judges fresh water around 4 degC right
  * to 1e-3 kg/m3 within 50 dbar of it, as the temperature of greatest density falls by 0.002 degC a dbar. NaN in, NaN out.
  */
 export function potentialDensities(column: Column): PotentialDensities {
@@ -36,6 +38,12 @@ export function potentialDensities(column: Column): PotentialDensities {
           );
     return model.density(salinity, movedTempC, referenceSeaPressureDbar);
   });
-  const sampleRhoKgM3 = rhoKgM3.filter((_, i) => nodes.origin[i] === "sample");
-  return { referenceSeaPressureDbar, depthM: nodes.depthM, rhoKgM3, sampleRhoKgM3 };
+  const firstSampleIndex = nodes.knotIndex.indexOf(0);
+  return {
+    referenceSeaPressureDbar,
+    depthM: nodes.depthM,
+    rhoKgM3,
+    firstSampleIndex,
+    sampleRhoKgM3: rhoKgM3.slice(firstSampleIndex, firstSampleIndex + column.n),
+  };
 }

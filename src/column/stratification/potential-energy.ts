@@ -2,7 +2,7 @@ import type { LinearProfile } from "./linear-profile.ts";
 
 /**
  * Potential energy anomaly, J/m3: the work per volume that it takes to mix the column, (g/H) times the integral of depth
- * times (density less its depth mean) (Simpson 1981; Simpson et al. 1990, eq. 1). Two layers: g drho h1 h2 / (2 H); a
+ * times (density less its depth mean) (Simpson 1981; Simpson et al. 1990). Two layers: g drho h1 h2 / (2 H); a
  * constant gradient: g drho H / 12. Exact for density that is linear between depths; negative where mixing would set
  * energy free.
  * @param density potential density, so that the water's own compression counts for nothing; kg/m3, from the water surface down

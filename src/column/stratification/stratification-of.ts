@@ -46,7 +46,7 @@ export function stratificationOf(column: Column, given: Partial<StratificationOp
     referenceSeaPressureDbar,
     potentialRhoKgM3,
     stability,
-    buoyancy: { raw: rawBuoyancy(column), sorted: sortedBuoyancy(sorted, column.n, setting), smoothed },
+    buoyancy: { raw: rawBuoyancy(column), sorted: sortedBuoyancy(column.depthM, potentialRhoKgM3, setting), smoothed },
     thorpe: thorpeSorting(column.depthM, potentialRhoKgM3, densityNoiseKgM3),
     mixedLayer: mixedLayerOf(column, potentialRhoKgM3, smoothed, { ...setting, ...options }),
     pycnoclines,

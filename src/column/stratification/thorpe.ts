@@ -4,8 +4,12 @@ import type { Overturn, ThorpeSorting } from "./stratification.ts";
 const FEWEST_SAMPLES_COUNT = 3;
 
 /** Which sample comes at each place when they are put in order of density; equal ones stay in order of depth. */
-export const densityOrder = (rhoKgM3: Float64Array): Uint32Array =>
+const densityOrder = (rhoKgM3: Float64Array): Uint32Array =>
   Uint32Array.from(Array.from(rhoKgM3.keys()).sort((a, b) => rhoKgM3[a]! - rhoKgM3[b]! || a - b));
+
+/** Densities from the lightest to the heaviest. */
+export const inDensityOrder = (rhoKgM3: Float64Array): Float64Array =>
+  Float64Array.from(densityOrder(rhoKgM3), (sample) => rhoKgM3[sample]!);
 
 /**
  * Puts the samples of a column in order of density and says how far each would move: the depth it sorts to less its own

@@ -46,6 +46,16 @@ describe("mode speeds", () => {
   });
 });
 
+describe("mode speeds where samples lie on the nodes of the modes", () => {
+  it("are those of even layering all the same", () => {
+    const speedMs = modeSpeeds(column([0, 5, 10, 15, 20], [1000, 1005, 1010, 1015, 1020]), SETTING, 12);
+    speedMs.forEach((speed, k) => {
+      expect(Math.abs(speed / ((Math.sqrt(9.80665e-3) * 20) / ((k + 1) * Math.PI)) - 1)).toBeLessThan(1e-12);
+    });
+    expect(speedMs).toHaveLength(12);
+  });
+});
+
 describe("deformation radius", () => {
   it("is speed over Coriolis parameter, the same on both hemispheres", () => {
     // 2 * 7.292115e-5 * sin 30 = 7.292115e-5.
