@@ -1,4 +1,5 @@
 import type { WaterChoice } from "../water/index.ts";
+import { type Accuracy, defaultAccuracy } from "./uncertainty/accuracy.ts";
 
 /** The density of the estimate that the integrated pressure is held against. */
 export type ReferenceDensity =
@@ -33,6 +34,8 @@ export interface Basis {
   readonly bedDepthM: number | null;
   /** Elevation of the water surface above the datum at the time of the cast; null: no elevations are given. */
   readonly waterSurfaceElevationM: number | null;
+  /** Standard uncertainties of all that goes in. */
+  readonly accuracy: Accuracy;
 }
 
 export const defaultBasis: Basis = {
@@ -46,4 +49,5 @@ export const defaultBasis: Basis = {
   bedGap: "hold",
   bedDepthM: null,
   waterSurfaceElevationM: null,
+  accuracy: defaultAccuracy,
 };

@@ -5,3 +5,4 @@ export type { Origin } from "./nodes.ts";
 export { describeAtDepths, type Profile, sampledProfile } from "./profile.ts";
 export { type Shortcut, type ShortcutCost, shortcutCosts } from "./shortcut.ts";
 export * from "./stratification/index.ts";
+export * from "./uncertainty/index.ts";

@@ -96,6 +96,23 @@ describe("layerhead column --json", () => {
       bed_gap: "hold",
       bed_depth_m: null,
       water_surface_elevation_m: null,
+      temperature_random_uncertainty_degC: 0.01,
+      temperature_systematic_uncertainty_degC: 0.02,
+      practical_salinity_random_uncertainty: 0.02,
+      practical_salinity_systematic_uncertainty: 0.05,
+      unmeasured_practical_salinity_uncertainty: 0.2,
+      conductivity_random_uncertainty_mS_cm: 0.02,
+      conductivity_systematic_uncertainty_mS_cm: 0.05,
+      sample_depth_random_uncertainty_m: 0.02,
+      sample_depth_systematic_uncertainty_m: 0.05,
+      sea_pressure_random_uncertainty_dbar: 0.01,
+      sea_pressure_systematic_uncertainty_dbar: 0.05,
+      depth_scale_uncertainty_fraction: 0.002,
+      level_depth_uncertainty_m: 0.02,
+      gravity_uncertainty_fraction: null,
+      air_pressure_uncertainty_kPa: 1,
+      equation_of_state_uncertainty_kg_m3: 0.004,
+      composition_uncertainty_fraction: 0.001,
     });
   });
 });
