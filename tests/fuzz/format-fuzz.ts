@@ -71,9 +71,11 @@ export async function fuzzFormats(
   corpus: readonly Uint8Array[],
   firstSeed: number,
   count: number,
+  onSeed: (seed: number) => void = () => {},
 ): Promise<readonly Failure[]> {
   const failures: Failure[] = [];
   for (let seed = firstSeed; seed < firstSeed + count; seed++) {
+    onSeed(seed);
     const bytes = damagedBinary(seed, corpus);
     const startMs = performance.now();
     const startBytes = process.memoryUsage().rss;

@@ -23,14 +23,14 @@ describe("damaged text files", () => {
   test("the long run goes through its seeds in watched threads", async () => {
     const outDir = mkdtempSync(join(tmpdir(), "text-fuzz-"));
     try {
-      const ssr = fileURLToPath(new URL("./run-text-fuzz.ts", import.meta.url));
+      const ssr = fileURLToPath(new URL("./run-fuzz.ts", import.meta.url));
       await build({
         configFile: false,
         logLevel: "silent",
         ssr: { noExternal: true },
         build: { ssr, outDir, target: "node20" },
       });
-      const run = spawnSync(process.execPath, [join(outDir, "run-text-fuzz.js"), "1", "50", files], {
+      const run = spawnSync(process.execPath, [join(outDir, "run-fuzz.js"), "text", "1", "50", files], {
         encoding: "utf8",
       });
       expect(run.stderr).toBe("");

@@ -1,15 +1,17 @@
 /**
  * The long run, in chunks of seeds: each in a thread that is watched, so that a hang is found and named too.
  *
- *   npx vite build --ssr tests/fuzz/run-text-fuzz.ts --outDir dist/fuzz
- *   node dist/fuzz/run-text-fuzz.js 1 1000000
+ *   npx vite build --ssr tests/fuzz/run-fuzz.ts --outDir dist/fuzz
+ *   node dist/fuzz/run-fuzz.js text 1 1000000
  *
- * Arguments: the first seed, how many, and the folder of the corpus (tests/corpus/files of the folder it is run in).
+ * Arguments: text or formats, the first seed, how many, and the folder of the corpus (of the folder it is run in).
  */
 import { isMainThread, parentPort, Worker, workerData } from "node:worker_threads";
+import { binariesIn, fuzzFormats } from "./format-fuzz.ts";
 import { corpusIn, type Failure, fuzzText } from "./text-fuzz.ts";
 
 interface Chunk {
+  readonly kind: keyof typeof KINDS;
   readonly folder: string;
   readonly firstSeed: number;
   readonly count: number;
@@ -17,9 +19,14 @@ interface Chunk {
   readonly seedInHand: SharedArrayBuffer;
 }
 
-const CHUNK = 20_000;
+const KINDS = {
+  text: { folder: "tests/corpus/files", chunk: 20_000 },
+  // A fresh thread has a fresh copy of the libraries: one damaged file must not stand in for the next.
+  formats: { folder: "tests/formats", chunk: 250 },
+} as const;
 const HANG_MS = 10_000;
 const LOOK_MS = 500;
+const TOLD_MS = 5_000;
 
 /** What came of a chunk: how many inputs it got through, and what was wrong. */
 interface Done {
@@ -53,19 +60,24 @@ function runChunk(chunk: Chunk): Promise<Done> {
   });
 }
 
-async function runAll(args: readonly string[]): Promise<void> {
-  const [firstSeed, count] = [Number(args[0] ?? 1), Number(args[1] ?? CHUNK)];
-  const folder = args[2] ?? "tests/corpus/files";
+async function runAll([kindText, firstText, countText, folderText]: readonly string[]): Promise<void> {
+  const kind = kindText === "formats" ? "formats" : "text";
+  const folder = folderText ?? KINDS[kind].folder;
+  const [firstSeed, count] = [Number(firstText ?? 1), Number(countText ?? KINDS[kind].chunk)];
   const startMs = performance.now();
   let failureCount = 0;
+  let toldMs = startMs;
   for (let done = 0; done < count; ) {
-    const size = Math.min(CHUNK, count - done);
+    const size = Math.min(KINDS[kind].chunk, count - done);
     const seedInHand = new SharedArrayBuffer(4);
-    const chunk = await runChunk({ folder, firstSeed: firstSeed + done, count: size, seedInHand });
+    const chunk = await runChunk({ kind, folder, firstSeed: firstSeed + done, count: size, seedInHand });
     done += chunk.count;
     failureCount += chunk.failures.length;
     for (const { seed, what } of chunk.failures.slice(0, 20)) process.stdout.write(`seed ${seed}: ${what}\n`);
-    const perSecond = Math.round(done / ((performance.now() - startMs) / 1000));
+    const now = performance.now();
+    if (now - toldMs < TOLD_MS && done < count) continue;
+    toldMs = now;
+    const perSecond = Math.round(done / ((now - startMs) / 1000));
     process.stdout.write(`${done} inputs, ${failureCount} failures, ${perSecond} a second\n`);
   }
   process.exitCode = failureCount === 0 ? 0 : 1;
@@ -73,7 +85,12 @@ async function runAll(args: readonly string[]): Promise<void> {
 
 if (isMainThread) await runAll(process.argv.slice(2));
 else {
-  const { folder, firstSeed, count, seedInHand } = workerData as Chunk;
+  const { kind, folder, firstSeed, count, seedInHand } = workerData as Chunk;
   const inHand = new Int32Array(seedInHand);
-  parentPort!.postMessage(fuzzText(corpusIn(folder), firstSeed, count, (seed) => Atomics.store(inHand, 0, seed)));
+  const onSeed = (seed: number): void => void Atomics.store(inHand, 0, seed);
+  const failures =
+    kind === "text"
+      ? fuzzText(corpusIn(folder), firstSeed, count, onSeed)
+      : await fuzzFormats(binariesIn(folder), firstSeed, count, onSeed);
+  parentPort!.postMessage(failures);
 }
