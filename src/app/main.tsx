@@ -1,4 +1,5 @@
 import { render } from "preact";
+import { keepLayering } from "./layering.ts";
 import { App } from "./parts/app.tsx";
 import { keepSaved, restore } from "./saving.ts";
 import { keepSolved } from "./solving.ts";
@@ -6,4 +7,5 @@ import { keepSolved } from "./solving.ts";
 await restore();
 keepSaved();
 keepSolved();
+keepLayering();
 render(<App />, document.getElementById("page")!);

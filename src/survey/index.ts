@@ -8,7 +8,9 @@ export {
   type Profile,
   type ReferenceDensity,
   type ShortcutCost,
+  type Stratification,
   shortcutCosts,
+  stratificationOf,
 } from "../column/index.ts";
 export type { Level, LevelId } from "../design/index.ts";
 export {

@@ -1,6 +1,6 @@
 import { transfer } from "comlink";
 import type { Samples } from "../cast/index.ts";
-import { type Survey, solveCast } from "../survey/index.ts";
+import { type Column, type Stratification, type Survey, solveCast, stratificationOf } from "../survey/index.ts";
 import { type CastOnShelf, type PackedCast, packCast } from "./answered-cast.ts";
 import { buffersOf } from "./buffers.ts";
 import { inStore, keepOnly } from "./database.ts";
@@ -12,7 +12,21 @@ const shelf = new Map<string, Samples>();
 /** What solving needs beside the casts. */
 export type SolvingTerms = Omit<Survey, "casts" | "name">;
 
+/** What the page says of the layering of a column in its margin. */
+export type Layering = Pick<
+  Stratification,
+  "stability" | "mixedLayer" | "pycnoclines" | "potentialEnergyAnomalyJM3" | "twoLayers" | "modes"
+>;
+
 export const solverTasks = {
+  /** Null where nothing can be said of the column. */
+  layering(column: Column): Layering | null {
+    const whole = stratificationOf(column);
+    if (whole === null) return null;
+    const { stability, mixedLayer, pycnoclines, potentialEnergyAnomalyJM3, twoLayers, modes } = whole;
+    return { stability, mixedLayer, pycnoclines, potentialEnergyAnomalyJM3, twoLayers, modes };
+  },
+
   /** Puts the samples of new casts on the shelf and into the database. Without a database they last as long as the page. */
   async keepSamples(samplesByKey: ReadonlyMap<string, Samples>): Promise<void> {
     for (const [key, samples] of samplesByKey) {

@@ -22,16 +22,20 @@ export interface Threads {
 export function startThreads(): Threads {
   const solver = wrap<SolverTasks>(new Worker(new URL("./solver-thread.ts", import.meta.url), { type: "module" }));
   let reader = startReader(solver);
+  const stopReading = (): void => {
+    reader.end();
+    reader = startReader(solver);
+  };
   return {
     solver,
     read: async (request, onShare) => {
       const { tasks, ended } = reader;
-      return Promise.race([(await tasks).read(request, proxy(onShare)), ended]);
+      const answer = await Promise.race([(await tasks).read(request, proxy(onShare)), ended]);
+      // A damaged file may leave a library in disorder: the next file gets a fresh one.
+      if (answer.outcome.issues.some(({ code }) => code === "broken-file")) stopReading();
+      return answer;
     },
-    stopReading: () => {
-      reader.end();
-      reader = startReader(solver);
-    },
+    stopReading,
   };
 }
 

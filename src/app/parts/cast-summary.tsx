@@ -1,6 +1,8 @@
 import { computed } from "@preact/signals";
 import { describeAtDepths, type Solution } from "../../survey/index.ts";
 import type { DisplaySystem } from "../../units/index.ts";
+import { layering } from "../layering.ts";
+import { layeringRows } from "../show/layering-rows.ts";
 import { scientific, shownPercent, shownValue } from "../show/shown.ts";
 import { type Strongest, strongestStratification } from "../show/water-at.ts";
 import { castInHand, state } from "../store.ts";
@@ -17,15 +19,27 @@ export function CastSummary() {
   return (
     <section aria-label="Summary">
       <h2>{inHand.cast.name}</h2>
-      <dl>
-        {summaryRows(inHand.solution, strongest.value, state.value.system).map(([quantity, value]) => (
-          <div class="row" key={quantity}>
-            <dt>{quantity}</dt>
-            <dd>{value}</dd>
-          </div>
-        ))}
-      </dl>
+      <Rows rows={summaryRows(inHand.solution, strongest.value, state.value.system)} />
+      {layering.value && (
+        <>
+          <h2>Layering</h2>
+          <Rows rows={layeringRows(layering.value, state.value.system)} />
+        </>
+      )}
     </section>
+  );
+}
+
+function Rows({ rows }: { readonly rows: readonly (readonly [string, string])[] }) {
+  return (
+    <dl>
+      {rows.map(([quantity, value]) => (
+        <div class="row" key={quantity}>
+          <dt>{quantity}</dt>
+          <dd>{value}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }
 
