@@ -1,6 +1,6 @@
 import { type DisplaySystem, formatNumber } from "../../units/index.ts";
 import type { Layering } from "../../worker/index.ts";
-import { shownValue } from "./shown.ts";
+import { shownNumber, shownValue } from "./shown.ts";
 
 const VERDICT = { stable: "stable", neutral: "mixed throughout", unstable: "unstable" } as const;
 
@@ -32,7 +32,7 @@ export function layeringRows(
     [
       "Two layers",
       twoLayers
-        ? `${shownValue(twoLayers.means.upperRhoKgM3, "density", system)} over ${shownValue(twoLayers.means.lowerRhoKgM3, "density", system)}`
+        ? `${shownNumber(twoLayers.means.upperRhoKgM3, "density", system)} / ${shownValue(twoLayers.means.lowerRhoKgM3, "density", system)}`
         : "–",
     ],
     ["Potential energy anomaly", `${fixed(potentialEnergyAnomalyJM3, 1)}\u00a0J/m³`],

@@ -52,7 +52,7 @@ export type Action =
   | { readonly kind: "redone" };
 
 /** Colours told apart by eye; with more casts they come round again. */
-const COLOURS_COUNT = 6;
+const COLOURS_COUNT = 10;
 
 /** The next state. What changes the work goes through its history and can be undone; the rest is how one looks at it. */
 export function reduce(state: AppState, action: Action): AppState {
