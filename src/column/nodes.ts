@@ -17,7 +17,7 @@ export interface Nodes {
 }
 
 /** Index of the last knot at or above a depth; -1 above the first. */
-function knotAbove(column: Column, depthM: number): number {
+export function knotAbove(column: Column, depthM: number): number {
   let low = 0;
   let high = column.n;
   while (low < high) {

@@ -45,3 +45,10 @@ export const PROFILE_COLUMNS: readonly ProfileColumn[] = [
   number("departure_m", "m", "The departure as a head of water of the reference density", (p) => p.departureM),
   number("departure_percent", "%", "The departure over the gauge pressure", (p) => percent(p.departureFrac)),
 ];
+
+/** Stands behind PROFILE_COLUMNS in every table of them; it belongs to the pressure, not to the profile. */
+export const UNCERTAINTY_COLUMN: ColumnDescription = numberColumn(
+  "pressure_uncertainty_kPa",
+  "kPa",
+  "Standard uncertainty (k = 1) of the gauge pressure; of a level, how well its depth is known is in it",
+);

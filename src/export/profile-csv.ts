@@ -1,5 +1,5 @@
 import type { Profile, SolvedCast, Survey } from "../survey/index.ts";
-import { PROFILE_COLUMNS } from "./columns.ts";
+import { PROFILE_COLUMNS, UNCERTAINTY_COLUMN } from "./columns.ts";
 import { type Cell, csvText } from "./csv.ts";
 import { type ColumnDescription, countColumn, textColumn } from "./table.ts";
 
@@ -11,15 +11,15 @@ const ORIGIN = textColumn(
   "sample, level, surface-gap or bed-gap: how the row came to be; rows in a gap stand on no measurement",
 );
 
-export const PROFILE_TABLE: readonly ColumnDescription[] = [CAST, ...PROFILE_COLUMNS, FLAG, ORIGIN];
-export const LEVELS_TABLE: readonly ColumnDescription[] = [CAST, LEVEL, ...PROFILE_COLUMNS, ORIGIN];
+export const PROFILE_TABLE: readonly ColumnDescription[] = [CAST, ...PROFILE_COLUMNS, UNCERTAINTY_COLUMN, FLAG, ORIGIN];
+export const LEVELS_TABLE: readonly ColumnDescription[] = [CAST, LEVEL, ...PROFILE_COLUMNS, UNCERTAINTY_COLUMN, ORIGIN];
 
 /** No sample stands behind a level, so it has no quality flag. */
 const NO_FLAG = null;
 
-/** A function from a row's index to its cells, in the order of PROFILE_COLUMNS. */
-function quantityCells(profile: Profile): (row: number) => readonly Cell[] {
-  const columns = PROFILE_COLUMNS.map((column) => column.values(profile));
+/** A function from a row's index to its cells: PROFILE_COLUMNS, and the uncertainty. */
+function quantityCells(profile: Profile, uncertaintyKPa: Float64Array): (row: number) => readonly Cell[] {
+  const columns = [...PROFILE_COLUMNS.map((column) => column.values(profile)), uncertaintyKPa];
   return (row) => columns.map((values) => values[row]!);
 }
 
@@ -34,9 +34,9 @@ export function profileCsv(solved: readonly SolvedCast[]): string {
 function* profileRows(solved: readonly SolvedCast[]): Generator<readonly Cell[]> {
   for (const { cast, solution } of solved) {
     if (!solution) continue;
-    const { profile, levels, flag } = solution;
-    const profileCells = quantityCells(profile);
-    const levelCells = quantityCells(levels);
+    const { profile, uncertaintyKPa, levels, levelUncertainty, flag } = solution;
+    const profileCells = quantityCells(profile, uncertaintyKPa);
+    const levelCells = quantityCells(levels, levelUncertainty.combinedKPa);
     const rows = [
       ...Array.from(profile.depthM, (depthM, i) => ({
         depthM,
@@ -61,7 +61,7 @@ export function levelsCsv(survey: Pick<Survey, "levels">, solved: readonly Solve
 function* levelRows({ levels }: Pick<Survey, "levels">, solved: readonly SolvedCast[]): Generator<readonly Cell[]> {
   for (const { cast, solution } of solved) {
     if (!solution) continue;
-    const cells = quantityCells(solution.levels);
+    const cells = quantityCells(solution.levels, solution.levelUncertainty.combinedKPa);
     for (const [i, level] of levels.entries()) yield [cast.name, level.name, ...cells(i), solution.levels.origin[i]!];
   }
 }

@@ -1,6 +1,13 @@
-import type { PreparedCast, Profile, SolvedCast, Survey } from "../survey/index.ts";
+import {
+  budgetOf,
+  type PreparedCast,
+  type Profile,
+  type SolvedCast,
+  type Survey,
+  type Uncertainty,
+} from "../survey/index.ts";
 import { basisJson } from "./basis-json.ts";
-import { PROFILE_COLUMNS } from "./columns.ts";
+import { PROFILE_COLUMNS, UNCERTAINTY_COLUMN } from "./columns.ts";
 import { preparationJson } from "./preparation-json.ts";
 import { VERSION } from "./version.ts";
 
@@ -10,10 +17,29 @@ type Numbers = readonly (number | null)[];
 const numbers = (values: ArrayLike<number>): Numbers =>
   Array.from(values, (value) => (Number.isFinite(value) ? value : null));
 
-const profileJson = (profile: Profile): Record<string, Numbers | readonly string[]> => ({
+const profileJson = (profile: Profile, uncertaintyKPa: Float64Array): Record<string, Numbers | readonly string[]> => ({
   ...Object.fromEntries(PROFILE_COLUMNS.map((column) => [column.name, numbers(column.values(profile))])),
+  [UNCERTAINTY_COLUMN.name]: numbers(uncertaintyKPa),
   origin: profile.origin,
 });
+
+/** What each level's uncertainty is made of, largest share first; null where a level has no water. */
+const budgetsJson = (uncertainty: Uncertainty): readonly unknown[] =>
+  Array.from(uncertainty.depthM, (_, row) => {
+    const budget = budgetOf(uncertainty, row);
+    return (
+      budget && {
+        combined_kPa: budget.combinedKPa,
+        expanded_kPa: budget.expandedKPa,
+        contributors: budget.shares.map(({ name, standardKPa, shareFrac }) => ({
+          name,
+          kPa: standardKPa,
+          share: shareFrac,
+        })),
+        sentence: budget.sentence,
+      }
+    );
+  });
 
 /** The samples of a cast that are not in its column, and why; depth as the file has it. */
 const leftOutJson = (
@@ -47,8 +73,12 @@ export function surveyJson(survey: Survey, solved: readonly SolvedCast[]): Recor
       distance_km: cast.distanceKm,
       file: cast.fileName,
       reference_density_kg_m3: solution?.column.referenceRhoKgM3 ?? null,
-      profile: solution && { ...profileJson(solution.profile), flag: numbers(solution.flag) },
-      levels: solution && { level: survey.levels.map((level) => level.name), ...profileJson(solution.levels) },
+      profile: solution && { ...profileJson(solution.profile, solution.uncertaintyKPa), flag: numbers(solution.flag) },
+      levels: solution && {
+        level: survey.levels.map((level) => level.name),
+        ...profileJson(solution.levels, solution.levelUncertainty.combinedKPa),
+        uncertainty: budgetsJson(solution.levelUncertainty),
+      },
       left_out: leftOutJson(cast, prepared),
       issues: issues.map(({ severity, code, message, line }) => ({ severity, code, message, line: line ?? null })),
     })),

@@ -1,9 +1,21 @@
 export {
+  type Accuracy,
+  type AccuracyReason,
+  accuracyReasons,
   type Basis,
+  type Budget,
+  type BudgetShare,
+  budgetOf,
   type Column,
+  type Contributor,
+  confirmsFirstOrder,
   type DepthMade,
+  defaultAccuracy,
   defaultBasis,
   describeAtDepths,
+  type Improvement,
+  type MonteCarlo,
+  monteCarlo,
   type Origin,
   type Profile,
   type ReferenceDensity,
@@ -11,6 +23,10 @@ export {
   type Stratification,
   shortcutCosts,
   stratificationOf,
+  type Uncertainty,
+  uncertaintyAtDepths,
+  uncertaintyOf,
+  whereToImprove,
 } from "../column/index.ts";
 export type { Level, LevelId } from "../design/index.ts";
 export {

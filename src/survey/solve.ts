@@ -1,6 +1,15 @@
 import type { Issue } from "../base/index.ts";
 import type { Cast } from "../cast/index.ts";
-import { type Column, describeAtDepths, integrateCast, type Profile, sampledProfile } from "../column/index.ts";
+import {
+  type Column,
+  describeAtDepths,
+  integrateCast,
+  type Profile,
+  sampledProfile,
+  type Uncertainty,
+  uncertaintyAtDepths,
+  uncertaintyOf,
+} from "../column/index.ts";
 import { type PreparedCast, prepareCast, QUALITY_FLAG } from "../quality/index.ts";
 import { emptySurvey, type Survey } from "./survey.ts";
 
@@ -19,8 +28,12 @@ export interface Solution {
   readonly profile: Profile;
   /** Quality flag of each row of the profile (QARTOD), the worst of a bin; 9 where there was no sample. */
   readonly flag: Uint8Array;
+  /** Standard uncertainty (k = 1) of gauge pressure in each row of the profile; what it is made of, uncertaintyOf tells. */
+  readonly uncertaintyKPa: Float64Array;
   /** One row a level, in the survey's order. */
   readonly levels: Profile;
+  /** Of each level, and what it is made of. */
+  readonly levelUncertainty: Uncertainty;
   /** The last of the cast's issues: what is to be said of the levels. */
   readonly levelIssues: readonly Issue[];
 }
@@ -45,16 +58,17 @@ export function solveCast(survey: SolvingTerms, cast: Cast): SolvedCast {
   column.sampleIndex.forEach((sample, knot) => {
     flag[knot + 1] = prepared.preparedFlag[sample]!;
   });
-  const solvedLevels = atLevels(levels, column);
+  const uncertaintyKPa = uncertaintyOf(column, prepared.cast).combinedKPa;
+  const solvedLevels = atLevels(levels, column, prepared.cast);
   const issues = [...found, ...integrated.issues, ...solvedLevels.levelIssues];
-  return { cast, issues, prepared, solution: { column, profile, flag, ...solvedLevels } };
+  return { cast, issues, prepared, solution: { column, profile, flag, uncertaintyKPa, ...solvedLevels } };
 }
 
 /** The same cast at other levels: its column stands, so this is quick. */
 export function solveLevels(survey: Pick<Survey, "levels">, solved: SolvedCast): SolvedCast {
-  const { solution, issues } = solved;
+  const { solution, issues, prepared } = solved;
   if (!solution) return solved;
-  const solvedLevels = atLevels(survey.levels, solution.column);
+  const solvedLevels = atLevels(survey.levels, solution.column, prepared.cast);
   const ownIssues = issues.slice(0, issues.length - solution.levelIssues.length);
   return {
     ...solved,
@@ -63,13 +77,19 @@ export function solveLevels(survey: Pick<Survey, "levels">, solved: SolvedCast):
   };
 }
 
-const atLevels = (levels: Survey["levels"], column: Column): Pick<Solution, "levels" | "levelIssues"> => ({
-  levels: describeAtDepths(
-    column,
-    levels.map((level) => level.depthM),
-  ),
-  levelIssues: levelIssues(levels, column),
-});
+/** @param cast the prepared one, which the column was made of */
+function atLevels(
+  levels: Survey["levels"],
+  column: Column,
+  cast: Cast,
+): Pick<Solution, "levels" | "levelUncertainty" | "levelIssues"> {
+  const depthsM = levels.map((level) => level.depthM);
+  return {
+    levels: describeAtDepths(column, depthsM),
+    levelUncertainty: uncertaintyAtDepths(column, cast, depthsM),
+    levelIssues: levelIssues(levels, column),
+  };
+}
 
 function levelIssues(levels: Survey["levels"], column: Column): readonly Issue[] {
   const firstDepthM = column.depthM[0]!;

@@ -164,7 +164,7 @@ describe("layerhead column --out", () => {
     const [profile] = [...written.values()];
     const lines = profile!.trim().split("\n");
     expect(lines[0]).toBe(
-      "cast,depth_m,elevation_m,sea_pressure_dbar,gauge_pressure_kPa,absolute_pressure_kPa,temperature_degC,practical_salinity,absolute_salinity_g_kg,conservative_temperature_degC,density_kg_m3,sigma0_kg_m3,sound_speed_m_s,buoyancy_frequency_squared_s-2,constant_density_pressure_kPa,departure_kPa,departure_m,departure_percent,flag,origin",
+      "cast,depth_m,elevation_m,sea_pressure_dbar,gauge_pressure_kPa,absolute_pressure_kPa,temperature_degC,practical_salinity,absolute_salinity_g_kg,conservative_temperature_degC,density_kg_m3,sigma0_kg_m3,sound_speed_m_s,buoyancy_frequency_squared_s-2,constant_density_pressure_kPa,departure_kPa,departure_m,departure_percent,pressure_uncertainty_kPa,flag,origin",
     );
     expect(lines.slice(1).map((line) => line.split(",").at(-1))).toEqual([
       "surface-gap",

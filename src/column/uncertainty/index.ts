@@ -1,4 +1,6 @@
 export { type Accuracy, type AccuracyReason, accuracyReasons, defaultAccuracy } from "./accuracy.ts";
+export { budgetOf } from "./budget.ts";
+export { confirmsFirstOrder, type MonteCarloOptions, monteCarlo } from "./monte-carlo.ts";
 export {
   type Budget,
   type BudgetShare,
@@ -10,3 +12,5 @@ export {
   type SamplingError,
   type Uncertainty,
 } from "./uncertainty.ts";
+export { uncertaintyAtDepths, uncertaintyOf } from "./uncertainty-of.ts";
+export { whereToImprove } from "./where-to-improve.ts";

@@ -25,6 +25,12 @@ export const CONTRIBUTORS = [
 
 export type Contributor = (typeof CONTRIBUTORS)[number];
 
+export const RANDOM_CONTRIBUTORS: readonly Contributor[] = [
+  "temperature-random",
+  "salinity-random",
+  "sample-depth-random",
+];
+
 /**
  * Standard uncertainty (k = 1) of gauge pressure at some depths of a column, one entry a depth; NaN where the column has
  * no water. Plain data, so that it can be handed between threads.
