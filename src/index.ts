@@ -1,6 +1,18 @@
 /** The library's public face. */
 export { type Issue, isToolError, type Outcome, ToolError } from "./base/index.ts";
-export { type Cast, type FileReading, readCastFile, type Samples } from "./cast/index.ts";
+export {
+  type AnyFileReading,
+  type Cast,
+  type FileReading,
+  joinStations,
+  parseAnswers,
+  type ReadingAnswers,
+  readCastFile,
+  readFile,
+  readStationList,
+  type Samples,
+  type StationList,
+} from "./cast/index.ts";
 export {
   csvText,
   LEVELS_TABLE,
@@ -19,14 +31,20 @@ export {
   type Basis,
   type Column,
   defaultBasis,
+  defaultPreparation,
   describeAtDepths,
   emptySurvey,
   type Level,
+  type Preparation,
   type Profile,
+  type ShortcutCost,
   type SolvedCast,
+  type Stratification,
   type Survey,
+  shortcutCosts,
   solve,
   solveCast,
+  stratificationOf,
   type WaterPoints,
   waterAtPoints,
 } from "./survey/index.ts";

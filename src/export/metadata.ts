@@ -27,7 +27,7 @@ const schema = ({ name, description, datatype, unit }: ColumnDescription): Recor
 export const tableMetadata = (
   url: string,
   columns: readonly ColumnDescription[],
-  made: { readonly basis: Basis; readonly preparation?: Preparation; readonly sources: readonly SourceFile[] },
+  made: { readonly basis: Basis; readonly preparation: Preparation; readonly sources: readonly SourceFile[] },
 ): Record<string, unknown> => ({
   "@context": "http://www.w3.org/ns/csvw",
   url,
@@ -37,7 +37,7 @@ export const tableMetadata = (
     {
       program: `Layerhead ${VERSION}`,
       basis: basisJson(made.basis),
-      ...(made.preparation && { preparation: preparationJson(made.preparation) }),
+      preparation: preparationJson(made.preparation),
       sources: made.sources.map(({ fileName, sha256 }) => ({ file: fileName, sha256 })),
     },
   ],

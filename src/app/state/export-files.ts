@@ -56,7 +56,11 @@ function withMetadata(
   const sources = readings.flatMap(({ fileName, sha256 }) =>
     used.has(fileName) && sha256 ? [{ fileName, sha256 }] : [],
   );
-  const metadata = tableMetadata(`${name}.csv`, columns, { basis: survey.basis, sources });
+  const metadata = tableMetadata(`${name}.csv`, columns, {
+    basis: survey.basis,
+    preparation: survey.preparation,
+    sources,
+  });
   return [
     { name: `${name}.csv`, mediaType: "text/csv", text },
     // The name that CSVW has for the metadata of one table.
