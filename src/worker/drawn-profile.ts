@@ -14,6 +14,8 @@ export interface DrawnProfile extends Pick<Profile, "n" | "depthM" | (typeof DRA
   /** Rows outside these two belong to water the probe did not sample. */
   readonly firstSampleIndex: number;
   readonly lastSampleIndex: number;
+  /** Standard uncertainty (k = 1) of the pressure, and so of the departure. */
+  readonly uncertaintyKPa: Float64Array;
 }
 
 const MOST_ROWS_COUNT = 3000;
@@ -49,7 +51,13 @@ function extremes(values: Float64Array, start: number, end: number): readonly [n
 /** What is drawn of a solution: all of it, or of a long one the rows that can be seen. */
 export function drawnProfile(solution: Solution): DrawnProfile {
   const { profile, column } = solution;
-  if (profile.n <= MOST_ROWS_COUNT) return { ...picked(profile), firstSampleIndex: 1, lastSampleIndex: column.n };
+  if (profile.n <= MOST_ROWS_COUNT)
+    return {
+      ...picked(profile),
+      firstSampleIndex: 1,
+      lastSampleIndex: column.n,
+      uncertaintyKPa: solution.uncertaintyKPa,
+    };
   const rows = rowsToDraw(solution);
   const thinned = (values: Float64Array): Float64Array => Float64Array.from(rows, (row) => values[row]!);
   return {
@@ -62,6 +70,7 @@ export function drawnProfile(solution: Solution): DrawnProfile {
     departureKPa: thinned(profile.departureKPa),
     firstSampleIndex: rows.indexOf(1),
     lastSampleIndex: rows.indexOf(column.n),
+    uncertaintyKPa: thinned(solution.uncertaintyKPa),
   };
 }
 

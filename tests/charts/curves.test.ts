@@ -53,8 +53,18 @@ describe("layOutCurve", () => {
     isInHand: true,
     depths: Float64Array.from([0, 2, 4, 6, 8]),
     values: Float64Array.from(values),
+    halfWidths: null,
     firstSampleIndex: 1,
     lastSampleIndex: 3,
+  });
+
+  it("lays a band between the values less and plus their half widths, and none without them", () => {
+    const frame = { axis: linear, depth, isStepped: false, rowPx: 1 };
+    const halfWidths = Float64Array.from([0, 1, 1, 2, 2]);
+    expect(layOutCurve({ ...curve([1, 1, 5, 3, 3]), halfWidths }, frame).bandPath).toBe(
+      "M10,0L20,20L60,40L50,60L50,80L10,80L10,60L40,40L0,20L10,0Z",
+    );
+    expect(layOutCurve(curve([1, 1, 5, 3, 3]), frame).bandPath).toBe("");
   });
 
   it("draws samples solid and the gaps above and below them dotted", () => {

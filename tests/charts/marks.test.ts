@@ -18,6 +18,7 @@ const panel = (id: string, scale: PanelInput["scale"], values: readonly number[]
       isInHand: true,
       depths: Float64Array.from(values, (_, i) => i * 5),
       values: Float64Array.from(values),
+      halfWidths: null,
       firstSampleIndex: 0,
       lastSampleIndex: values.length - 1,
     },

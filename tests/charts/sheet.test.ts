@@ -14,6 +14,7 @@ const curve = (values: readonly number[], over: Partial<CurveInput> = {}): Curve
   isInHand: true,
   depths: Float64Array.from(values, (_, i) => i * 5),
   values: Float64Array.from(values),
+  halfWidths: null,
   firstSampleIndex: 0,
   lastSampleIndex: values.length - 1,
   ...over,

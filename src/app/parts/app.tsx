@@ -20,6 +20,7 @@ import { ReadingJobs } from "./reading-jobs.tsx";
 import { ReadingPanel } from "./reading-panel.tsx";
 import { Readout } from "./readout.tsx";
 import { StationPanel } from "./station-panel.tsx";
+import { UncertaintyBudget } from "./uncertainty-budget.tsx";
 
 export function App() {
   const isBasisOpen = useSignal(false);
@@ -42,6 +43,7 @@ export function App() {
       <aside id="basis" class={isBasisOpen.value ? "open" : ""} aria-label="Basis and summary">
         <BasisPanel />
         <PreparationRows />
+        <UncertaintyBudget />
         <CastSummary />
         <CastDetails />
       </aside>

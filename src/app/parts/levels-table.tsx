@@ -9,24 +9,21 @@ import { QuantityEntry } from "./number-entry.tsx";
 
 const DEEPEST_LEVEL_M = 12_000;
 
-type Values = Solution["levels"];
-
 interface LevelColumn {
   readonly title: string;
   readonly quantity: PageQuantity | "percent";
-  readonly values: (levels: Values) => Float64Array;
+  readonly values: (solution: Solution) => Float64Array;
   readonly needsDatum?: boolean;
 }
 
 const COLUMNS: readonly LevelColumn[] = [
-  { title: "Elevation", quantity: "elevation", values: (at) => at.elevationM, needsDatum: true },
-  { title: "Density", quantity: "density", values: (at) => at.rhoKgM3 },
-  { title: "Gauge", quantity: "gaugePressure", values: (at) => at.gaugePressureKPa },
-  { title: "Absolute", quantity: "absolutePressure", values: (at) => at.absPressureKPa },
-  { title: "Departure", quantity: "departure", values: (at) => at.departureKPa },
-  { title: "", quantity: "percent", values: (at) => at.departureFrac },
-  { title: "Temp.", quantity: "temperature", values: (at) => at.inSituTempC },
-  { title: "Salinity", quantity: "practicalSalinity", values: (at) => at.practicalSalinity },
+  { title: "Elevation", quantity: "elevation", values: ({ levels }) => levels.elevationM, needsDatum: true },
+  { title: "Density", quantity: "density", values: ({ levels }) => levels.rhoKgM3 },
+  { title: "Gauge", quantity: "gaugePressure", values: ({ levels }) => levels.gaugePressureKPa },
+  { title: "Absolute", quantity: "absolutePressure", values: ({ levels }) => levels.absPressureKPa },
+  { title: "Departure", quantity: "departure", values: ({ levels }) => levels.departureKPa },
+  { title: "± (k = 2)", quantity: "departure", values: ({ levelUncertainty }) => levelUncertainty.expandedKPa },
+  { title: "", quantity: "percent", values: ({ levels }) => levels.departureFrac },
 ];
 
 /** The levels in the cast in hand, and which of the visible casts presses hardest there. */
@@ -83,7 +80,7 @@ function LevelRow({ level, levelIndex, columns, system }: RowProps) {
   const solution = castInHand.value?.solution ?? null;
   const note = solution ? BEHIND_NOTE[behindDepth(solution.column, level.depthM)] : "";
   const cell = ({ quantity, values }: LevelColumn): string => {
-    const value = solution ? values(solution.levels)[levelIndex]! : Number.NaN;
+    const value = solution ? values(solution)[levelIndex]! : Number.NaN;
     return quantity === "percent" ? shownPercent(value) : shownNumber(value, quantity, system);
   };
   return (

@@ -10,7 +10,9 @@ interface PanelKind extends Omit<PanelInput, "curves" | "unit" | "title" | "shor
   readonly title: (basis: Basis, system: DisplaySystem) => string;
   readonly shortTitle: string;
   readonly quantity: PageQuantity;
-  readonly values: (profile: Omit<DrawnProfile, "firstSampleIndex" | "lastSampleIndex">) => Float64Array;
+  readonly values: (
+    profile: Omit<DrawnProfile, "firstSampleIndex" | "lastSampleIndex" | "uncertaintyKPa">,
+  ) => Float64Array;
 }
 
 const PLAIN = { scale: "linear", isStepped: false, withZero: false, share: 1, isDroppable: false } as const;
@@ -84,6 +86,9 @@ const inShownUnit = (values: Float64Array, quantity: PageQuantity, system: Displ
 export const inShownUnitOne = (value: number, quantity: PageQuantity, system: DisplaySystem): number =>
   convert(value, ownUnit(quantity), displayUnit(quantity, system).unit);
 
+/** The band is as wide as the expanded uncertainty, k = 2. */
+const EXPANDED = 2;
+
 export interface SheetSource {
   /** Those to draw; the one in hand may stand anywhere among them. */
   readonly solved: readonly AnsweredCast[];
@@ -117,6 +122,14 @@ export function profileSheet(source: SheetSource): SheetInput {
       isInHand: cast.id === source.castInHandId,
       depths: inShownUnit(profile!.depthM, "depth", system),
       values: inShownUnit(panel.values(profile!), panel.quantity, system),
+      halfWidths:
+        panel.id === "departure" && cast.id === source.castInHandId
+          ? inShownUnit(
+              profile!.uncertaintyKPa.map((standardKPa) => EXPANDED * standardKPa),
+              panel.quantity,
+              system,
+            )
+          : null,
       firstSampleIndex: profile!.firstSampleIndex,
       lastSampleIndex: profile!.lastSampleIndex,
     }));

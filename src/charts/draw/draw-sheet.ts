@@ -102,6 +102,12 @@ function drawPanel(group: Group, panel: Panel, { depth, gaps }: SheetLayout): vo
     .join("path")
     .attr("class", "zero")
     .attr("d", String);
+  group
+    .selectAll("path.band")
+    .data(panel.curves.filter((curve) => curve.bandPath !== ""))
+    .join("path")
+    .attr("class", (curve) => `band c${curve.colourIndex}`)
+    .attr("d", (curve) => curve.bandPath);
   const curves = panel.curves.flatMap((curve) =>
     (["solid", "dotted", "low", "negative"] as const).map((kind) => ({
       kind,

@@ -1,4 +1,4 @@
-import { line } from "d3-shape";
+import { area, line } from "d3-shape";
 import { decimateLine, type Point } from "./decimate-line.ts";
 import { type DepthAxis, depthPx } from "./depth-axis.ts";
 import type { CurveInput, CurveLayout } from "./sheet.ts";
@@ -32,12 +32,38 @@ export function layOutCurve(curve: CurveInput, frame: CurveFrame): CurveLayout {
     castId,
     colourIndex,
     isInHand,
+    bandPath: bandPath(curve, frame),
     solidPath: pathOf(thinned),
     dottedPath: pathOf(dotted),
     lowPath: edge((value) => value >= 0 && value < frame.axis.from),
     negativePath: edge((value) => value < 0),
     points: thinned.flat(),
   };
+}
+
+/** A row of a band: its depth, and the two values it lies between. */
+type Span = readonly [yPx: number, fromPx: number, toPx: number];
+
+const asBand = area<Span>()
+  .y(([yPx]) => yPx)
+  .x0(([, fromPx]) => fromPx)
+  .x1(([, , toPx]) => toPx)
+  .digits(1);
+
+/** Rows closer than this cannot be told apart at the edge of a band. */
+const BAND_ROW_PX = 1;
+
+function bandPath({ depths, values, halfWidths }: CurveInput, { axis, depth }: CurveFrame): string {
+  if (halfWidths === null) return "";
+  const spans: Span[] = [];
+  for (let i = 0; i < depths.length; i++) {
+    const yPx = depthPx(depth, depths[i]!);
+    const [fromPx, toPx] = [valuePx(axis, values[i]! - halfWidths[i]!), valuePx(axis, values[i]! + halfWidths[i]!)];
+    const isLast = i === depths.length - 1;
+    const isFar = spans.length === 0 || yPx - spans.at(-1)![0] >= BAND_ROW_PX;
+    if (Number.isFinite(fromPx + toPx) && (isFar || isLast)) spans.push([yPx, fromPx, toPx]);
+  }
+  return asBand(spans) ?? "";
 }
 
 /** Straight lines from row to row, broken where a value is missing. */

@@ -11,6 +11,8 @@ export interface CurveInput {
   readonly isInHand: boolean;
   readonly depths: Float64Array;
   readonly values: Float64Array;
+  /** How far the truth may lie to either side; null where that is not drawn. */
+  readonly halfWidths: Float64Array | null;
   /** Rows outside these two belong to water the probe did not sample. */
   readonly firstSampleIndex: number;
   readonly lastSampleIndex: number;
@@ -56,6 +58,8 @@ export interface CurveLayout {
   readonly castId: string;
   readonly colourIndex: number;
   readonly isInHand: boolean;
+  /** Between the values less and plus their half widths; empty where there are none. */
+  readonly bandPath: string;
   /** Where there are samples. */
   readonly solidPath: string;
   /** Where there are none. */
