@@ -78,7 +78,7 @@ describe("basis, units and history", () => {
     // 10 m by the definition of the foot, 0.3048 m.
     await expect.poll(() => page.getByLabel("Depth of Level 1").inputValue()).toBe("32.81");
     const head = await page.locator(".level-table thead").textContent();
-    for (const unit of ["Depth ft", "Density lb/ft³", "Gauge psi", "Temp. °F"]) expect(head).toContain(unit);
+    for (const unit of ["Depth ft", "Density lb/ft³", "Gauge psi", "Departure psi"]) expect(head).toContain(unit);
     expect(await page.locator("[data-panel=density] .unit").textContent()).toBe("lb/ft³");
     // One standard atmosphere, 101.325 kPa.
     expect(await page.getByLabel("Air pressure").inputValue()).toBe("14.696");
