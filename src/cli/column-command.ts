@@ -10,13 +10,15 @@ import {
   tableMetadata,
 } from "../export/index.ts";
 import { type SolvedCast, type Survey, solve } from "../survey/index.ts";
-import { columnOptions } from "./column-options.ts";
+import { type ColumnOptions, columnOptions } from "./column-options.ts";
 import { columnText } from "./column-text.ts";
 import { castFileNames } from "./file-names.ts";
 import { gatherSurvey } from "./gather-survey.ts";
 import { EXIT, type ExitCode, type Host } from "./host.ts";
 import { castIssueLines } from "./issue-lines.ts";
+import { levelChecks, levelChecksJson, type TrialTerms } from "./level-checks.ts";
 import type { ReadFile } from "./read-files.ts";
+import { uncertaintyText } from "./uncertainty-text.ts";
 import { COLUMN_USAGE } from "./usage.ts";
 
 /** `layerhead column`: reads every file, integrates every cast, writes what was asked for. */
@@ -38,11 +40,24 @@ export async function columnCommand(host: Host, args: readonly string[]): Promis
     );
   }
 
-  if (options.json) host.out(`${JSON.stringify(surveyJson(survey, solved))}\n`);
+  if (options.json) host.out(`${JSON.stringify(columnJson(survey, solved, options.monteCarlo))}\n`);
   if (options.out !== null) await writeTables(host, options.out, survey, solved, sourcesOf(files));
-  if (!options.json && options.out === null) host.out(solved.map((cast) => columnText(survey, cast)).join("\n"));
+  if (!options.json && options.out === null) host.out(solved.map((cast) => castText(survey, cast, options)).join("\n"));
 
   return allRead && solved.every((cast) => cast.solution !== null) ? EXIT.done : EXIT.badInput;
+}
+
+/** The survey's JSON, and with every cast its cross-check where one was asked for. */
+function columnJson(survey: Survey, solved: readonly SolvedCast[], trials: TrialTerms | null) {
+  const json = surveyJson(survey, solved);
+  return trials
+    ? { ...json, monte_carlo: solved.map((one) => levelChecksJson(levelChecks(survey, one, trials), trials)) }
+    : json;
+}
+
+function castText(survey: Survey, one: SolvedCast, { uncertainty, monteCarlo }: ColumnOptions): string {
+  const table = columnText(survey, one, uncertainty);
+  return uncertainty || monteCarlo ? table + uncertaintyText(levelChecks(survey, one, monteCarlo)) : table;
 }
 
 const sourcesOf = (files: readonly ReadFile[]): readonly SourceFile[] =>

@@ -9,6 +9,7 @@ import {
   type WaterChoice,
 } from "../survey/index.ts";
 import { UsageError } from "./host.ts";
+import type { TrialTerms } from "./level-checks.ts";
 import { READING_OPTIONS, type ReadingOptions, readingOptions } from "./reading-options.ts";
 
 /** What `layerhead column` was asked to do. */
@@ -20,6 +21,9 @@ export interface ColumnOptions {
   readonly json: boolean;
   readonly out: string | null;
   readonly reading: ReadingOptions;
+  /** Whether a terminal is told how sure each pressure is. */
+  readonly uncertainty: boolean;
+  readonly monteCarlo: TrialTerms | null;
 }
 
 interface Range {
@@ -74,6 +78,23 @@ const levelsOf = (text: string): readonly Level[] =>
     return { id: `level-${index + 1}` as LevelId, name: `${depthM} m`, depthM };
   });
 
+const wholeNumber = (option: string, text: string, range: Range): number => {
+  const value = numberIn(option, text, range);
+  if (!Number.isInteger(value)) throw new UsageError(`${option} ${text}: expected a whole number`);
+  return value;
+};
+
+function trialTerms(trials: string | undefined, seed: string | undefined): TrialTerms | null {
+  if (trials === undefined) {
+    if (seed !== undefined) throw new UsageError("--seed goes with --monte-carlo");
+    return null;
+  }
+  return {
+    trialCount: wholeNumber("--monte-carlo", trials, { lowest: 100, highest: 1e7, unit: "trials" }),
+    seedIndex: wholeNumber("--seed", seed ?? "1", { lowest: 0, highest: 2 ** 32 - 1, unit: "" }),
+  };
+}
+
 const OPTIONS = {
   help: { type: "boolean", short: "h" },
   latitude: { type: "string" },
@@ -84,6 +105,9 @@ const OPTIONS = {
   "depth-made": { type: "string" },
   bed: { type: "string" },
   levels: { type: "string" },
+  uncertainty: { type: "boolean" },
+  "monte-carlo": { type: "string" },
+  seed: { type: "string" },
   json: { type: "boolean" },
   out: { type: "string" },
   ...READING_OPTIONS,
@@ -130,6 +154,8 @@ export function columnOptions(args: readonly string[]): ColumnOptions {
     json: values.json === true,
     out: values.out ?? null,
     reading: readingOptions(values),
+    uncertainty: values.uncertainty === true,
+    monteCarlo: trialTerms(values["monte-carlo"], values.seed),
   };
 }
 

@@ -4,7 +4,9 @@ import { textTable } from "./text-table.ts";
 /** A terminal shows this many rows of a cast at most; --out and --json give all. */
 const MOST_ROWS_COUNT = 40;
 
-const HEADS = [
+type Head = readonly [string, string];
+
+const HEADS_BEFORE: readonly Head[] = [
   ["depth", "m"],
   ["temperature", "degC"],
   ["salinity", "1"],
@@ -12,15 +14,22 @@ const HEADS = [
   ["sea pressure", "dbar"],
   ["gauge", "kPa"],
   ["absolute", "kPa"],
+];
+/** Expanded uncertainty of gauge and of absolute pressure. */
+const HEADS_UNCERTAINTY: readonly Head[] = [
+  ["gauge +-", "kPa, k=2"],
+  ["absolute +-", "kPa, k=2"],
+];
+const HEADS_BEHIND: readonly Head[] = [
   ["departure", "kPa"],
   ["departure", "m"],
   ["departure", "%"],
   ["", ""],
-] as const;
+];
 
 const fixed = (value: number, digits: number): string => (Number.isNaN(value) ? "-" : value.toFixed(digits));
 
-const rowText = (profile: Profile, i: number, note: string): readonly string[] => [
+const rowText = (profile: Profile, i: number, sure: readonly number[], note: string): readonly string[] => [
   fixed(profile.depthM[i]!, 3),
   fixed(profile.inSituTempC[i]!, 3),
   fixed(profile.practicalSalinity[i]!, 3),
@@ -28,6 +37,7 @@ const rowText = (profile: Profile, i: number, note: string): readonly string[] =
   fixed(profile.seaPressureDbar[i]!, 4),
   fixed(profile.gaugePressureKPa[i]!, 3),
   fixed(profile.absPressureKPa[i]!, 3),
+  ...sure.map((expandedKPa) => fixed(expandedKPa, 3)),
   fixed(profile.departureKPa[i]!, 3),
   fixed(profile.departureM[i]!, 4),
   fixed(profile.departureFrac[i]! * 100, 3),
@@ -42,16 +52,27 @@ function chosenRows(n: number): readonly number[] {
   return [...rows, n - 1];
 }
 
-/** One cast for people at a terminal: what it is, what was assumed, the table, the levels. */
-export function columnText(survey: Survey, { cast, solution }: SolvedCast): string {
+/**
+ * One cast for people at a terminal: what it is, what was assumed, the table, the levels.
+ * @param withUncertainty whether pressures are told with what they may be off by
+ */
+export function columnText(survey: Survey, { cast, solution }: SolvedCast, withUncertainty: boolean): string {
   if (!solution) return `${cast.name}  (${cast.fileName})\n  no result\n`;
-  const { column, profile, levels, flag } = solution;
+  const { column, profile, uncertaintyKPa, levels, levelUncertainty, flag } = solution;
+  const expanded = (standardKPa: number): readonly number[] =>
+    withUncertainty ? [2 * standardKPa, 2 * Math.hypot(standardKPa, column.basis.accuracy.airPressureKPa)] : [];
   const rows = chosenRows(profile.n);
   const profileNote = (i: number): string =>
     profile.origin[i] !== "sample" ? profile.origin[i]! : flag[i] === 3 ? "suspect" : "";
   const table = [
-    ...rows.map((i) => ({ depthM: profile.depthM[i]!, text: rowText(profile, i, profileNote(i)) })),
-    ...survey.levels.map((level, i) => ({ depthM: level.depthM, text: rowText(levels, i, "level") })),
+    ...rows.map((i) => ({
+      depthM: profile.depthM[i]!,
+      text: rowText(profile, i, expanded(uncertaintyKPa[i]!), profileNote(i)),
+    })),
+    ...survey.levels.map((level, i) => ({
+      depthM: level.depthM,
+      text: rowText(levels, i, expanded(levelUncertainty.combinedKPa[i]!), "level"),
+    })),
   ].sort((a, b) => a.depthM - b.depthM);
   const thinned =
     rows.length < profile.n ? `  ${rows.length} of ${profile.n} rows shown; --out DIR or --json gives all\n` : "";
@@ -62,7 +83,7 @@ export function columnText(survey: Survey, { cast, solution }: SolvedCast): stri
     `  ${[...whereAndWhen(survey.basis, cast), `${column.n} samples from ${first} to ${last} m`].join(", ")}`,
     `  ${waterLabel(survey.basis.water)}, departure from ${column.referenceRhoKgM3.toFixed(3)} kg/m3, air ${survey.basis.airPressureKPa} kPa`,
     textTable(
-      HEADS,
+      [...HEADS_BEFORE, ...(withUncertainty ? HEADS_UNCERTAINTY : []), ...HEADS_BEHIND],
       table.map((row) => row.text),
     ),
     thinned,

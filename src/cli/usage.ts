@@ -46,6 +46,11 @@ how files are read
 
 what comes out
   --levels M,M,...         depths to report besides the samples
+  --uncertainty            how far each pressure may be off (95 %), what makes it so at
+                           each level (or at the bottom), and what would help most
+  --monte-carlo N          N trials with all errors drawn at random, as a cross-check
+                           there; 10000 or more tell (on the terminal and in --json)
+  --seed S                 whole number that the trials follow from (default 1)
   --json                   one JSON object on standard output, full precision
   --out DIR                one CSV per cast and summary.csv, each with its metadata
 
@@ -65,7 +70,7 @@ weight reads too deep. Positive: the shortcut says too much.
   --levels M,M,...         depths to compare at (default: the bottom of each cast)
   --reference-density RHO  a density of your own, kg/m3, besides
   --json                   one JSON object on standard output
-  and the other options of layerhead column, but for --out
+  and the other options of layerhead column, but for --out, --uncertainty, --monte-carlo
 `;
 
 export const WATER_USAGE = `usage: layerhead water FILE.csv|-
