@@ -52,8 +52,8 @@ async function solveInShares(wanted: Survey): Promise<void> {
 }
 
 /** Reads the levels off a column that stands. */
-function atLevels(wanted: Survey, { drawn, marked, ...solvedCast }: AnsweredCast): AnsweredCast {
-  return { ...solveLevels(wanted, solvedCast), drawn, marked };
+function atLevels(wanted: Survey, { drawn, marked, bottomBudget, ...solvedCast }: AnsweredCast): AnsweredCast {
+  return { ...solveLevels(wanted, solvedCast), drawn, marked, bottomBudget };
 }
 
 /** Longer than this without a pause would be felt. */

@@ -1,5 +1,13 @@
 import type { Cast } from "../cast/index.ts";
-import type { PreparedCast, Profile, Solution, SolvedCast } from "../survey/index.ts";
+import {
+  type Budget,
+  budgetOf,
+  type PreparedCast,
+  type Profile,
+  type Solution,
+  type SolvedCast,
+  uncertaintyAtDepths,
+} from "../survey/index.ts";
 import { buffersOf } from "./buffers.ts";
 import { type DrawnProfile, drawnProfile } from "./drawn-profile.ts";
 import { isSameReasons, type MarkedSamples, markedSamples } from "./marked-samples.ts";
@@ -9,6 +17,8 @@ import { packRuns, type Run, unpackRuns } from "./runs.ts";
 export type AnsweredCast = SolvedCast & {
   readonly drawn: DrawnProfile | null;
   readonly marked: MarkedSamples;
+  /** What the uncertainty at the bottom is made of. */
+  readonly bottomBudget: Budget | null;
 };
 
 /** A solved cast on its way between threads: the cast stays behind, lists of equal items are said once. */
@@ -22,6 +32,7 @@ export interface PackedCast {
   readonly solution: (Omit<Solution, "profile"> & { readonly profile: PackedProfile }) | null;
   readonly drawn: DrawnProfile | null;
   readonly marked: MarkedSamples;
+  readonly bottomBudget: Budget | null;
 }
 
 type PackedProfile = Omit<Profile, "origin"> & { readonly origin: readonly Run<Profile["origin"][number]>[] };
@@ -45,6 +56,8 @@ export function packCast(
     },
     drawn: solution && drawnProfile(solution),
     marked: markedSamples(solved, unmeasuredPracticalSalinity),
+    bottomBudget:
+      solution && budgetOf(uncertaintyAtDepths(solution.column, prepared.cast, [solution.column.bottomDepthM]), 0),
   };
   const buffers = buffersOf(packed);
   for (const kept of buffersOf(cast.samples)) buffers.delete(kept);
@@ -53,7 +66,7 @@ export function packCast(
 
 /** The solved cast again, of the cast the page has. */
 export function unpackCast(packed: PackedCast, cast: Cast): AnsweredCast {
-  const { issues, prepared, solution, drawn, marked } = packed;
+  const { issues, prepared, solution, drawn, marked, bottomBudget } = packed;
   return {
     cast,
     issues,
@@ -64,6 +77,7 @@ export function unpackCast(packed: PackedCast, cast: Cast): AnsweredCast {
     },
     drawn,
     marked,
+    bottomBudget,
   };
 }
 

@@ -1,5 +1,5 @@
 import { computed } from "@preact/signals";
-import { type Budget, budgetOf, type Level, uncertaintyAtDepths } from "../../survey/index.ts";
+import { type Budget, budgetOf, type Level } from "../../survey/index.ts";
 import { shownValue } from "../show/shown.ts";
 import { castInHand, solved, state } from "../store.ts";
 
@@ -13,10 +13,10 @@ const budgets = computed((): readonly PlacedBudget[] => {
   const inHand = castInHand.value;
   if (!inHand?.solution) return [];
   const { levels } = solved.value.survey;
-  const { column, levelUncertainty } = inHand.solution;
+  const { levelUncertainty } = inHand.solution;
   const placed = (place: string, budget: Budget | null): readonly PlacedBudget[] => (budget ? [{ place, budget }] : []);
   if (levels.length > 0) return levels.flatMap((level: Level, k) => placed(level.name, budgetOf(levelUncertainty, k)));
-  return placed("the bottom", budgetOf(uncertaintyAtDepths(column, inHand.prepared.cast, [column.bottomDepthM]), 0));
+  return placed("The bottom", inHand.bottomBudget);
 });
 
 /** How uncertain the pressures are that the user asked for, and what makes them so. */

@@ -56,8 +56,9 @@ describe("a solved cast on its way between threads", () => {
     expect(cast.samples.depthM!.length).toBe(40);
     expect(received.cast).toBe(cast);
     const again = solveCast(flagging(cast, 3, 6), cast);
-    const { drawn: _, marked: __, ...rest } = received;
+    const { drawn: _, marked: __, bottomBudget, ...rest } = received;
     expect(rest).toEqual(again);
+    expect(bottomBudget!.combinedKPa).toBeCloseTo(again.solution!.uncertaintyKPa.at(-1)!, 3);
   });
 });
 
