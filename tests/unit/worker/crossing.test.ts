@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { SolvedCast, Survey } from "../../../src/survey/index.ts";
-import { addFlagEdits, emptySurvey, solveCast } from "../../../src/survey/index.ts";
+import { addFlagEdits, emptySurvey, solveCast, uncertaintyAtDepths } from "../../../src/survey/index.ts";
 import { packCast, unpackCast } from "../../../src/worker/answered-cast.ts";
 import { buffersOf } from "../../../src/worker/buffers.ts";
 import { drawnProfile } from "../../../src/worker/drawn-profile.ts";
@@ -58,7 +58,9 @@ describe("a solved cast on its way between threads", () => {
     const again = solveCast(flagging(cast, 3, 6), cast);
     const { drawn: _, marked: __, bottomBudget, ...rest } = received;
     expect(rest).toEqual(again);
-    expect(bottomBudget!.combinedKPa).toBeCloseTo(again.solution!.uncertaintyKPa.at(-1)!, 3);
+    const { column } = again.solution!;
+    const atBottom = uncertaintyAtDepths(column, again.prepared.cast, [column.bottomDepthM]);
+    expect(bottomBudget!.combinedKPa).toBe(atBottom.combinedKPa[0]);
   });
 });
 
