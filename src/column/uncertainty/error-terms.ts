@@ -95,6 +95,7 @@ export class ErrorTerms {
         return weighed(this.gaps.surfaceDownTo(place) / (2 * ROOT3));
       case "bed-gap":
         return weighed(this.gaps.bedDownTo(place) / (2 * ROOT3));
+      // The bound, not the shape: another curve through the same samples knows no better what lies between them.
       case "sampling":
         return weighed(this.sampling.boundDownTo(place) / ROOT3);
       case "gravity":

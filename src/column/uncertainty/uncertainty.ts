@@ -56,7 +56,7 @@ export interface Uncertainty {
   readonly salinityFrom: SampleSalinity["source"];
 }
 
-/** How wrong the straight line between samples may be. */
+/** How wrong the straight line between samples may be; the bound is what counts, as a rectangular distribution. */
 export interface SamplingError {
   /** Monotone cubic less straight line (signed): what another smooth curve through the same samples would give. */
   readonly shapeKPa: Float64Array;
