@@ -12,6 +12,7 @@ export {
   type DepthMade,
   defaultAccuracy,
   defaultBasis,
+  departureUncertaintyKPa,
   describeAtDepths,
   type Improvement,
   type MonteCarlo,

@@ -70,7 +70,7 @@ export function unpackCast(packed: PackedCast, cast: Cast): AnsweredCast {
   return {
     cast,
     issues,
-    prepared: { ...prepared, cast: prepared.cast ?? cast, reasons: unpackRuns(prepared.reasons) },
+    prepared: unpackPrepared(prepared, cast),
     solution: solution && {
       ...solution,
       profile: { ...solution.profile, origin: unpackRuns(solution.profile.origin) },
@@ -78,6 +78,19 @@ export function unpackCast(packed: PackedCast, cast: Cast): AnsweredCast {
     drawn,
     marked,
     bottomBudget,
+  };
+}
+
+/** The reasons of a raw record are millions; they are written out when somebody asks for them. */
+function unpackPrepared({ reasons, ...prepared }: PackedCast["prepared"], cast: Cast): PreparedCast {
+  let written: readonly (readonly string[])[] | null = null;
+  return {
+    ...prepared,
+    cast: prepared.cast ?? cast,
+    get reasons() {
+      written ??= unpackRuns(reasons);
+      return written;
+    },
   };
 }
 

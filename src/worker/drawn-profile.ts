@@ -1,4 +1,4 @@
-import type { Profile, Solution } from "../survey/index.ts";
+import { departureUncertaintyKPa, type Profile, type Solution } from "../survey/index.ts";
 
 /** The quantities that are drawn. */
 const DRAWN = [
@@ -14,13 +14,13 @@ export interface DrawnProfile extends Pick<Profile, "n" | "depthM" | (typeof DRA
   /** Rows outside these two belong to water the probe did not sample. */
   readonly firstSampleIndex: number;
   readonly lastSampleIndex: number;
-  /** Standard uncertainty (k = 1) of the pressure, and so of the departure. */
-  readonly uncertaintyKPa: Float64Array;
+  /** Standard (k = 1). */
+  readonly departureUncertaintyKPa: Float64Array;
 }
 
-const MOST_ROWS_COUNT = 3000;
+const MOST_ROWS_COUNT = 2000;
 /** No fewer than the eye can follow down a chart. */
-const SLICES_COUNT = 500;
+const SLICES_COUNT = 120;
 
 /** Of each thin slice of depth the first and last row, and those with the least and greatest of every quantity. */
 function rowsToDraw({ profile, column }: Solution): Int32Array {
@@ -51,12 +51,13 @@ function extremes(values: Float64Array, start: number, end: number): readonly [n
 /** What is drawn of a solution: all of it, or of a long one the rows that can be seen. */
 export function drawnProfile(solution: Solution): DrawnProfile {
   const { profile, column } = solution;
+  const uncertaintyKPa = departureUncertaintyKPa(column, profile, solution.uncertaintyKPa);
   if (profile.n <= MOST_ROWS_COUNT)
     return {
       ...picked(profile),
       firstSampleIndex: 1,
       lastSampleIndex: column.n,
-      uncertaintyKPa: solution.uncertaintyKPa,
+      departureUncertaintyKPa: uncertaintyKPa,
     };
   const rows = rowsToDraw(solution);
   const thinned = (values: Float64Array): Float64Array => Float64Array.from(rows, (row) => values[row]!);
@@ -70,7 +71,7 @@ export function drawnProfile(solution: Solution): DrawnProfile {
     departureKPa: thinned(profile.departureKPa),
     firstSampleIndex: rows.indexOf(1),
     lastSampleIndex: rows.indexOf(column.n),
-    uncertaintyKPa: thinned(solution.uncertaintyKPa),
+    departureUncertaintyKPa: thinned(uncertaintyKPa),
   };
 }
 

@@ -34,9 +34,9 @@ export interface MarkedSamples {
   readonly areAllMarked: boolean;
 }
 
-const MOST_FLAGGED_COUNT = 600;
+const MOST_FLAGGED_COUNT = 150;
 /** Samples with nothing wrong, as those of the way up: enough to show where they lie, too few to hide the curve. */
-const MOST_PLAIN_COUNT = 100;
+const MOST_PLAIN_COUNT = 60;
 
 /** Which samples of a cast are flagged or left out, where they stand and why. */
 export function markedSamples(solved: SolvedCast, unmeasuredPracticalSalinity: number): MarkedSamples {

@@ -11,7 +11,7 @@ interface PanelKind extends Omit<PanelInput, "curves" | "unit" | "title" | "shor
   readonly shortTitle: string;
   readonly quantity: PageQuantity;
   readonly values: (
-    profile: Omit<DrawnProfile, "firstSampleIndex" | "lastSampleIndex" | "uncertaintyKPa">,
+    profile: Omit<DrawnProfile, "firstSampleIndex" | "lastSampleIndex" | "departureUncertaintyKPa">,
   ) => Float64Array;
 }
 
@@ -125,7 +125,7 @@ export function profileSheet(source: SheetSource): SheetInput {
       halfWidths:
         panel.id === "departure" && cast.id === source.castInHandId
           ? inShownUnit(
-              profile!.uncertaintyKPa.map((standardKPa) => EXPANDED * standardKPa),
+              profile!.departureUncertaintyKPa.map((standardKPa) => EXPANDED * standardKPa),
               panel.quantity,
               system,
             )

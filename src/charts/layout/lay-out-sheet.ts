@@ -1,7 +1,7 @@
 import { type DepthAxis, depthAxis, depthPx } from "./depth-axis.ts";
 import { layOutCurve } from "./lay-out-curve.ts";
 import { powerOfTen } from "./power-of-ten.ts";
-import type { PanelInput, PanelLayout, SheetInput, SheetLayout, Size } from "./sheet.ts";
+import type { CurveInput, PanelInput, PanelLayout, SheetInput, SheetLayout, Size } from "./sheet.ts";
 import { labelWidthPx, titleWidthPx } from "./text-width.ts";
 import { linearAxis, logAxis, valuePx } from "./value-axis.ts";
 
@@ -47,12 +47,18 @@ function fittingPanels(panels: readonly PanelInput[], widthPx: number): readonly
   return widthPx >= least ? panels : panels.filter((panel) => !panel.isDroppable);
 }
 
+/** The values of a curve, and the edges of its band. */
+function valuesToHold({ values, halfWidths }: CurveInput): readonly Float64Array[] {
+  if (halfWidths === null) return [values];
+  return [values, values.map((value, i) => value - halfWidths[i]!), values.map((value, i) => value + halfWidths[i]!)];
+}
+
 function layOutPanel(
   panel: PanelInput,
   frame: { readonly leftPx: number; readonly rightPx: number },
   depth: DepthAxis,
 ): PanelLayout {
-  const values = panel.curves.map((curve) => curve.values);
+  const values = panel.curves.flatMap(valuesToHold);
   const axis = panel.scale === "log" ? logAxis(values, frame) : linearAxis(values, frame, panel.withZero);
   const rowPx = panel.curves.length > FEW_CURVES_COUNT ? 3 : 1;
   const curves = panel.curves.map((curve) => layOutCurve(curve, { axis, depth, isStepped: panel.isStepped, rowPx }));

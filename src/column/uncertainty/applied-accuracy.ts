@@ -21,17 +21,19 @@ export interface AppliedAccuracy {
   readonly gravityFrac: number;
 }
 
+/** Of gravity as a share of itself: the basis's word, or what it is where the latitude is known or not. */
+export const gravityFracOf = ({ basis, latitudeDeg }: Column): number =>
+  basis.accuracy.gravityFrac ?? (latitudeDeg === null ? UNPLACED_GRAVITY_FRAC : PLACED_GRAVITY_FRAC);
+
 export function appliedAccuracy(column: Column, salinityFrom: SampleSalinity["source"]): AppliedAccuracy {
   const { accuracy } = column.basis;
   const { randomTempC, systematicTempC } = accuracy;
-  const gravityFrac =
-    accuracy.gravityFrac ?? (column.latitudeDeg === null ? UNPLACED_GRAVITY_FRAC : PLACED_GRAVITY_FRAC);
   return {
     randomTempC,
     systematicTempC,
     ...salinityAccuracy(column, salinityFrom),
     ...depthAccuracy(column),
-    gravityFrac,
+    gravityFrac: gravityFracOf(column),
   };
 }
 

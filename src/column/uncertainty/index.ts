@@ -1,5 +1,6 @@
 export { type Accuracy, type AccuracyReason, accuracyReasons, defaultAccuracy } from "./accuracy.ts";
 export { budgetOf } from "./budget.ts";
+export { departureUncertaintyKPa } from "./departure-uncertainty.ts";
 export { confirmsFirstOrder, type MonteCarloOptions, monteCarlo } from "./monte-carlo.ts";
 export {
   type Budget,
