@@ -37,8 +37,22 @@ export async function readCastFiles(
   { answers, sheet }: ReadingOptions,
 ): Promise<readonly ReadFile[]> {
   const files: ReadFile[] = [];
-  for (const path of paths) files.push(await readOne(host, path, { answers, ...(sheet !== null && { sheet }) }));
+  let brokenPath: string | null = null;
+  for (const path of paths) {
+    const file = await readOne(host, path, { answers, ...(sheet !== null && { sheet }) });
+    const isNetcdf = NETCDF_NAME.test(path);
+    files.push(isNetcdf && brokenPath !== null ? { ...file, reading: readAfter(brokenPath, file.reading) } : file);
+    if (isNetcdf && file.reading.issues.some(({ code }) => code === "broken-file")) brokenPath ??= path;
+  }
   return files;
+}
+
+const NETCDF_NAME = /\.(nc4?|cdf|h5|hdf5?)$/i;
+
+/** A damaged netCDF-4 file may leave the library that reads them in disorder: what it reads next is not to be relied on. */
+function readAfter<T>(brokenPath: string, reading: Outcome<T>): Outcome<T> {
+  const message = `read after ${brokenPath}, which is damaged and may have disturbed the reading; run again without that file`;
+  return { ...reading, issues: [...reading.issues, { severity: "warning", code: "read-after-broken", message }] };
 }
 
 async function readOne(host: Host, path: string, options: ReadOptions): Promise<ReadFile> {

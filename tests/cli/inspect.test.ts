@@ -34,6 +34,14 @@ describe("layerhead inspect", () => {
     expect(mill.remarks[0]).toMatchObject({ line: 273, flag: 4, used: false });
   });
 
+  it("warns of what is read after a damaged netCDF-4 file in the same run", async () => {
+    const grid = bytesOf("tests/formats/profile-grid-netcdf4.nc");
+    const files = { "cut.nc": grid.subarray(0, 3000), "whole.nc": grid };
+    const warning = "whole.nc: warning: read after cut.nc, which is damaged";
+    expect((await layerhead(files, "inspect", "cut.nc", "whole.nc")).err).toContain(warning);
+    expect((await layerhead(files, "inspect", "whole.nc", "cut.nc")).err).not.toContain(warning);
+  });
+
   it("reads a workbook's sheet by name", async () => {
     const book = { "book.xlsx": bytesOf("tests/formats/two-sheets.xlsx") };
     expect((await layerhead(book, "inspect", "book.xlsx")).out).toContain("sheet May, of About, May, June");
