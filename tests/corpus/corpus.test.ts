@@ -2,7 +2,8 @@ import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import type { Outcome } from "../../src/base/index.ts";
 import { type Cast, type FileReading, readCastFile } from "../../src/cast/index.ts";
-import { REFUSED, UNDERSTOOD, type Understood } from "./corpus.ts";
+import { REFUSED, UNDERSTOOD } from "./corpus.ts";
+import type { Understood } from "./expected.ts";
 
 const FOLDER = new URL("./files/", import.meta.url);
 

@@ -1,28 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { type Column, defaultBasis, describeAtDepths, integrateCast } from "../../src/column/index.ts";
+import { anySamples } from "../support/any-samples.ts";
 import { castOf } from "../support/cast-of.ts";
 
 const RUNS = { seed: 20_260_418, numRuns: 200 };
 
-/** Casts of 2 to 40 samples with steps of 2 cm to 8 m, any salinity and temperature an estuary or reservoir can have. */
-const anyCast = fc
-  .array(
-    fc.record({
-      stepM: fc.double({ min: 0.02, max: 8, noNaN: true }),
-      practicalSalinity: fc.double({ min: 0, max: 40, noNaN: true }),
-      inSituTempC: fc.double({ min: 0, max: 32, noNaN: true }),
-    }),
-    { minLength: 2, maxLength: 40 },
-  )
-  .map((samples) => {
-    let depth = 0;
-    return {
-      depthM: samples.map(({ stepM }) => (depth += stepM)),
-      practicalSalinity: samples.map((sample) => sample.practicalSalinity),
-      inSituTempC: samples.map((sample) => sample.inSituTempC),
-    };
-  });
+const anyCast = anySamples(2, 40);
 
 const columnOf = (samples: Parameters<typeof castOf>[0], water: "teos10" | "exact" = "teos10"): Column => {
   const outcome = integrateCast(castOf(samples, { latitudeDeg: 51 }), { ...defaultBasis, water: { id: water } });

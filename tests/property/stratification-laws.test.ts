@@ -7,6 +7,7 @@ import { potentialEnergyAnomaly } from "../../src/column/stratification/potentia
 import { inDensityOrder, thorpeSorting } from "../../src/column/stratification/thorpe.ts";
 import { twoLayers } from "../../src/column/stratification/two-layers.ts";
 import { modeSpeeds } from "../../src/column/stratification/vertical-modes.ts";
+import { anySamples } from "../support/any-samples.ts";
 import { castOf } from "../support/cast-of.ts";
 
 const RUNS = { seed: 20_261_201, numRuns: 200 };
@@ -206,23 +207,7 @@ describe("mode speeds", () => {
 });
 
 describe("a column's stratification", () => {
-  const anyCast = fc
-    .array(
-      fc.record({
-        stepM: fc.double({ min: 0.02, max: 8, noNaN: true }),
-        practicalSalinity: fc.double({ min: 0, max: 40, noNaN: true }),
-        inSituTempC: fc.double({ min: 0, max: 32, noNaN: true }),
-      }),
-      { minLength: 1, maxLength: 40 },
-    )
-    .map((samples) => {
-      let depth = 0;
-      return castOf({
-        depthM: samples.map(({ stepM }) => (depth += stepM)),
-        practicalSalinity: samples.map((sample) => sample.practicalSalinity),
-        inSituTempC: samples.map((sample) => sample.inSituTempC),
-      });
-    });
+  const anyCast = anySamples(1, 40).map((samples) => castOf(samples));
 
   /** Every number in a result, at any depth of it. */
   const numbersOf = (value: unknown): readonly number[] =>

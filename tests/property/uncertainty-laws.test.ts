@@ -14,28 +14,12 @@ import {
 } from "../../src/column/index.ts";
 import { IPTS68_PER_ITS90 } from "../../src/gsw-ts-port/index.ts";
 import { eos80Density } from "../../src/water/index.ts";
+import { anySamples } from "../support/any-samples.ts";
 import { castOf } from "../support/cast-of.ts";
 
 const RUNS = { seed: 20_261_201, numRuns: 150 };
 
-/** Casts of 2 to 30 samples with steps of 2 cm to 8 m, any salinity and temperature an estuary or reservoir can have. */
-const anyCast = fc
-  .array(
-    fc.record({
-      stepM: fc.double({ min: 0.02, max: 8, noNaN: true }),
-      practicalSalinity: fc.double({ min: 0, max: 40, noNaN: true }),
-      inSituTempC: fc.double({ min: 0, max: 32, noNaN: true }),
-    }),
-    { minLength: 2, maxLength: 30 },
-  )
-  .map((samples) => {
-    let depth = 0;
-    return castOf({
-      depthM: samples.map(({ stepM }) => (depth += stepM)),
-      practicalSalinity: samples.map((sample) => sample.practicalSalinity),
-      inSituTempC: samples.map((sample) => sample.inSituTempC),
-    });
-  });
+const anyCast = anySamples(2, 30).map((samples) => castOf(samples));
 
 const columnOf = (cast: Parameters<typeof integrateCast>[0], basis: Partial<Column["basis"]> = {}): Column => {
   const outcome = integrateCast(cast, { ...defaultBasis, ...basis });
