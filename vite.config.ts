@@ -1,4 +1,4 @@
-import { readFileSync } from "node:fs";
+import { chmodSync, readFileSync } from "node:fs";
 import { defineConfig } from "vitest/config";
 
 const { version } = JSON.parse(readFileSync(new URL("package.json", import.meta.url), "utf8")) as { version: string };
@@ -48,5 +48,6 @@ const nodeBuild = {
       chunkFileNames: "chunks/[name]-[hash].js",
       banner: (chunk: { name: string }) => (chunk.name === "cli/main" ? "#!/usr/bin/env node" : ""),
     },
+    plugins: [{ name: "command-may-be-run", writeBundle: () => chmodSync("dist/cli/main.js", 0o755) }],
   },
 };
